@@ -1,0 +1,34 @@
+package gnomon.syntax;
+
+/// How tightly the outermost part of an expression binds, tightest first.
+enum Level {
+  ATOM,
+  FACTOR,
+  TERM,
+  SIGNED,
+  SUM,
+  CLAUSED;
+
+  /// The level of `expression`. A binder counts as a factor: it may end a term.
+  static Level of(Expression expression) {
+    return switch (expression) {
+      case Expression.Numeral _,
+          Expression.Name _,
+          Expression.Handle _,
+          Expression.Parenthesis _,
+          Expression.Bracket _,
+          Expression.OrderTerm _ ->
+          ATOM;
+      case Expression.Suffixed _, Expression.Binder _ -> FACTOR;
+      case Expression.Term _ -> TERM;
+      case Expression.Sign _ -> SIGNED;
+      case Expression.Sum _ -> SUM;
+      case Expression.Matrix _, Expression.Clauses _ -> CLAUSED;
+    };
+  }
+
+  /// Whether it binds at least as tightly as `other`.
+  boolean within(Level other) {
+    return compareTo(other) <= 0;
+  }
+}

@@ -1,0 +1,25 @@
+package gnomon.syntax;
+
+import gnomon.diagnostic.Span;
+
+/// What is written behind an atom and binds closer than any sign or factor.
+public sealed interface Suffix {
+  /// Where it was written.
+  Span span();
+
+  /// `'`: the Pincherle derivative of an operator.
+  record Prime(Span span) implements Suffix {}
+
+  /// `!`: the factorial.
+  record Factorial(Span span) implements Suffix {}
+
+  /// `|_n` or `↓n`: the falling power.
+  record Falling(Expression index, Span span) implements Suffix {}
+
+  /// `|^n` or `↑n`: the rising power.
+  record Rising(Expression index, Span span) implements Suffix {}
+
+  /// `^n`: the power. It is always the last suffix of its atom; in `a^b^c` the exponent of `a` is
+  /// `b` raised to `c`.
+  record Raised(Expression exponent, Span span) implements Suffix {}
+}
