@@ -1,0 +1,54 @@
+package gnomon.form;
+
+import gnomon.number.Rational;
+import java.util.Map;
+import java.util.function.Consumer;
+
+/// The value at the argument of the compositional inverse g of a series f without closed form for
+/// g: f(g(argument)) = argument and g(0) = 0. The form f is written in the dual `in`.
+public record InverseSeries(Form of, Dual in, Form argument) implements Generator {
+
+  @Override
+  public String key() {
+    return "inverse(" + of.key() + ";" + argument.key() + ")";
+  }
+
+  @Override
+  public int rank() {
+    return 8;
+  }
+
+  @Override
+  public Form derivative(Generator v) {
+    Form inner = argument.derivative(v);
+    if (inner.isZero()) {
+      return inner;
+    }
+    Form slope = of.derivative(in).substitute(Map.of(in, Form.of(this)));
+    return inner.dividedBy(slope);
+  }
+
+  @Override
+  public Form substitute(Map<Generator, Form> images, Rational exponent) {
+    Map<Generator, Form> outer = new java.util.HashMap<>(images);
+    outer.remove(in);
+    Form value = of(of.substitute(outer), in, argument.substitute(images));
+    return Powers.power(value, Form.of(exponent));
+  }
+
+  /// The value of the inverse series of f at an argument: 0 at 0, otherwise the kernel.
+  public static Form of(Form f, Dual in, Form argument) {
+    return argument.isZero() ? Form.ZERO : Form.of(new InverseSeries(f, in, argument));
+  }
+
+  @Override
+  public void atoms(Consumer<Generator> consumer) {
+    argument.atoms(consumer);
+    of.atoms(
+        a -> {
+          if (!a.equals(in)) {
+            consumer.accept(a);
+          }
+        });
+  }
+}

@@ -1,0 +1,35 @@
+package gnomon.form;
+
+import gnomon.number.Rational;
+import java.util.Map;
+import java.util.function.Consumer;
+
+/// The natural logarithm of an argument that is neither a product nor a power nor an exponential.
+public record Logarithm(Form argument) implements Generator {
+
+  @Override
+  public String key() {
+    return "ln(" + argument.key() + ")";
+  }
+
+  @Override
+  public int rank() {
+    return 5;
+  }
+
+  @Override
+  public Form derivative(Generator v) {
+    Form inner = argument.derivative(v);
+    return inner.isZero() ? inner : inner.dividedBy(argument);
+  }
+
+  @Override
+  public Form substitute(Map<Generator, Form> images, Rational exponent) {
+    return Powers.power(Logarithms.ln(argument.substitute(images)), Form.of(exponent));
+  }
+
+  @Override
+  public void atoms(Consumer<Generator> consumer) {
+    argument.atoms(consumer);
+  }
+}
