@@ -41,7 +41,7 @@ range        : identifier COLON sum DOTS sum ;
 
 sum      : term ( ( PLUS | MINUS ) term )* ;
 term     : signs factor joined* ;
-joined   : ( ( TIMES | DIVIDED | OF ) signs )? factor ;
+joined   : ( ( TIMES | DIVIDED ) signs | OF )? factor ;
 factor   : BINDER OPEN range CLOSE | power ;
 power    : operand ( RAISED signs operand )* ;
 operand  : atom suffix* ;

@@ -1,5 +1,6 @@
 package gnomon.syntax;
 
+import gnomon.syntax.Expression.Binder;
 import gnomon.syntax.Expression.Parenthesis;
 import gnomon.syntax.Expression.Suffixed;
 import java.util.List;
@@ -14,7 +15,7 @@ public record Factor(Connective connective, boolean isArgument, Expression value
   /// @throws IllegalArgumentException if the value is looser than a factor, or an argument is not a
   ///   juxtaposed parenthesis
   public Factor {
-    if (!Level.of(value).within(Level.FACTOR)) {
+    if (!Level.of(value).within(Level.FACTOR) && !(value instanceof Binder)) {
       throw new IllegalArgumentException("a factor " + value);
     }
     boolean parenthesis = atomOf(value) instanceof Parenthesis;

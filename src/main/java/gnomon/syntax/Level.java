@@ -9,7 +9,7 @@ enum Level {
   SUM,
   CLAUSED;
 
-  /// The level of `expression`. A binder counts as a factor: it may end a term.
+  /// The level of `expression`. A binder reaches over the rest of its term, so it is one.
   static Level of(Expression expression) {
     return switch (expression) {
       case Expression.Numeral _,
@@ -19,8 +19,8 @@ enum Level {
           Expression.Bracket _,
           Expression.OrderTerm _ ->
           ATOM;
-      case Expression.Suffixed _, Expression.Binder _ -> FACTOR;
-      case Expression.Term _ -> TERM;
+      case Expression.Suffixed _ -> FACTOR;
+      case Expression.Term _, Expression.Binder _ -> TERM;
       case Expression.Sign _ -> SIGNED;
       case Expression.Sum _ -> SUM;
       case Expression.Matrix _, Expression.Clauses _ -> CLAUSED;

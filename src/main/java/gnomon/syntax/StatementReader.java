@@ -9,7 +9,13 @@ public final class StatementReader {
 
   /// The statement that is the whole of `source`, or why there is none.
   public static Reading read(Source source) {
-    throw new UnsupportedOperationException(source.name());
+    return switch (Attempt.at(source.text())) {
+      case Reading.Understood understood -> understood;
+      case Reading.Unfinished(var diagnostic) ->
+          new Reading.Unfinished(Repairs.hinted(source.text(), diagnostic));
+      case Reading.Rejected(var diagnostic) ->
+          new Reading.Rejected(Repairs.hinted(source.text(), diagnostic));
+    };
   }
 
   /// The statement that is the whole of `source`.

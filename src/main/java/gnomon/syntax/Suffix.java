@@ -14,12 +14,36 @@ public sealed interface Suffix {
   record Factorial(Span span) implements Suffix {}
 
   /// `|_n` or `↓n`: the falling power.
-  record Falling(Expression index, Span span) implements Suffix {}
+  record Falling(Expression index, Span span) implements Suffix {
+    /// @throws IllegalArgumentException unless the index is an atom, possibly signed
+    public Falling {
+      requireLevel(index, Level.ATOM);
+    }
+  }
 
   /// `|^n` or `↑n`: the rising power.
-  record Rising(Expression index, Span span) implements Suffix {}
+  record Rising(Expression index, Span span) implements Suffix {
+    /// @throws IllegalArgumentException unless the index is an atom, possibly signed
+    public Rising {
+      requireLevel(index, Level.ATOM);
+    }
+  }
 
   /// `^n`: the power. It is always the last suffix of its atom; in `a^b^c` the exponent of `a` is
   /// `b` raised to `c`.
-  record Raised(Expression exponent, Span span) implements Suffix {}
+  record Raised(Expression exponent, Span span) implements Suffix {
+    /// @throws IllegalArgumentException unless the exponent is an atom or an atom with suffixes,
+    ///   possibly signed
+    public Raised {
+      requireLevel(exponent, Level.FACTOR);
+    }
+  }
+
+  private static void requireLevel(Expression expression, Level level) {
+    Expression bare =
+        expression instanceof Expression.Sign(Expression operand, _) ? operand : expression;
+    if (!Level.of(bare).within(level)) {
+      throw new IllegalArgumentException("behind an atom: " + expression);
+    }
+  }
 }
