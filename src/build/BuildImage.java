@@ -49,7 +49,8 @@ public final class BuildImage {
   private void linkRuntime() throws IOException, InterruptedException {
     Path runtime = image.resolve("runtime");
     Path stamp = image.resolve("runtime.jdk");
-    String jdk = System.getProperty("java.home") + " " + Runtime.version() + " " + MODULES;
+    String jdk =
+        String.join("\n", System.getProperty("java.home"), Runtime.version() + "", MODULES);
     if (Files.exists(stamp) && Files.readString(stamp).equals(jdk)) {
       return;
     }

@@ -7,8 +7,8 @@ import java.util.Optional;
 /// What the command line asks for.
 public sealed interface Command {
 
-  /// Opens the console.
-  record OpenConsole() implements Command {}
+  /// Opens the console, perhaps with answers in ASCII.
+  record OpenConsole(boolean ascii) implements Command {}
 
   /// Evaluates the statements of one session file, `-` for standard input.
   record Run(String file, boolean json) implements Command {}
@@ -32,10 +32,11 @@ public sealed interface Command {
   /// Reads a command line.
   static Command parse(List<String> arguments) {
     if (arguments.isEmpty()) {
-      return new OpenConsole();
+      return new OpenConsole(false);
     }
     List<String> rest = arguments.subList(1, arguments.size());
     return switch (arguments.getFirst()) {
+      case "--ascii" -> alone(rest, new OpenConsole(true));
       case "run" -> run(rest);
       case "recheck" -> recheck(rest);
       case "help", "--help", "-h" -> alone(rest, new ShowUsage());

@@ -2,8 +2,9 @@ package gnomon.session;
 
 import java.util.List;
 
-/// The page of one word of the language: its spellings (the first is the ASCII one), one line that says
-/// what it means, the text, and examples in the form of a session file with their recorded answers.
+/// The page of one word of the language: its spellings (the first is the ASCII one), one line that
+/// says what it means, the text, and examples in the form of a session file with their recorded
+/// answers.
 public record HelpPage(
     List<String> spellings, String description, List<String> text, List<String> examples) {
 

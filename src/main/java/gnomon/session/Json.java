@@ -57,6 +57,7 @@ final class Json {
     if (Character.isHighSurrogate(c)) {
       return i + 1 >= text.length() || !Character.isLowSurrogate(text.charAt(i + 1));
     }
-    return Character.isLowSurrogate(c) && (i == 0 || !Character.isHighSurrogate(text.charAt(i - 1)));
+    return Character.isLowSurrogate(c)
+        && (i == 0 || !Character.isHighSurrogate(text.charAt(i - 1)));
   }
 }

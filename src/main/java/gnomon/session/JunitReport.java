@@ -3,8 +3,8 @@ package gnomon.session;
 import java.util.List;
 import java.util.Locale;
 
-/// Recheck reports in the XML form that continuous-integration services read: one suite for each file,
-/// one case for each statement.
+/// Recheck reports in the XML form that continuous-integration services read: one suite for each
+/// file, one case for each statement.
 public final class JunitReport {
 
   private JunitReport() {}

@@ -7,8 +7,8 @@ import java.util.Optional;
 ///
 /// `time` is wall-clock time, absent in a console where a person can interrupt; `cells` bounds the
 /// estimated size of one result (terms of a polynomial times their words, entries of a matrix);
-/// `depth` bounds the nesting of brackets and of calls; `steps` bounds the calls of defined functions
-/// in one statement.
+/// `depth` bounds the nesting of brackets and of calls; `steps` bounds the calls of defined
+/// functions in one statement.
 public record Limits(Optional<Duration> time, long cells, int depth, int steps) {
 
   public Limits {

@@ -60,13 +60,14 @@ public record RecheckReport(Path file, List<Item> items, long nanos) {
     return items.stream().filter(item -> item.outcome() == outcome).count();
   }
 
-  /// The report as lines: one for each statement that is not simply the same, both answers where they
-  /// differ, and a last line that counts.
+  /// The report as lines: one for each statement that is not simply the same, both answers where
+  /// they differ, and a last line that counts.
   public List<String> lines() {
     var lines = new ArrayList<String>();
     for (Item item : items) {
       if (item.outcome() != Outcome.SAME) {
-        lines.add(file + ":" + item.line() + ": " + item.outcome().words() + ": " + item.statement());
+        lines.add(
+            file + ":" + item.line() + ": " + item.outcome().words() + ": " + item.statement());
         item.recorded().forEach(text -> lines.add("    recorded | " + text));
         item.answered().forEach(text -> lines.add("    now      | " + text));
       }
@@ -93,7 +94,8 @@ public record RecheckReport(Path file, List<Item> items, long nanos) {
         parts.add(count + " " + outcome.words());
       }
     }
-    return counted(statements, "statement") + (parts.isEmpty() ? "" : ": " + String.join(", ", parts));
+    return counted(statements, "statement")
+        + (parts.isEmpty() ? "" : ": " + String.join(", ", parts));
   }
 
   private static String counted(long count, String noun) {

@@ -71,8 +71,8 @@ public final class Session {
   /// Asks the running statement to stop; its reply will say that it was cancelled.
   public void cancel() {}
 
-  /// Gives up waiting for the running statement: its result will be thrown away, the definitions stay
-  /// as they were before it, and the next statement may be submitted at once.
+  /// Gives up waiting for the running statement: its result will be thrown away, the definitions
+  /// stay as they were before it, and the next statement may be submitted at once.
   public void abandon() {}
 
   /// Since when a statement has been running, as [System#nanoTime]; empty when none is.
@@ -91,10 +91,7 @@ public final class Session {
     for (HelpPage page : help.all()) {
       words.add(
           new Word(
-              page.spellings().getLast(),
-              page.word(),
-              Word.Kind.OPERATOR,
-              page.description()));
+              page.spellings().getLast(), page.word(), Word.Kind.OPERATOR, page.description()));
     }
     return words;
   }

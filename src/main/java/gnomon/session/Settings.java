@@ -3,8 +3,8 @@ package gnomon.session;
 import java.nio.file.Path;
 import java.util.function.Consumer;
 
-/// How a session works: its limits, the spelling of what it writes to files, the folder that file names
-/// are relative to, and who is told each accepted statement as soon as it is done.
+/// How a session works: its limits, the spelling of what it writes to files, the folder that file
+/// names are relative to, and who is told each accepted statement as soon as it is done.
 public record Settings(Limits limits, Spelling spelling, Path folder, Consumer<String> journal) {
 
   /// For a console: no limit of time.

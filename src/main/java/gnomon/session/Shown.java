@@ -4,8 +4,8 @@ import java.util.List;
 
 /// A value ready to be shown.
 public interface Shown {
-  /// The sort of the value: scalar, function, operator, map, functional, series, list, table, verdict
-  /// or formula.
+  /// The sort of the value: scalar, function, operator, map, functional, series, list, table,
+  /// verdict or formula.
   String sort();
 
   /// The value in one spelling, as session files hold it: lines of any length.

@@ -1,7 +1,7 @@
 package gnomon.session;
 
-/// A word that can be completed: its spelling, the spelling in ASCII, what kind of word it is, and one
-/// line that says what it means.
+/// A word that can be completed: its spelling, the spelling in ASCII, what kind of word it is, and
+/// one line that says what it means.
 public record Word(String spelling, String ascii, Kind kind, String description) {
 
   /// What a word is good for.

@@ -12,7 +12,8 @@ import org.junit.jupiter.params.provider.ValueSource;
 final class CommandTest {
   @Test
   void nothingOpensTheConsole() {
-    assertEquals(new Command.OpenConsole(), Command.parse(List.of()));
+    assertEquals(new Command.OpenConsole(false), Command.parse(List.of()));
+    assertEquals(new Command.OpenConsole(true), parse("--ascii"));
   }
 
   @Test

@@ -1,0 +1,68 @@
+package gnomon.console;
+
+import gnomon.diagnostic.Columns;
+import gnomon.session.Word;
+import java.io.IOException;
+import java.util.List;
+import java.util.Optional;
+import java.util.function.Supplier;
+import org.jline.reader.impl.LineReaderImpl;
+import org.jline.terminal.Terminal;
+import org.jline.utils.AttributedString;
+import org.jline.utils.AttributedStringBuilder;
+
+/// The line editor, which shows below the line what the word at the cursor means.
+final class LineEditor extends LineReaderImpl {
+  private static final int MARGIN = 2;
+
+  private final Look look;
+  private final Supplier<Vocabulary> vocabulary;
+
+  LineEditor(Terminal terminal, Look look, Supplier<Vocabulary> vocabulary) throws IOException {
+    super(terminal, "gnomon", null);
+    this.look = look;
+    this.vocabulary = vocabulary;
+  }
+
+  @Override
+  public AttributedString getDisplayedBufferWithPrompts(List<AttributedString> secondaryPrompts) {
+    boolean wanted = doAutosuggestion && post == null && !look.plain();
+    AttributedString line = super.getDisplayedBufferWithPrompts(secondaryPrompts);
+    Optional<String> hint = wanted ? hint(buf.toString(), buf.cursor()) : Optional.empty();
+    if (hint.isEmpty()) {
+      return line;
+    }
+    AttributedStringBuilder all = new AttributedStringBuilder();
+    all.append(line).append("\n");
+    all.styled(look.small(), cut("  " + hint.get(), Look.width(terminal) - MARGIN));
+    return all.toAttributedString();
+  }
+
+  /// What the word at the cursor means, in one line; both spellings where there are two.
+  Optional<String> hint(String text, int cursor) {
+    for (Piece piece : Piece.of(text)) {
+      if (piece.touches(cursor)) {
+        return vocabulary.get().word(piece.text()).map(this::explain);
+      }
+    }
+    return Optional.empty();
+  }
+
+  private String explain(Word word) {
+    boolean twoSpellings = !look.isAscii() && !word.spelling().equals(word.ascii());
+    String name = twoSpellings ? word.spelling() + " " + word.ascii() : word.ascii();
+    return name + ": " + word.description();
+  }
+
+  private String cut(String text, int width) {
+    if (Columns.of(text) <= width) {
+      return text;
+    }
+    String end = look.isAscii() ? "..." : "…";
+    int length = text.length();
+    while (length > 0 && Columns.of(text.substring(0, length)) + Columns.of(end) > width) {
+      length = text.offsetByCodePoints(length, -1);
+    }
+    return text.substring(0, length) + end;
+  }
+}

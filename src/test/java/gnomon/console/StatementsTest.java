@@ -1,0 +1,47 @@
+package gnomon.console;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.util.List;
+import org.junit.jupiter.api.Test;
+
+final class StatementsTest {
+  @Test
+  void pastedLinesBecomeStatements() {
+    assertEquals(List.of("a", "b"), split("a\n\nb\n"));
+  }
+
+  @Test
+  void anOpenBracketKeepsLinesTogether() {
+    assertEquals(List.of("f(1,\n 2)", "b"), split("f(1,\n 2)\nb"));
+  }
+
+  @Test
+  void recordedAnswersAreLeftOut() {
+    assertEquals(List.of("a", "b"), split("a\n| 1\n| @1\nb\n|\n"));
+  }
+
+  @Test
+  void aTextThatIsCutOffKeepsItsLastStatement() {
+    assertEquals(List.of("a", "f(1"), split("a\nf(1"));
+  }
+
+  @Test
+  void aBlankLineEndsAnOpenStatement() {
+    assertTrue(Statements.isOpen("f(1,", StatementsTest::hasOpenBracket));
+    assertFalse(Statements.isOpen("f(1,\n", StatementsTest::hasOpenBracket));
+    assertFalse(Statements.isOpen("f(1)", StatementsTest::hasOpenBracket));
+    assertFalse(Statements.isOpen("", StatementsTest::hasOpenBracket));
+  }
+
+  private static List<String> split(String text) {
+    return Statements.split(text, StatementsTest::hasOpenBracket);
+  }
+
+  private static boolean hasOpenBracket(String text) {
+    return text.chars().filter(sign -> sign == '(').count()
+        > text.chars().filter(sign -> sign == ')').count();
+  }
+}
