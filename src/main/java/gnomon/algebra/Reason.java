@@ -3,6 +3,10 @@ package gnomon.algebra;
 /// The stable codes of mathematical refusals. The words for each code belong to the room that
 /// renders; the exact data that fill them in travel with the [Refusal].
 public enum Reason {
+  /// No antiderivative was found, though there may be one. Data: the form, the variable.
+  ANTIDERIVATIVE_NOT_FOUND,
+  /// No antidifference was found, though there may be one. Data: the form, the variable, the limit.
+  ANTIDIFFERENCE_NOT_FOUND,
   /// An arc sine of a number beyond 1 in size. Data: the argument.
   ARCSINE_DOMAIN,
   /// A kernel whose derivative is no form. Data: the kernel, the variable.
@@ -13,22 +17,47 @@ public enum Reason {
   EXPONENT_TOO_LARGE,
   /// An integer whose prime factors were not all found within the limit. Data: the unfactored part.
   FACTORING_LIMIT,
+  /// A product of operators with infinitely many terms. Data: the two symbols.
+  INFINITE_COMPOSITION,
+  /// An image with infinitely many terms. Data: the symbol, the form.
+  INFINITE_SERIES,
+  /// Undetermined constants that the result could not express. Data: the symbol applied to them,
+  /// the variable, the order of the kernel.
+  KERNEL_LOST,
   /// A value that is 0/0 or a pole at this point, with a limit not decided. Data: the form.
   LIMIT_UNDECIDED,
   /// A real logarithm of zero, of a negative or of a complex number. Data: the argument.
   LOGARITHM_DOMAIN,
+  /// Boundary parts in several variables at once. Data: the two symbols.
+  MIXED_BOUNDARIES,
   /// A whole number was needed. Data: the value met.
   NOT_AN_INTEGER,
+  /// A delta operator was needed. Data: the symbol.
+  NOT_A_DELTA_OPERATOR,
+  /// A quotient of operators that do not commute. Data: the two symbols.
+  NOT_COMMUTING,
   /// A number at least zero was needed. Data: the value met.
   NOT_NATURAL,
+  /// A shift-invariant operator was needed. Data: the symbol.
+  NOT_SHIFT_INVARIANT,
+  /// There is no antidifference of the kind. Data: the form, the variable, the kind.
+  NO_ANTIDIFFERENCE,
   /// Something has no closed form in this room. Data: the form.
   NO_CLOSED_FORM,
+  /// An operator without inverse, or without a known one. Data: the symbol.
+  NO_INVERSE,
+  /// No power series at 0, or none that is known. Data: the form or the function concerned.
+  NO_SERIES,
   /// An integer does not fit into the range a count or an index may have. Data: the value met.
   OUT_OF_RANGE,
   /// A value at a pole. Data: the form that has the pole.
   POLE,
   /// A root outside the exact constants, i and real radicals. Data: the base, the exponent.
   ROOT_OUT_OF_FIELD,
+  /// A shift whose length depends on the variable shifted. Data: the length, the variable.
+  SHIFT_BY_VARIABLE,
+  /// A symbol with a pole at the rate of an exponential. Data: the symbol, the rate.
+  SYMBOL_POLE,
   /// Text is not a number. Data: the text.
   UNREADABLE_NUMBER,
   /// A divisor that is not zero but divides zero under a relation. Data: the divisor.

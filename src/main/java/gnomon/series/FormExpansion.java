@@ -1,0 +1,185 @@
+package gnomon.series;
+
+import gnomon.algebra.Budget;
+import gnomon.algebra.Reason;
+import gnomon.algebra.Refusal;
+import gnomon.form.Accumulation;
+import gnomon.form.AngleConstant;
+import gnomon.form.Arc;
+import gnomon.form.Base;
+import gnomon.form.Constant;
+import gnomon.form.Dual;
+import gnomon.form.Elementary;
+import gnomon.form.Exponential;
+import gnomon.form.Factorial;
+import gnomon.form.Form;
+import gnomon.form.Generator;
+import gnomon.form.Harmonic;
+import gnomon.form.InverseSeries;
+import gnomon.form.Logarithm;
+import gnomon.form.Unknown;
+import gnomon.form.Variable;
+import gnomon.number.Rational;
+import gnomon.polynomial.Indeterminate;
+import gnomon.polynomial.Monomial;
+import gnomon.polynomial.Polynomial;
+import java.util.HashMap;
+import java.util.Map;
+
+/// One expansion of a form in powers of t at a fixed working order.
+///
+/// A product of powers b^e with b(t) = c t^v (1 + …) is expanded as c^e t^(v e) (1 + …)^e; the
+/// exponents of t of the whole product must add up to an integer. Logarithms and arc functions are
+/// the integral of their derivative, exponentials the solution of y' = y·(their logarithmic
+/// derivative).
+final class FormExpansion {
+
+  private final Generator t;
+  private final int work;
+  private final Map<Generator, PowerSeries> known = new HashMap<>();
+
+  FormExpansion(Generator t, int work) {
+    this.t = t;
+    this.work = work;
+  }
+
+  /// Signals that a divisor is zero as far as the working order reaches.
+  static final class TooShort extends RuntimeException {
+    private static final long serialVersionUID = 1L;
+
+    TooShort() {
+      super("a divisor is zero to the working order", null, false, false);
+    }
+  }
+
+  PowerSeries series(Form form) {
+    if (!form.dependsOn(t)) {
+      return PowerSeries.constant(form, work);
+    }
+    PowerSeries top = polynomial(form.numerator());
+    if (form.denominator().isOne()) {
+      return top;
+    }
+    return top.times(inverse(polynomial(form.denominator())));
+  }
+
+  private static PowerSeries inverse(PowerSeries series) {
+    if (series.isZero()) {
+      throw new TooShort();
+    }
+    return series.inverse();
+  }
+
+  private PowerSeries polynomial(Polynomial polynomial) {
+    PowerSeries sum = null;
+    for (var term : polynomial.terms()) {
+      Budget.checkpoint();
+      PowerSeries part = monomial(term.monomial()).times(Form.of(term.coefficient()));
+      sum = sum == null ? part : sum.plus(part);
+    }
+    return sum == null ? PowerSeries.zero(work) : sum;
+  }
+
+  /// The running product of the factors of a monomial.
+  private static final class Product {
+    PowerSeries series;
+    Form free = Form.ONE;
+    Form exponent = Form.ZERO;
+
+    Product(int work) {
+      series = PowerSeries.constant(Form.ONE, work);
+    }
+  }
+
+  private PowerSeries monomial(Monomial monomial) {
+    Product product = new Product(work);
+    for (var factor : monomial.factors()) {
+      multiply(product, factor.indeterminate(), factor.exponent());
+    }
+    int shift =
+        product
+            .exponent
+            .asInteger()
+            .map(java.math.BigInteger::intValueExact)
+            .orElseThrow(() -> new Refusal(Reason.NO_SERIES, "t", product.exponent));
+    return product.series.times(product.free).shifted(shift);
+  }
+
+  private void multiply(Product product, Indeterminate indeterminate, Rational exponent) {
+    Generator g = (Generator) indeterminate;
+    if (!g.dependsOn(t)) {
+      product.free = product.free.times(Form.of(g, exponent));
+    } else if (g.equals(t)) {
+      product.exponent = product.exponent.plus(Form.of(exponent));
+    } else if (g instanceof Exponential power) {
+      multiplyPower(product, power, exponent);
+    } else {
+      multiplyBase(product, kernel(g), Form.of(exponent));
+    }
+  }
+
+  /// The factor base^e, e free of t, for a base that depends on t.
+  private void multiplyBase(Product product, PowerSeries base, Form exponent) {
+    if (base.isZero()) {
+      throw new TooShort();
+    }
+    product.exponent = product.exponent.plus(exponent.times(Form.of(base.valuation())));
+    Form lead = base.coefficient(base.valuation());
+    product.free = product.free.times(Elementary.power(lead, exponent));
+    product.series = product.series.times(base.unitPower(exponent));
+  }
+
+  private void multiplyPower(Product product, Exponential power, Rational exponent) {
+    if (power.base() instanceof Base.Of(Form base)
+        && base.dependsOn(t)
+        && !power.unit().dependsOn(t)) {
+      multiplyBase(product, series(base), power.unit().times(exponent));
+      return;
+    }
+    PowerSeries rate = series(power.logarithmicDerivative(t).times(exponent));
+    if (rate.valuation() < 0) {
+      throw new Refusal(Reason.NO_SERIES, Form.of(power));
+    }
+    product.free = product.free.times(Form.of(power, exponent).substitute(t, Form.ZERO));
+    product.series = product.series.times(rate.integral().truncated(work).exp());
+  }
+
+  private PowerSeries kernel(Generator g) {
+    PowerSeries found = known.get(g);
+    if (found == null) {
+      found = expand(g);
+      known.put(g, found);
+    }
+    return found;
+  }
+
+  private PowerSeries expand(Generator g) {
+    return switch (g) {
+      case Logarithm _, Arc _ -> fromDerivative(g);
+      case InverseSeries inverse -> inverseSeries(inverse);
+      case Variable _, Dual _, Constant _, AngleConstant _, Exponential _ ->
+          throw new IllegalStateException("expanded elsewhere: " + g.key());
+      case Factorial _, Harmonic _, Unknown _, Accumulation _ ->
+          throw new Refusal(Reason.NO_SERIES, Form.of(g));
+    };
+  }
+
+  private PowerSeries fromDerivative(Generator g) {
+    PowerSeries slope = series(g.derivative(t));
+    if (slope.valuation() < 0) {
+      throw new Refusal(Reason.NO_SERIES, Form.of(g));
+    }
+    Form start = Form.of(g).substitute(t, Form.ZERO);
+    PowerSeries rest = slope.integral();
+    return rest.plus(PowerSeries.constant(start, rest.order())).truncated(work);
+  }
+
+  private PowerSeries inverseSeries(InverseSeries inverse) {
+    PowerSeries argument = series(inverse.argument());
+    if (argument.valuation() < 1 || inverse.of().dependsOn(t) && !inverse.in().equals(t)) {
+      throw new Refusal(Reason.NO_SERIES, Form.of(inverse));
+    }
+    PowerSeries f = Expansion.of(inverse.of(), inverse.in(), Math.max(work, 1));
+    return f.reversion().compose(argument);
+  }
+}
