@@ -15,25 +15,31 @@ final class Expectation {
   /// The words for these token types, the most telling first.
   static List<String> words(IntervalSet expected) {
     List<String> words = new ArrayList<>();
-    single(words, expected, GnomonParser.EQUALS, "`=`");
+    boolean comparison = expected.contains(GnomonParser.AT_LEAST);
+    if (!comparison) {
+      single(words, expected, GnomonParser.EQUALS, "`=`");
+    }
     single(words, expected, GnomonParser.COLON, "`:`");
     single(words, expected, GnomonParser.DOTS, "`..`");
     single(words, expected, GnomonParser.STRING, "a file name in double quotes");
     single(words, expected, GnomonParser.FRACTIONS, "`fractions`");
     boolean afterOperand = expected.contains(GnomonParser.TIMES);
     if (afterOperand) {
-      words.add("an operation such as + or ^");
+      words.add("an operation");
     } else if (expected.contains(GnomonParser.NUMBER)) {
       words.add("a number, a name or a bracket");
     } else if (expected.contains(GnomonParser.NAME)) {
       words.add("a name");
+    } else {
+      single(words, expected, GnomonParser.HANDLE, "a handle such as @3");
     }
     single(words, expected, GnomonParser.GIVEN, "`given`");
-    if (expected.contains(GnomonParser.AT_LEAST)) {
-      words.add("a comparison such as >=");
+    if (comparison) {
+      words.add("a comparison");
     }
+    single(words, expected, GnomonParser.INTEGER, "`integer`");
     if (expected.contains(GnomonParser.IN)) {
-      words.add("in, to, at or for");
+      words.add("a clause");
     } else {
       single(words, expected, GnomonParser.TO, "`to`");
       single(words, expected, GnomonParser.FOR, "`for`");

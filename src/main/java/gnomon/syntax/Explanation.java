@@ -49,7 +49,8 @@ final class Explanation {
           GnomonParser.AT_MOST,
           GnomonParser.GREATER,
           GnomonParser.AT_LEAST ->
-          Diagnostic.of("syntax-comparison", shown + " stands only after given", span);
+          Diagnostic.of("syntax-comparison", shown + " stands only after given", span)
+              .withEvidence("Comparisons are assumed; equations are claimed.");
       case GnomonParser.LET,
           GnomonParser.CLAIM,
           GnomonParser.GIVEN,
@@ -64,7 +65,8 @@ final class Explanation {
           GnomonParser.RERECORD,
           GnomonParser.HELP,
           GnomonParser.LEAVE ->
-          Diagnostic.of("syntax-unexpected", shown + " only begins a statement", span);
+          Diagnostic.of("syntax-unexpected", shown + " only begins a statement", span)
+              .withEvidence("Each statement has a line of its own.");
       case GnomonParser.PRESENTATION, GnomonParser.PARTIAL, GnomonParser.FRACTIONS ->
           Diagnostic.of("syntax-unexpected", shown + " stands only after in", span);
       case GnomonParser.IN, GnomonParser.TO, GnomonParser.AT, GnomonParser.FOR ->

@@ -9,6 +9,9 @@ import gnomon.diagnostic.Span;
 record Mistakes(String text) {
   private static final int LONGEST_HINT = 200;
 
+  /// The digits of a number that people set apart: `10 000`.
+  private static final int THOUSAND_GROUP = 3;
+
   /// The statement with the part in `span` replaced, or nothing if it is too long to show.
   private Diagnostic trying(Diagnostic diagnostic, Span span, String replacement) {
     return text.length() > LONGEST_HINT
@@ -34,7 +37,11 @@ record Mistakes(String text) {
     Diagnostic diagnostic =
         Diagnostic.of("syntax-doubtful", "two numbers stand side by side", left.to(right))
             .withEvidence("It reads as one number with a space in it, or as a product.");
-    return new DiagnosedException(trying(diagnostic, new Span(left.end(), right.start()), "*"));
+    return new DiagnosedException(
+        trying(
+            diagnostic,
+            new Span(left.end(), right.start()),
+            right.length() == THOUSAND_GROUP ? "" : "*"));
   }
 
   /// `n!!`
@@ -78,7 +85,7 @@ record Mistakes(String text) {
     Diagnostic diagnostic =
         Diagnostic.of("syntax-binder", "nothing stands after this range to take over it", head)
             .withEvidence(
-                "What is summed, multiplied or integrated follows it, a minus in brackets.");
+                "What is summed, multiplied or integrated follows; a minus needs brackets.");
     return new DiagnosedException(diagnostic);
   }
 

@@ -39,7 +39,7 @@ final class Repairs {
     }
     List<CommonToken> tokens = text.length() > LONGEST ? List.of() : Tokens.visible(text);
     return Stream.concat(candidates(text, diagnostic, tokens), Stream.of(page(text)))
-        .map(line -> line.replaceAll("\\s*[\\r\\n]+\\s*", " ").strip())
+        .map(line -> line.replaceAll("\\s*[\\r\\n]+\\s*| {2,}", " ").strip())
         .filter(line -> !line.contains("#") && reads(line))
         .findFirst()
         .map(diagnostic::withHint)
@@ -57,20 +57,26 @@ final class Repairs {
     String tail = text.substring(span.end());
     Stream<String> general =
         Stream.concat(
-            Stream.of("= ", ": ", "..", ", ", "to ").map(word -> head + word + at + tail),
+            Stream.of(" = ", ": ", "..", ", ", " fractions ", " to ")
+                .map(word -> head.stripTrailing() + word + at + tail),
             Stream.of(head + tail));
     Stream<String> special =
         switch (diagnostic.code()) {
           case "syntax-equation" -> Stream.of("let " + text, "claim " + text);
           case "syntax-character" ->
-              FOREIGN.getOrDefault(at, List.of("*")).stream().map(sign -> head + sign + tail);
-          case "syntax-bracket" -> Stream.of(head + other(at) + tail, text + ")", text + "]");
+              Stream.concat(
+                  Stream.of(translated(text)),
+                  FOREIGN.getOrDefault(at, List.of("", "*")).stream()
+                      .map(sign -> head + sign + tail));
+          case "syntax-bracket" ->
+              Stream.of(
+                  text.stripTrailing() + ")", text.stripTrailing() + "]", head + other(at) + tail);
           case "syntax-quotation" -> Stream.of(text + "\"");
           case "syntax-line" -> Stream.of(head);
           case "syntax-comparison" -> Stream.of("given " + text);
           case "syntax-binder" -> Stream.of(head + at + " " + minusInBrackets(tail));
-          case "syntax-clause" -> Stream.of(head + "= 0 " + at + tail);
-          default -> Stream.empty();
+          case "syntax-clause" -> Stream.of(bracketedSide(text));
+          default -> at.equals("-") ? Stream.of(head + "(" + at + tail + ")") : Stream.empty();
         };
     Stream<String> spelt =
         Explanation.nearStatement(tokens.getFirst()).stream()
@@ -81,6 +87,22 @@ final class Repairs {
   private static String minusInBrackets(String tail) {
     String body = tail.strip();
     return body.startsWith("*") ? body.substring(1) : "(" + body + ")";
+  }
+
+  /// The text with every foreign character put into the language.
+  private static String translated(String text) {
+    StringBuilder translated = new StringBuilder();
+    text.codePoints()
+        .mapToObj(Character::toString)
+        .map(c -> c.equals(".") ? c : FOREIGN.getOrDefault(c, List.of(c)).getFirst())
+        .forEach(translated::append);
+    return translated.toString();
+  }
+
+  /// A claim with everything after the equals sign in brackets.
+  private static String bracketedSide(String text) {
+    int side = text.indexOf('=') + 1;
+    return text.substring(0, side) + " (" + text.substring(side).strip() + ")";
   }
 
   private static String other(String bracket) {

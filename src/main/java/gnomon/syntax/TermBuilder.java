@@ -161,7 +161,9 @@ final class TermBuilder {
           && piece.factor().filter(f -> atomOf(f) instanceof Numeral).isPresent()) {
         throw mistakes.numbersSideBySide(before.span(), piece.span());
       }
-      if (argument) {
+      if (piece.startsWithParenthesis()
+          && piece.connective() == Connective.JUXTAPOSED
+          && before.factor().isPresent()) {
         refuseFunctionAsExponent(before.value(), piece.span());
       }
     }
