@@ -38,7 +38,16 @@ public record Accumulation(Kind kind, Variable bound, Form lower, Form upper, Fo
 
   @Override
   public String key() {
-    return kind + "(" + bound.name() + ":" + lower.key() + ".." + upper.key() + ";" + body.key() + ")";
+    return kind
+        + "("
+        + bound.name()
+        + ":"
+        + lower.key()
+        + ".."
+        + upper.key()
+        + ";"
+        + body.key()
+        + ")";
   }
 
   @Override

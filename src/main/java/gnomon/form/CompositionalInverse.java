@@ -11,8 +11,8 @@ import java.util.Optional;
 
 /// Solves f(s) = t for s in closed form, where f depends on s through one kernel at a time.
 ///
-/// The one generator K of f that contains s satisfies a polynomial equation in a fractional power
-/// z of K; degree 1, degree 2 and pure powers are solved, with the branch that fits s = 0 at t = 0,
+/// The one generator K of f that contains s satisfies a polynomial equation in a fractional power z
+/// of K; degree 1, degree 2 and pure powers are solved, with the branch that fits s = 0 at t = 0,
 /// and then K itself is solved for s. The result is checked by putting it in.
 final class CompositionalInverse {
   private final Generator s;

@@ -14,7 +14,7 @@ public final class Elementary {
   /// base^exponent; a symbolic exponent splits over products.
   ///
   /// @throws Refusal with [Reason#ROOT_OUT_OF_FIELD] for a root of unity outside ℚ(i, √2, √3), with
-  ///     [Reason#DIVISION_BY_ZERO] for a negative power of zero
+  ///   [Reason#DIVISION_BY_ZERO] for a negative power of zero
   public static Form power(Form base, Form exponent) {
     return Powers.power(base, exponent);
   }

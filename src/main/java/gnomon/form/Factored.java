@@ -23,7 +23,8 @@ public record Factored(Rational unit, List<Factor> factors) {
     Factorization top = form.numerator().factor();
     Factorization bottom = form.denominator().factor();
     List<Factor> factors = new ArrayList<>();
-    top.factors().forEach(f -> factors.add(new Factor(new Form(f.base(), one()), f.multiplicity())));
+    top.factors()
+        .forEach(f -> factors.add(new Factor(new Form(f.base(), one()), f.multiplicity())));
     bottom
         .factors()
         .forEach(f -> factors.add(new Factor(new Form(f.base(), one()), -f.multiplicity())));

@@ -22,7 +22,7 @@ public record Factorial(Form argument) implements Generator {
   /// Zero where the argument does not depend on v.
   ///
   /// @throws Refusal with [Reason#DERIVATIVE_UNKNOWN] otherwise: the derivative needs the digamma
-  ///     function, which is no kernel of this room
+  ///   function, which is no kernel of this room
   @Override
   public Form derivative(Generator v) {
     if (argument.dependsOn(v)) {

@@ -83,7 +83,7 @@ public final class Form implements Comparable<Form> {
   /// The quotient of two polynomials, brought to the normal form.
   ///
   /// @throws Refusal with [Reason#DIVISION_BY_ZERO] or, where the denominator is a zero divisor
-  ///     under a relation, [Reason#ZERO_DIVISOR]
+  ///   under a relation, [Reason#ZERO_DIVISOR]
   public static Form fraction(Polynomial numerator, Polynomial denominator) {
     return Reduction.fraction(numerator, denominator);
   }

@@ -117,8 +117,8 @@ record Gaussian(Rational re, Rational im) {
       }
     }
 
-    /// How many quarter turns lead from the product's counted angle to the principal argument of
-    /// a + bi, which differs from the product by a power of i and a positive factor.
+    /// How many quarter turns lead from the product's counted angle to the principal argument of a
+    /// + bi, which differs from the product by a power of i and a positive factor.
     long quartersTo(BigInteger a, BigInteger b) {
       int target = quadrant(a, b);
       int principal = target >= 2 ? target - 4 : target;

@@ -6,8 +6,8 @@ import java.util.Map;
 import java.util.function.Consumer;
 
 /// An algebraically independent thing out of which exact forms are built: a variable, the symbol
-/// variable of a derivation, a constant, or a kernel that knows how it is differentiated and how
-/// it changes under substitution.
+/// variable of a derivation, a constant, or a kernel that knows how it is differentiated and how it
+/// changes under substitution.
 public sealed interface Generator extends Indeterminate
     permits Variable,
         Dual,
@@ -33,8 +33,8 @@ public sealed interface Generator extends Indeterminate
   /// @throws gnomon.algebra.Refusal where the derivative is not a form of this room
   Form derivative(Generator v);
 
-  /// The generator raised to an exponent, with the images put in for the variables and duals it
-  /// is made of.
+  /// The generator raised to an exponent, with the images put in for the variables and duals it is
+  /// made of.
   Form substitute(Map<Generator, Form> images, Rational exponent);
 
   /// Calls the consumer with each variable and dual that the generator is made of, at any depth;

@@ -22,8 +22,8 @@ public record Harmonic(Form argument, int order) implements Generator {
 
   /// Zero where the argument does not depend on v.
   ///
-  /// @throws Refusal with [Reason#DERIVATIVE_UNKNOWN] otherwise: the derivative needs values of
-  ///     the zeta function, which are no kernels of this room
+  /// @throws Refusal with [Reason#DERIVATIVE_UNKNOWN] otherwise: the derivative needs values of the
+  ///   zeta function, which are no kernels of this room
   @Override
   public Form derivative(Generator v) {
     if (argument.dependsOn(v)) {

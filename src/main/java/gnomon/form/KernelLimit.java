@@ -53,7 +53,7 @@ final class KernelLimit {
   /// The value.
   ///
   /// @throws Refusal with [Reason#POLE] where the form has a pole, with [Reason#LIMIT_UNDECIDED]
-  ///     where the rewriting leaves 0/0 or a pole that a symbolic factorial may still cancel
+  ///   where the rewriting leaves 0/0 or a pole that a symbolic factorial may still cancel
   static Form value(Form form, Map<Generator, Form> images) {
     Map<Generator, Form> all = new HashMap<>(images);
     Form regular =

@@ -59,12 +59,15 @@ public record PartialFractions(List<Form> polynomialPart, List<Piece> pieces) {
   }
 
   private static void addPieces(
-      List<Piece> pieces, Factor factor, Univariate remainder, Univariate denominator, Generator v) {
+      List<Piece> pieces,
+      Factor factor,
+      Univariate remainder,
+      Univariate denominator,
+      Generator v) {
     Univariate base = in(factor.base(), v);
     Univariate power = base.power(factor.multiplicity());
     Univariate cofactor = denominator.dividedBy(power).quotient();
-    Univariate part =
-        remainder.times(cofactor.inverseModulo(power)).dividedBy(power).remainder();
+    Univariate part = remainder.times(cofactor.inverseModulo(power)).dividedBy(power).remainder();
     List<Piece> digits = new ArrayList<>();
     for (int k = factor.multiplicity(); k >= 1; k--) {
       Univariate.Division division = part.dividedBy(base);

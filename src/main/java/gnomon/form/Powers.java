@@ -19,7 +19,7 @@ final class Powers {
   /// base^exponent.
   ///
   /// @throws Refusal with [Reason#ROOT_OUT_OF_FIELD] for a root of unity outside ℚ(i, √2, √3), with
-  ///     [Reason#DIVISION_BY_ZERO] for a negative power of zero
+  ///   [Reason#DIVISION_BY_ZERO] for a negative power of zero
   static Form power(Form base, Form exponent) {
     Optional<Rational> constant = exponent.asRational();
     if (constant.isPresent()) {
@@ -62,8 +62,8 @@ final class Powers {
     return base;
   }
 
-  /// A root: constants and series split into bases, a function of variables stays under one
-  /// radical but for a positive rational factor, since √(ab) need not be √a √b.
+  /// A root: constants and series split into bases, a function of variables stays under one radical
+  /// but for a positive rational factor, since √(ab) need not be √a √b.
   private static Form rationalPower(Form base, Rational q) {
     if (base.isConstant() || base.variables().isEmpty() || isPositivePower(base)) {
       List<Form> factors = new ArrayList<>();
@@ -213,8 +213,7 @@ final class Powers {
     return switch (base) {
       case Base.Natural _ -> Form.of(new Exponential(base, Form.ONE), q);
       case Base.Turn _ -> RootsOfUnity.power(q);
-      case Base.Prime _ ->
-          q.isInteger() ? base.value().power(q.intValueExact()) : radical(base, q);
+      case Base.Prime _ -> q.isInteger() ? base.value().power(q.intValueExact()) : radical(base, q);
       case Base.GaussianAngle _ -> {
         if (!q.isInteger()) {
           throw new Refusal(Reason.ROOT_OUT_OF_FIELD, base.value(), Form.of(q));
@@ -222,8 +221,7 @@ final class Powers {
         yield base.value().power(q.intValueExact());
       }
       case Base.Zero _ -> zeroOrOne(Form.ZERO, q);
-      case Base.Of(Form form) ->
-          q.isInteger() ? form.power(q.intValueExact()) : radical(base, q);
+      case Base.Of(Form form) -> q.isInteger() ? form.power(q.intValueExact()) : radical(base, q);
     };
   }
 

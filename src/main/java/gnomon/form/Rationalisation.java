@@ -12,8 +12,8 @@ import java.util.Map;
 
 /// Clears an algebraic generator from a denominator.
 ///
-/// With z the generator's smallest fractional power in sight, z^m = β: for even m the conjugate
-/// z → −z leaves only even powers; for odd m the inverse is found by linear algebra over 1, z, …,
+/// With z the generator's smallest fractional power in sight, z^m = β: for even m the conjugate z →
+/// −z leaves only even powers; for odd m the inverse is found by linear algebra over 1, z, …,
 /// z^(m−1).
 final class Rationalisation {
   private Rationalisation() {}

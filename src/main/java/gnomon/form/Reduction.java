@@ -8,7 +8,6 @@ import gnomon.polynomial.Indeterminate;
 import gnomon.polynomial.Monomial;
 import gnomon.polynomial.Polynomial;
 import gnomon.polynomial.Term;
-import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -17,8 +16,8 @@ import java.util.Map;
 /// Brings a quotient of polynomials in generators to the normal form of [Form].
 ///
 /// Over the field ℚ(X) of the independent generators, the algebraic constants span a vector space
-/// with the monomials in i and the radicals as a basis (for radicals of primes this is a theorem
-/// of Besicovitch, 1940); with the denominator free of them, numerator components and denominator
+/// with the monomials in i and the radicals as a basis (for radicals of primes this is a theorem of
+/// Besicovitch, 1940); with the denominator free of them, numerator components and denominator
 /// without common factor are unique.
 final class Reduction {
   private Reduction() {}
@@ -93,13 +92,13 @@ final class Reduction {
     }
     if (denominator.isConstant() && !hasNegativeExponents(numerator)) {
       Rational scale = denominator.constantValue();
-      return new Form(
-          scale.isOne() ? numerator : numerator.times(scale.inverse()), Polynomial.ONE);
+      return new Form(scale.isOne() ? numerator : numerator.times(scale.inverse()), Polynomial.ONE);
     }
     Monomial top = transcendental(numerator.monomialContent());
     Monomial bottom = denominator.monomialContent();
     Polynomial n = top.isOne() ? numerator : numerator.times(top.power(Rational.MINUS_ONE));
-    Polynomial d = bottom.isOne() ? denominator : denominator.times(bottom.power(Rational.MINUS_ONE));
+    Polynomial d =
+        bottom.isOne() ? denominator : denominator.times(bottom.power(Rational.MINUS_ONE));
     if (!d.isConstant()) {
       Polynomial common = d;
       for (Polynomial component : components(n)) {

@@ -39,8 +39,8 @@ final class Relations {
     return factor.exponent().sign() < 0 || !belowOne && !unitI;
   }
 
-  /// The polynomial with every exponent of an algebraic generator brought into [0, 1), of i
-  /// into {0, 1}; rational radicands leave a denominator.
+  /// The polynomial with every exponent of an algebraic generator brought into [0, 1), of i into
+  /// {0, 1}; rational radicands leave a denominator.
   static Quotient reduce(Polynomial polynomial) {
     if (!applies(polynomial)) {
       return new Quotient(polynomial, Polynomial.ONE);

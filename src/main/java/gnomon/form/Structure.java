@@ -174,8 +174,8 @@ public final class Structure {
     return PartialFractions.of(form, v);
   }
 
-  /// A closed form g(t) with form(g(t)) = t and g(0) = 0, where peeling off kernels finds one; it is
-  /// checked by substitution.
+  /// A closed form g(t) with form(g(t)) = t and g(0) = 0, where peeling off kernels finds one; it
+  /// is checked by substitution.
   public static Optional<Form> compositionalInverse(Form form, Generator t) {
     return CompositionalInverse.of(form, t);
   }

@@ -49,8 +49,7 @@ final class Substitution {
           }
           return value;
         };
-    Form bottom =
-        form.denominator().isOne() ? Form.ONE : evaluate(form.denominator(), remembered);
+    Form bottom = form.denominator().isOne() ? Form.ONE : evaluate(form.denominator(), remembered);
     if (bottom.isZero()) {
       throw new Refusal(Reason.POLE, form);
     }
@@ -67,8 +66,7 @@ final class Substitution {
       Budget.checkpoint();
       Form product = Form.of(term.coefficient());
       for (Monomial.Power power : term.monomial().factors()) {
-        product =
-            product.times(image.apply((Generator) power.indeterminate(), power.exponent()));
+        product = product.times(image.apply((Generator) power.indeterminate(), power.exponent()));
       }
       parts.add(product);
     }

@@ -37,7 +37,8 @@ final class ZeroPowers {
             .filter(Variable.class::isInstance)
             .orElseThrow(() -> new Refusal(Reason.ZERO_DIVISOR, Form.ZERO));
     Form rest = Reduction.fraction(Polynomial.ofTerms(without), denominator);
-    Form factor = Reduction.fraction(Polynomial.ofTerms(with), denominator).substitute(x, Form.ZERO);
+    Form factor =
+        Reduction.fraction(Polynomial.ofTerms(with), denominator).substitute(x, Form.ZERO);
     return combined(rest, factor, zero);
   }
 
