@@ -121,6 +121,9 @@ final class Antidifferences {
     int sums = 0;
     List<Form> steps = new ArrayList<>();
     for (Form form : forms) {
+      if (form.isZero()) {
+        continue;
+      }
       for (Factored.Factor factor : Structure.factored(form).factors()) {
         if (factor.multiplicity() >= 0 || !factor.base().dependsOn(t)) {
           continue;

@@ -66,6 +66,10 @@ final class Division {
     if (!a.indeterminates().containsAll(b.indeterminates())) {
       return Optional.empty();
     }
+    if (Rescaling.isNeededFor(b)) {
+      Rescaling rescaling = Rescaling.of(a, b);
+      return natural(rescaling.scale(a), rescaling.scale(b)).map(rescaling::restore);
+    }
     Packing packing;
     try {
       packing = Packing.of(a, 1, Polynomial.ZERO, 0);

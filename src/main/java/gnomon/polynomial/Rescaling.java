@@ -28,6 +28,11 @@ final class Rescaling {
     return new Rescaling(polynomials);
   }
 
+  /// Whether a fractional exponent occurs.
+  static boolean isNeededFor(Polynomial polynomial) {
+    return polynomial.terms().stream().anyMatch(term -> term.monomial().denominator != 1);
+  }
+
   private static Rational lcm(Rational a, Rational b) {
     return Rational.of(Monomial.lcm(a.longValueExact(), b.longValueExact()));
   }
