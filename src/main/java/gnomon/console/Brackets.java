@@ -1,5 +1,6 @@
 package gnomon.console;
 
+import gnomon.syntax.Lexeme;
 import java.util.ArrayDeque;
 import java.util.Deque;
 import java.util.HashMap;
@@ -15,33 +16,30 @@ record Brackets(Map<Integer, Integer> partner, Set<Integer> stray) {
     stray = Set.copyOf(stray);
   }
 
-  static Brackets of(List<Piece> pieces) {
+  static Brackets of(List<Lexeme> lexemes) {
     Map<Integer, Integer> partner = new HashMap<>();
     Set<Integer> stray = new HashSet<>();
-    Deque<Piece> open = new ArrayDeque<>();
-    for (Piece piece : pieces) {
-      if (piece.sort() == Piece.Sort.OPEN) {
-        open.push(piece);
-      } else if (piece.sort() == Piece.Sort.CLOSE) {
-        if (!open.isEmpty() && closes(open.peek().text(), piece.text())) {
-          int start = open.pop().start();
-          partner.put(start, piece.start());
-          partner.put(piece.start(), start);
+    Deque<Lexeme> open = new ArrayDeque<>();
+    for (Lexeme lexeme : lexemes) {
+      int at = lexeme.span().start();
+      if (lexeme.role() == Lexeme.Role.OPEN) {
+        open.push(lexeme);
+      } else if (lexeme.role() == Lexeme.Role.CLOSE) {
+        Lexeme last = open.peek();
+        if (last != null && isRound(last) == isRound(lexeme)) {
+          open.pop();
+          partner.put(last.span().start(), at);
+          partner.put(at, last.span().start());
         } else {
-          stray.add(piece.start());
+          stray.add(at);
         }
       }
     }
     return new Brackets(partner, stray);
   }
 
-  private static boolean closes(String open, String close) {
-    return switch (open) {
-      case "(" -> close.equals(")");
-      case "[" -> close.equals("]");
-      case "{" -> close.equals("}");
-      default -> false;
-    };
+  private static boolean isRound(Lexeme bracket) {
+    return bracket.text().endsWith("(") || bracket.text().endsWith(")");
   }
 
   /// The positions of the pair that the cursor is at: the bracket just before it, or else under it.

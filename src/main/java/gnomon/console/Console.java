@@ -23,7 +23,7 @@ public final class Console {
   private final Optional<Journal> journal;
   private final Session session;
   private final LineEditor editor;
-  private @Nullable Vocabulary vocabulary;
+  private @Nullable KnownWords words;
 
   private Console(Terminal terminal, Look look, StateFolder state, Path folder) throws IOException {
     this.terminal = terminal;
@@ -33,7 +33,7 @@ public final class Console {
     Settings settings = Settings.console().withSpelling(look.spelling()).withFolder(folder);
     this.session = Session.of(settings.withJournal(this::note));
     Optional<Path> history = journal.map(_ -> state.history());
-    this.editor = Editors.of(terminal, look, this::vocabulary, session::wantsMore, history, folder);
+    this.editor = Editors.of(terminal, look, this::words, history, folder);
     terminal.handle(Terminal.Signal.INT, Terminal.SignalHandler.SIG_IGN);
   }
 
@@ -48,14 +48,14 @@ public final class Console {
   /// Talks until the person leaves. `greeting` is shown first.
   public void converse(String greeting) throws IOException {
     try {
-      say(List.of(new AttributedString(greeting, look.small())));
+      say(greeting);
       if (journal.isEmpty()) {
         say(List.of(new AttributedString("History cannot be kept in " + state.path() + ".")));
       } else {
         new Recovery(state, this).offer();
       }
       while (step()) {
-        vocabulary = null;
+        words = null;
       }
     } catch (EndOfFileException end) {
       // The input is over, which is a way to leave.
@@ -83,7 +83,7 @@ public final class Console {
   }
 
   private boolean answerAll(String text) {
-    for (String statement : Statements.split(text, session::wantsMore)) {
+    for (String statement : Statements.split(text)) {
       switch (new Evaluation(session, terminal, look).answer(statement)) {
         case Evaluation.Outcome.Answered(Reply.Left _, boolean _) -> {
           return false;
@@ -127,7 +127,7 @@ public final class Console {
 
   /// The statements of a journal.
   List<String> statements(Path file) throws IOException {
-    return Statements.split(Files.readString(file), session::wantsMore);
+    return Statements.split(Files.readString(file));
   }
 
   /// Shows one line of prose.
@@ -142,11 +142,11 @@ public final class Console {
     terminal.flush();
   }
 
-  private Vocabulary vocabulary() {
-    Vocabulary known = vocabulary;
+  private KnownWords words() {
+    KnownWords known = words;
     if (known == null) {
-      known = Vocabulary.of(session.words());
-      vocabulary = known;
+      known = KnownWords.of(session.words());
+      words = known;
     }
     return known;
   }

@@ -3,7 +3,6 @@ package gnomon.console;
 import java.io.IOException;
 import java.nio.file.Path;
 import java.util.Optional;
-import java.util.function.Predicate;
 import java.util.function.Supplier;
 import org.jline.reader.LineReader;
 import org.jline.reader.LineReader.Option;
@@ -16,17 +15,12 @@ final class Editors {
   private Editors() {}
 
   static LineEditor of(
-      Terminal terminal,
-      Look look,
-      Supplier<Vocabulary> vocabulary,
-      Predicate<String> wantsMore,
-      Optional<Path> history,
-      Path folder)
+      Terminal terminal, Look look, Supplier<KnownWords> words, Optional<Path> history, Path folder)
       throws IOException {
-    LineEditor editor = new LineEditor(terminal, look, vocabulary);
-    editor.setParser(new LineParser(wantsMore));
-    editor.setHighlighter(new Marking(look, vocabulary));
-    editor.setCompleter(new Completion(look, vocabulary, folder));
+    LineEditor editor = new LineEditor(terminal, look, words);
+    editor.setParser(new LineParser());
+    editor.setHighlighter(new Marking(look, words));
+    editor.setCompleter(new Completion(look, words, folder));
     editor.setCompletionMatcher(new AllFit());
     editor.option(Option.DISABLE_EVENT_EXPANSION, true);
     editor.option(Option.HISTORY_REDUCE_BLANKS, false);

@@ -1,22 +1,22 @@
 package gnomon.console;
 
+import gnomon.syntax.Lexemes;
 import java.util.List;
-import java.util.function.Predicate;
 import org.jline.reader.CompletingParsedLine;
 import org.jline.reader.EOFError;
 import org.jline.reader.ParsedLine;
 import org.jline.reader.Parser;
 
 /// Tells the line editor whether a statement goes on, and which word is to be completed.
-record LineParser(Predicate<String> wantsMore) implements Parser {
+final class LineParser implements Parser {
 
   @Override
   public ParsedLine parse(String line, int cursor, ParseContext context) {
     boolean accepting = context == ParseContext.ACCEPT_LINE || context == ParseContext.UNSPECIFIED;
-    if (accepting && Statements.isOpen(line, wantsMore)) {
+    if (accepting && Statements.isOpen(line)) {
       throw new EOFError(-1, -1, "the statement goes on");
     }
-    return new Typed(line, cursor, pieceAt(line, cursor));
+    return typed(line, cursor);
   }
 
   /// Names need no escapes in this language.
@@ -25,29 +25,33 @@ record LineParser(Predicate<String> wantsMore) implements Parser {
     return false;
   }
 
-  private static Piece pieceAt(String line, int cursor) {
-    for (Piece piece : Piece.of(line)) {
-      boolean completes =
-          piece.sort() == Piece.Sort.WORD
-              || piece.sort() == Piece.Sort.TEXT
-              || piece.sort() == Piece.Sort.COMMENT;
-      if (piece.touches(cursor) && completes) {
-        return piece;
-      }
+  static Typed typed(String line, int cursor) {
+    var file = FileNames.start(line.substring(0, Math.min(cursor, line.length())));
+    if (file.isPresent()) {
+      return new Typed(line, cursor, cursor - file.get().length(), cursor, true);
     }
-    return new Piece(Piece.Sort.SPACE, "", cursor, cursor);
+    return Lexemes.wordAt(line, cursor)
+        .map(word -> new Typed(line, cursor, word.span().start(), word.span().end(), false))
+        .orElse(new Typed(line, cursor, cursor, cursor, false));
   }
 
-  /// A line with the piece that the cursor is in; the piece is its only word.
-  record Typed(String line, int cursor, Piece piece) implements CompletingParsedLine {
+  /// A line with the place of the word that the cursor is in, which may be empty; that word is its
+  /// only one. `isFile` says that a file name is expected there.
+  record Typed(String line, int cursor, int start, int end, boolean isFile)
+      implements CompletingParsedLine {
+    /// What stands before the cursor of the word.
+    String beginning() {
+      return line.substring(start, cursor);
+    }
+
     @Override
     public String word() {
-      return piece.text();
+      return line.substring(start, end);
     }
 
     @Override
     public int wordCursor() {
-      return cursor - piece.start();
+      return cursor - start;
     }
 
     @Override
@@ -57,7 +61,7 @@ record LineParser(Predicate<String> wantsMore) implements Parser {
 
     @Override
     public List<String> words() {
-      return List.of(piece.text());
+      return List.of(word());
     }
 
     @Override
@@ -72,7 +76,7 @@ record LineParser(Predicate<String> wantsMore) implements Parser {
 
     @Override
     public int rawWordLength() {
-      return piece.text().length();
+      return end - start;
     }
   }
 }

@@ -1,46 +1,54 @@
 package gnomon.console;
 
+import gnomon.syntax.Continuation;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.function.Predicate;
 
-/// Lines that belong together.
+/// Lines that belong together. A statement goes on as long as it asks for more, but never over a
+/// blank line or a line with a recorded answer, so that nobody is caught in an open bracket.
 final class Statements {
   private Statements() {}
 
   /// Splits a text of several lines, as pasted or journaled, into statements; recorded answers,
-  /// which begin with a bar, and blank lines between statements are left out. `wantsMore` says
-  /// whether a statement goes on in the next line.
-  static List<String> split(String text, Predicate<String> wantsMore) {
+  /// which begin with a bar, and blank lines are left out.
+  static List<String> split(String text) {
     List<String> statements = new ArrayList<>();
-    StringBuilder open = new StringBuilder();
+    List<String> open = new ArrayList<>();
+    Continuation continuation = new Continuation();
     for (String line : text.lines().toList()) {
-      if (open.isEmpty() && (line.isBlank() || line.startsWith("|"))) {
-        continue;
+      if (!endsStatement(line)) {
+        open.add(line);
+        continuation.add(line);
       }
-      open.append(open.isEmpty() ? "" : "\n").append(line);
-      if (!wantsMore.test(open.toString())) {
-        statements.add(open.toString());
-        open.setLength(0);
+      if (!open.isEmpty() && (endsStatement(line) || !continuation.isOpen())) {
+        statements.add(String.join("\n", open));
+        open.clear();
+        continuation = new Continuation();
       }
     }
     if (!open.isEmpty()) {
-      statements.add(open.toString());
+      statements.add(String.join("\n", open));
     }
     return List.copyOf(statements);
   }
 
-  /// Whether the last statement of the text is still open. A blank line ends it in any case, so
-  /// that nobody is caught in an open bracket.
-  static boolean isOpen(String text, Predicate<String> wantsMore) {
-    if (text.isBlank() || text.lastIndexOf('\n') >= 0 && lastLine(text).isBlank()) {
-      return false;
+  /// Whether the last statement of the text asks for another line.
+  static boolean isOpen(String text) {
+    Continuation continuation = new Continuation();
+    for (String line : text.split("\n", -1)) {
+      if (endsStatement(line)) {
+        continuation = new Continuation();
+      } else {
+        if (!continuation.isOpen()) {
+          continuation = new Continuation();
+        }
+        continuation.add(line);
+      }
     }
-    List<String> statements = split(text, wantsMore);
-    return !statements.isEmpty() && wantsMore.test(statements.getLast());
+    return continuation.isOpen();
   }
 
-  private static String lastLine(String text) {
-    return text.substring(text.lastIndexOf('\n') + 1);
+  private static boolean endsStatement(String line) {
+    return line.isBlank() || line.startsWith("|");
   }
 }

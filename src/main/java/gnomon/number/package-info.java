@@ -5,4 +5,7 @@
 /// machine word is used as long as it holds the value. Refuses: rounding of any kind, and long
 /// searches beyond a stated limit. Every mathematics room may call it; it calls only
 /// `gnomon.algebra`.
+@NullMarked
 package gnomon.number;
+
+import org.jspecify.annotations.NullMarked;

@@ -7,4 +7,7 @@
 /// Exponents may be negative or fractional; division and factors treat each indeterminate's
 /// smallest fractional step as the unknown. The library Rings does the heavy multivariate work and
 /// is loaded only when the cheap cases do not answer. Every room from series upward may call it.
+@NullMarked
 package gnomon.polynomial;
+
+import org.jspecify.annotations.NullMarked;

@@ -186,17 +186,6 @@ final class RoomsTest {
   }
 
   @Test
-  void methodsAreNotNamedGet() {
-    check(
-        methods()
-            .that()
-            .areDeclaredInClassesThat()
-            .resideOutsideOfPackage("gnomon.syntax.grammar..")
-            .should()
-            .haveNameNotMatching("get[A-Z].*"));
-  }
-
-  @Test
   void noFloatingTypesInFieldsOfTheExactRooms() {
     check(
         fields()

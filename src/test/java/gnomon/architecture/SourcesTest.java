@@ -28,6 +28,11 @@ final class SourcesTest {
   private static final Pattern BANNED_TYPE =
       Pattern.compile("(class|interface|record|enum) (\\w+(Impl|Util|Utils|Helper|Manager))\\b");
 
+  private static final Pattern BANNED_METHOD =
+      Pattern.compile(
+          "(?<!@Override\n)^ +(?!return|throw|yield|else|assert)[\\w<>\\[\\]?, ]+ get[A-Z]\\w*\\(",
+          Pattern.MULTILINE);
+
   private static final Pattern NOT_CODE =
       Pattern.compile(
           "\"\"\".*?\"\"\"|\"(?:\\\\.|[^\"\\\\\n])*\"|'(?:\\\\.|[^'\\\\\n])+'|//[^\n]*|/\\*.*?\\*/",
@@ -68,6 +73,7 @@ final class SourcesTest {
     List<String> found = new ArrayList<>();
     for (Path file : sources(MAIN)) {
       found.addAll(matches(file, BANNED_TYPE));
+      found.addAll(matches(file, BANNED_METHOD));
     }
     assertEquals(List.of(), found);
   }

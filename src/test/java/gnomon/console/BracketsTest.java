@@ -2,6 +2,7 @@ package gnomon.console;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
+import gnomon.syntax.Lexemes;
 import java.util.Set;
 import org.junit.jupiter.api.Test;
 
@@ -29,6 +30,6 @@ final class BracketsTest {
   }
 
   private static Brackets brackets(String line) {
-    return Brackets.of(Piece.of(line));
+    return Brackets.of(Lexemes.of(line));
   }
 }

@@ -10,8 +10,8 @@ final class PrintedTest {
   @Test
   void proseIsBrokenAtBlanksAndKeepsItsIndentation() {
     assertEquals(
-        List.of("  stone courses of", "  the east", "  terrace"),
-        Printed.wrapped("  stone courses of the east terrace", 17));
+        List.of("  stone courses of", "  the east", "  terraces"),
+        Printed.wrapped("  stone courses of the east terraces", 18));
   }
 
   @Test
