@@ -92,12 +92,10 @@ final class Action {
     List<Splitting.Product> result = new ArrayList<>();
     for (ExponentialPart part : parts) {
       Form image = Splitting.shifted(f, x, part.rate());
-      for (Form coefficient : part.coefficients()) {
+      for (int k = 0; k < part.coefficients().size(); k++) {
         Budget.checkpoint();
-        if (!coefficient.isZero()) {
-          result.add(new Splitting.Product(coefficient, image));
-        }
-        image = image.derivative(x);
+        image = k == 0 ? image : image.derivative(x);
+        addUnlessZero(result, part.coefficients().get(k), image);
       }
     }
     return result;

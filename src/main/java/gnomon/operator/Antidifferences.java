@@ -43,8 +43,24 @@ final class Antidifferences {
   }
 
   private Optional<Form> apply(Operator operator, Form f) {
+    Optional<Divisor> ofSymbol =
+        operator.symbol().isZero()
+            ? Optional.empty()
+            : divisor(List.of(operator.symbol())).filter(d -> rest(operator, d).isZero());
+    if (ofSymbol.isPresent()) {
+      return ofSymbol.map(d -> apply(operator, f, d));
+    }
     List<Form> forms = List.of(operator.symbol(), operator.boundary(x));
     return divisor(forms).map(d -> apply(operator, f, d));
+  }
+
+  /// What the operator is beyond the divisor's finite sums of its sums and integrals.
+  private Operator rest(Operator operator, Divisor divisor) {
+    Operator exact = Operator.integral(x).power(divisor.integrals());
+    exact = exact.compose(Operator.sum(x, divisor.step()).power(divisor.sums()));
+    Form finite = operator.symbol().times(divisor.symbol(t));
+    Operator whole = Operator.of(operator.symbol(), x, operator.boundary(x));
+    return whole.minus(Operator.ofSymbol(finite).compose(exact));
   }
 
   private Form apply(Operator operator, Form f, Divisor divisor) {
@@ -58,11 +74,7 @@ final class Antidifferences {
     if (finite.isZero()) {
       return Action.applyAtZero(operator.boundary(x).times(divisor.symbol(t)), preimage, x);
     }
-    Operator exact = Operator.integral(x).power(divisor.integrals());
-    exact = exact.compose(Operator.sum(x, divisor.step()).power(divisor.sums()));
-    Operator known = Operator.ofSymbol(finite).compose(exact);
-    Operator whole = Operator.of(operator.symbol(), x, operator.boundary(x));
-    Operator rest = whole.minus(known);
+    Operator rest = rest(operator, divisor);
     Form image = Action.apply(finite, preimage);
     if (rest.isZero()) {
       return image;

@@ -136,12 +136,28 @@ final class FormExpansion {
       multiplyBase(product, series(base), power.unit().times(exponent));
       return;
     }
+    boolean fixedBase = !(power.base() instanceof Base.Of(Form base) && base.dependsOn(t));
+    if (fixedBase && !(power.base() instanceof Base.Zero)) {
+      multiplyFixedBase(product, power.base(), series(power.unit().times(exponent)), power);
+      return;
+    }
     PowerSeries rate = series(power.logarithmicDerivative(t).times(exponent));
     if (rate.valuation() < 0) {
       throw new Refusal(Reason.NO_SERIES, Form.of(power));
     }
     product.free = product.free.times(Form.of(power, exponent).substitute(t, Form.ZERO));
     product.series = product.series.times(rate.integral().truncated(work).exp());
+  }
+
+  /// The factor base^u for a base free of t and a series u.
+  private void multiplyFixedBase(Product product, Base base, PowerSeries u, Exponential power) {
+    if (u.valuation() < 0) {
+      throw new Refusal(Reason.NO_SERIES, Form.of(power));
+    }
+    Form start = u.coefficient(0);
+    PowerSeries rest = u.minus(PowerSeries.constant(start, u.order()));
+    product.free = product.free.times(Elementary.power(base.value(), start));
+    product.series = product.series.times(rest.times(base.logarithm()).exp());
   }
 
   private PowerSeries kernel(Generator g) {
