@@ -1,5 +1,7 @@
 package gnomon.form;
 
+import gnomon.algebra.Reason;
+import gnomon.algebra.Refusal;
 import gnomon.number.Rational;
 import java.util.HashMap;
 import java.util.Map;
@@ -63,8 +65,7 @@ public record Accumulation(Kind kind, Variable bound, Form lower, Form upper, Fo
     if (kind == Kind.INTEGRAL) {
       return throughTheIntegral(v);
     }
-    throw new gnomon.algebra.Refusal(
-        gnomon.algebra.Reason.DERIVATIVE_UNKNOWN, Form.of(this), Form.of(v));
+    throw new Refusal(Reason.DERIVATIVE_UNKNOWN, Form.of(this), Form.of(v));
   }
 
   private Form throughTheIntegral(Generator v) {

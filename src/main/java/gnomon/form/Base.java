@@ -1,5 +1,7 @@
 package gnomon.form;
 
+import gnomon.algebra.Reason;
+import gnomon.algebra.Refusal;
 import java.math.BigInteger;
 
 /// The base of a power kernel, irreducible in the sense of its kind, so that powers of different
@@ -94,7 +96,7 @@ public sealed interface Base {
 
     @Override
     public Form logarithm() {
-      throw new gnomon.algebra.Refusal(gnomon.algebra.Reason.LOGARITHM_DOMAIN, Form.ZERO);
+      throw new Refusal(Reason.LOGARITHM_DOMAIN, Form.ZERO);
     }
   }
 
@@ -121,6 +123,29 @@ public sealed interface Base {
 
   /// The base −1.
   Base TURN = new Turn();
+
+  /// The order of bases: by kind, then by value.
+  static int compare(Base a, Base b) {
+    if (a instanceof Prime(BigInteger p) && b instanceof Prime(BigInteger q)) {
+      return p.compareTo(q);
+    }
+    if (a instanceof Of(Form f) && b instanceof Of(Form g)) {
+      return f.compareTo(g);
+    }
+    int byKind = Integer.compare(a.kind(), b.kind());
+    return byKind != 0 ? byKind : a.key().compareTo(b.key());
+  }
+
+  private int kind() {
+    return switch (this) {
+      case Zero _ -> 0;
+      case Turn _ -> 1;
+      case Natural _ -> 2;
+      case Prime _ -> 3;
+      case GaussianAngle _ -> 4;
+      case Of _ -> 5;
+    };
+  }
 
   /// A spelling that tells the base from every other one.
   String key();

@@ -5,6 +5,7 @@ import gnomon.algebra.Reason;
 import gnomon.algebra.Refusal;
 import gnomon.number.Integers;
 import gnomon.number.Rational;
+import gnomon.polynomial.Term;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -93,7 +94,7 @@ public final class Combinatorial {
   }
 
   private static Rational constantTerm(Form u) {
-    for (gnomon.polynomial.Term term : u.numerator().terms()) {
+    for (Term term : u.numerator().terms()) {
       if (term.monomial().isOne()) {
         return term.coefficient();
       }

@@ -16,6 +16,12 @@ public record Exponential(Base base, Form unit) implements Generator {
     return "pow(" + base.key() + ";" + unit.key() + ")";
   }
 
+  /// The order of power kernels: by unit, then by base.
+  static int compare(Exponential a, Exponential b) {
+    int byUnit = a.unit.compareTo(b.unit);
+    return byUnit != 0 ? byUnit : Base.compare(a.base, b.base);
+  }
+
   @Override
   public int rank() {
     return isAlgebraic() ? 12 : 3;

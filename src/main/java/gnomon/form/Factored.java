@@ -2,6 +2,7 @@ package gnomon.form;
 
 import gnomon.number.Rational;
 import gnomon.polynomial.Factorization;
+import gnomon.polynomial.Polynomial;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -31,8 +32,8 @@ public record Factored(Rational unit, List<Factor> factors) {
     return new Factored(top.unit().dividedBy(bottom.unit()), factors);
   }
 
-  private static gnomon.polynomial.Polynomial one() {
-    return gnomon.polynomial.Polynomial.ONE;
+  private static Polynomial one() {
+    return Polynomial.ONE;
   }
 
   /// The form again, multiplied out.

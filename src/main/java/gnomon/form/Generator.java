@@ -60,6 +60,12 @@ public sealed interface Generator extends Indeterminate
       return 0;
     }
     int byRank = Integer.compare(rank(), that.rank());
-    return byRank != 0 ? byRank : key().compareTo(that.key());
+    if (byRank != 0) {
+      return byRank;
+    }
+    // the spelling of a power is put together anew each time: compare its parts instead
+    return this instanceof Exponential a && that instanceof Exponential b
+        ? Exponential.compare(a, b)
+        : key().compareTo(that.key());
   }
 }

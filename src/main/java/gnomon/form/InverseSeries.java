@@ -1,6 +1,7 @@
 package gnomon.form;
 
 import gnomon.number.Rational;
+import java.util.HashMap;
 import java.util.Map;
 import java.util.function.Consumer;
 
@@ -30,7 +31,7 @@ public record InverseSeries(Form of, Dual in, Form argument) implements Generato
 
   @Override
   public Form substitute(Map<Generator, Form> images, Rational exponent) {
-    Map<Generator, Form> outer = new java.util.HashMap<>(images);
+    Map<Generator, Form> outer = new HashMap<>(images);
     outer.remove(in);
     Form value = of(of.substitute(outer), in, argument.substitute(images));
     return Powers.power(value, Form.of(exponent));

@@ -10,6 +10,7 @@ import gnomon.polynomial.Polynomial;
 import gnomon.polynomial.Term;
 import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.SortedMap;
@@ -57,6 +58,9 @@ final class Substitution {
   }
 
   static Form evaluate(Polynomial polynomial, BiFunction<Generator, Rational, Form> image) {
+    if (polynomial.size() > 1 && hasFractions(polynomial, image)) {
+      return overOneDenominator(polynomial, image);
+    }
     Indeterminate main = horner(polynomial);
     if (main != null) {
       return byHorner(polynomial, (Generator) main, image);
@@ -71,6 +75,61 @@ final class Substitution {
       parts.add(product);
     }
     return Form.sum(parts);
+  }
+
+  private static boolean hasFractions(
+      Polynomial polynomial, BiFunction<Generator, Rational, Form> image) {
+    for (Term term : polynomial.terms()) {
+      for (Monomial.Power power : term.monomial().factors()) {
+        Form value = image.apply((Generator) power.indeterminate(), power.exponent());
+        if (!value.isPolynomial()) {
+          return true;
+        }
+      }
+    }
+    return false;
+  }
+
+  /// Sums over the product of the common denominators of each generator's images, so that common
+  /// factors are looked for once and not at each addition.
+  private static Form overOneDenominator(
+      Polynomial polynomial, BiFunction<Generator, Rational, Form> image) {
+    Map<Generator, Polynomial> denominators = new LinkedHashMap<>();
+    for (Term term : polynomial.terms()) {
+      for (Monomial.Power power : term.monomial().factors()) {
+        Generator g = (Generator) power.indeterminate();
+        Polynomial d = image.apply(g, power.exponent()).denominator();
+        denominators.merge(g, d, Polynomial::lcm);
+      }
+    }
+    Map<Monomial, Polynomial> numerators = new HashMap<>();
+    List<Polynomial> parts = new ArrayList<>();
+    for (Term term : polynomial.terms()) {
+      Budget.checkpoint();
+      Polynomial product = Polynomial.of(term.coefficient());
+      for (Map.Entry<Generator, Polynomial> entry : denominators.entrySet()) {
+        Generator g = entry.getKey();
+        Rational exponent = term.monomial().exponent(g);
+        Polynomial factor =
+            exponent.isZero()
+                ? entry.getValue()
+                : numerators.computeIfAbsent(
+                    Monomial.of(g, exponent),
+                    _ -> over(image.apply(g, exponent), entry.getValue()));
+        product = product.times(factor);
+      }
+      parts.add(product);
+    }
+    Polynomial denominator = Polynomial.ONE;
+    for (Polynomial d : denominators.values()) {
+      denominator = denominator.times(d);
+    }
+    return Form.fraction(Polynomial.sum(parts), denominator);
+  }
+
+  /// The numerator of the form over a multiple of its denominator.
+  private static Polynomial over(Form form, Polynomial denominator) {
+    return form.numerator().times(denominator.dividedBy(form.denominator()));
   }
 
   /// The variable by which a polynomial is worth evaluating in nested form, or null.
