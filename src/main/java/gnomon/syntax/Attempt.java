@@ -41,20 +41,13 @@ final class Attempt {
     }
   }
 
+  /// SLL prediction is exact here: all decisions but one need a single token, and what follows the
+  /// comma after `at` tells that one apart in every context.
   private static GnomonParser.StatementContext parse(List<CommonToken> tokens) {
-    try {
-      return parse(tokens, PredictionMode.SLL);
-    } catch (Unexpected _) {
-      return parse(tokens, PredictionMode.LL);
-    }
-  }
-
-  private static GnomonParser.StatementContext parse(
-      List<CommonToken> tokens, PredictionMode mode) {
     GnomonParser parser = new GnomonParser(new CommonTokenStream(new ListTokenSource(tokens)));
     parser.removeErrorListeners();
     parser.setErrorHandler(new Unexpected.Strategy());
-    parser.getInterpreter().setPredictionMode(mode);
+    parser.getInterpreter().setPredictionMode(PredictionMode.SLL);
     return parser.statement();
   }
 
@@ -76,6 +69,6 @@ final class Attempt {
   private static Diagnostic tooLong(String text) {
     return Diagnostic.of("limit-length", "this statement is too long", Span.at(0))
         .withEvidence(text.length() + " characters; the limit is " + Limits.LENGTH + ".")
-        .withHint("let a = 1");
+        .withHint("let part = x^2 + 1");
   }
 }

@@ -85,7 +85,8 @@ public sealed interface Expression {
     public Suffixed {
       suffixes = List.copyOf(suffixes);
       boolean powerInside =
-          suffixes.stream().limit(Math.max(0, suffixes.size() - 1)).anyMatch(Expression::isPower);
+          suffixes.size() > 1
+              && suffixes.subList(0, suffixes.size() - 1).stream().anyMatch(Expression::isPower);
       if (suffixes.isEmpty() || powerInside || !Level.of(atom).within(Level.ATOM)) {
         throw new IllegalArgumentException("suffixes " + suffixes + " behind " + atom);
       }

@@ -76,7 +76,7 @@ final class Guard {
         throw new DiagnosedException(
             Diagnostic.of("limit-nesting", "brackets are nested too deeply", Tokens.span(token))
                 .withEvidence("The limit is " + Limits.NESTING + " brackets inside one another.")
-                .withHint("let a = 1"));
+                .withHint("let part = x^2 + 1"));
       }
     } else if (Tokens.closes(token)) {
       close(token);

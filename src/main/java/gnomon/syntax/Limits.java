@@ -3,7 +3,7 @@ package gnomon.syntax;
 /// How large a statement may be.
 public final class Limits {
   /// The characters of a statement.
-  public static final int LENGTH = 1_000_000;
+  public static final int LENGTH = 200_000;
 
   /// How deep brackets may stand in brackets.
   public static final int NESTING = 200;

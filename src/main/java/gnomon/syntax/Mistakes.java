@@ -135,7 +135,7 @@ record Mistakes(String text) {
     return new DiagnosedException(
         Diagnostic.of("limit-nesting", "this is nested too deeply", place)
             .withEvidence("Parts may stand in parts " + Limits.HEIGHT + " deep.")
-            .withHint("let a = 1"));
+            .withHint("let part = x^2 + 1"));
   }
 
   private String meaning(Word word) {

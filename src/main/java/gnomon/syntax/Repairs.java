@@ -34,7 +34,7 @@ final class Repairs {
 
   /// The same diagnostic with a line to try.
   static Diagnostic hinted(String text, Diagnostic diagnostic) {
-    if (diagnostic.hint().isPresent()) {
+    if (diagnostic.hint().filter(Repairs::reads).isPresent()) {
       return diagnostic;
     }
     List<CommonToken> tokens = text.length() > LONGEST ? List.of() : Tokens.visible(text);

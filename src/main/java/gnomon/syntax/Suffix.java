@@ -15,7 +15,8 @@ public sealed interface Suffix {
 
   /// `|_n` or `↓n`: the falling power.
   record Falling(Expression index, Span span) implements Suffix {
-    /// @throws IllegalArgumentException unless the index is an atom, possibly signed
+    /// @throws IllegalArgumentException unless the index is an atom, possibly signed, and no order
+    ///   term
     public Falling {
       requireLevel(index, Level.ATOM);
     }
@@ -23,7 +24,8 @@ public sealed interface Suffix {
 
   /// `|^n` or `↑n`: the rising power.
   record Rising(Expression index, Span span) implements Suffix {
-    /// @throws IllegalArgumentException unless the index is an atom, possibly signed
+    /// @throws IllegalArgumentException unless the index is an atom, possibly signed, and no order
+    ///   term
     public Rising {
       requireLevel(index, Level.ATOM);
     }
@@ -42,7 +44,8 @@ public sealed interface Suffix {
   private static void requireLevel(Expression expression, Level level) {
     Expression bare =
         expression instanceof Expression.Sign(Expression operand, _) ? operand : expression;
-    if (!Level.of(bare).within(level)) {
+    Expression atom = bare instanceof Expression.Suffixed suffixed ? suffixed.atom() : bare;
+    if (!Level.of(bare).within(level) || atom instanceof Expression.OrderTerm) {
       throw new IllegalArgumentException("behind an atom: " + expression);
     }
   }
