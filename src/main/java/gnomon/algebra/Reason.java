@@ -11,6 +11,8 @@ public enum Reason {
   ARCSINE_DOMAIN,
   /// A kernel whose derivative is no form. Data: the kernel, the variable.
   DERIVATIVE_UNKNOWN,
+  /// An infinite sum that diverges. Data: the summand.
+  DIVERGENT,
   /// A quotient by zero, or a negative power of zero. Data: the dividend where there is one.
   DIVISION_BY_ZERO,
   /// An exponent beyond the range that monomials hold. Data: none.
@@ -34,10 +36,15 @@ public enum Reason {
   NOT_AN_INTEGER,
   /// A delta operator was needed. Data: the symbol.
   NOT_A_DELTA_OPERATOR,
+  /// A function that is no polynomial where one is needed. Data: the function, the variable.
+  NOT_A_POLYNOMIAL,
   /// A quotient of operators that do not commute. Data: the two symbols.
   NOT_COMMUTING,
   /// A number at least zero was needed. Data: the value met.
   NOT_NATURAL,
+  /// An operator that is not polynomial in x where a basis map has to pass it. Data: the symbol,
+  /// the variable.
+  NOT_POLYNOMIAL_IN_X,
   /// A shift-invariant operator was needed. Data: the symbol.
   NOT_SHIFT_INVARIANT,
   /// There is no antidifference of the kind. Data: the form, the variable, the kind.
@@ -52,6 +59,9 @@ public enum Reason {
   OUT_OF_RANGE,
   /// A value at a pole. Data: the form that has the pole.
   POLE,
+  /// A pole of a summand or factor at one of the points of the range. Data: the distance of the
+  /// pole from the numeric end, or the pole; that end.
+  POLE_IN_RANGE,
   /// A root outside the exact constants, i and real radicals. Data: the base, the exponent.
   ROOT_OUT_OF_FIELD,
   /// A shift whose length depends on the variable shifted. Data: the length, the variable.
@@ -60,6 +70,8 @@ public enum Reason {
   SYMBOL_POLE,
   /// Text is not a number. Data: the text.
   UNREADABLE_NUMBER,
+  /// Maps or operators that act on different variables where one is needed. Data: both variables.
+  VARIABLES_DIFFER,
   /// A divisor that is not zero but divides zero under a relation. Data: the divisor.
   ZERO_DIVISOR
 }

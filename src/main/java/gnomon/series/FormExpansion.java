@@ -56,11 +56,10 @@ final class FormExpansion {
     if (!form.dependsOn(t)) {
       return PowerSeries.constant(form, work);
     }
-    PowerSeries top = polynomial(form.numerator());
-    if (form.denominator().isOne()) {
-      return top;
-    }
-    return top.times(inverse(polynomial(form.denominator())));
+    Monomial below = form.denominator().monomialContent();
+    PowerSeries top = polynomial(form.numerator(), below);
+    Polynomial rest = form.denominator().times(below.power(Rational.MINUS_ONE));
+    return rest.isOne() ? top : top.times(inverse(polynomial(rest, Monomial.ONE)));
   }
 
   private static PowerSeries inverse(PowerSeries series) {
@@ -70,11 +69,13 @@ final class FormExpansion {
     return series.inverse();
   }
 
-  private PowerSeries polynomial(Polynomial polynomial) {
+  /// The polynomial divided by a monomial, so that exponents that cancel are not expanded apart.
+  private PowerSeries polynomial(Polynomial polynomial, Monomial below) {
     PowerSeries sum = null;
     for (var term : polynomial.terms()) {
       Budget.checkpoint();
-      PowerSeries part = monomial(term.monomial()).times(Form.of(term.coefficient()));
+      PowerSeries part =
+          monomial(term.monomial().dividedBy(below)).times(Form.of(term.coefficient()));
       sum = sum == null ? part : sum.plus(part);
     }
     return sum == null ? PowerSeries.zero(work) : sum;
@@ -85,6 +86,7 @@ final class FormExpansion {
     PowerSeries series;
     Form free = Form.ONE;
     Form exponent = Form.ZERO;
+    final Map<Base, PowerSeries> powers = new HashMap<>();
 
     Product(int work) {
       series = PowerSeries.constant(Form.ONE, work);
@@ -96,6 +98,7 @@ final class FormExpansion {
     for (var factor : monomial.factors()) {
       multiply(product, factor.indeterminate(), factor.exponent());
     }
+    product.powers.forEach((base, u) -> multiplyFixedBase(product, base, u));
     int shift =
         product
             .exponent
@@ -138,7 +141,7 @@ final class FormExpansion {
     }
     boolean fixedBase = !(power.base() instanceof Base.Of(Form base) && base.dependsOn(t));
     if (fixedBase && !(power.base() instanceof Base.Zero)) {
-      multiplyFixedBase(product, power.base(), series(power.unit().times(exponent)), power);
+      product.powers.merge(power.base(), series(power.unit().times(exponent)), PowerSeries::plus);
       return;
     }
     PowerSeries rate = series(power.logarithmicDerivative(t).times(exponent));
@@ -150,9 +153,12 @@ final class FormExpansion {
   }
 
   /// The factor base^u for a base free of t and a series u.
-  private void multiplyFixedBase(Product product, Base base, PowerSeries u, Exponential power) {
+  private static void multiplyFixedBase(Product product, Base base, PowerSeries u) {
     if (u.valuation() < 0) {
-      throw new Refusal(Reason.NO_SERIES, Form.of(power));
+      throw new Refusal(Reason.NO_SERIES, base.value());
+    }
+    if (u.order() < 0) {
+      throw new TooShort();
     }
     Form start = u.coefficient(0);
     PowerSeries rest = u.minus(PowerSeries.constant(start, u.order()));
@@ -171,13 +177,25 @@ final class FormExpansion {
 
   private PowerSeries expand(Generator g) {
     return switch (g) {
-      case Logarithm _, Arc _ -> fromDerivative(g);
+      case Logarithm(Form argument) -> logarithm(argument, g);
+      case Arc _ -> fromDerivative(g);
       case InverseSeries inverse -> inverseSeries(inverse);
       case Variable _, Dual _, Constant _, AngleConstant _, Exponential _ ->
           throw new IllegalStateException("expanded elsewhere: " + g.key());
       case Factorial _, Harmonic _, Unknown _, Accumulation _ ->
           throw new Refusal(Reason.NO_SERIES, Form.of(g));
     };
+  }
+
+  private PowerSeries logarithm(Form argument, Generator g) {
+    PowerSeries inner = series(argument);
+    if (inner.isZero()) {
+      throw new TooShort();
+    }
+    if (inner.valuation() != 0) {
+      throw new Refusal(Reason.NO_SERIES, Form.of(g));
+    }
+    return inner.log();
   }
 
   private PowerSeries fromDerivative(Generator g) {

@@ -1,0 +1,31 @@
+package gnomon.summation;
+
+import gnomon.form.Form;
+import java.util.Objects;
+
+/// A side condition under which an answer holds: `subject` stands in the `relation`.
+///
+/// Only conditions that the answer needs beyond the meaning of its own kernels are recorded.
+public record Condition(Form subject, Relation relation) {
+
+  /// What is asked of the subject.
+  public enum Relation {
+    /// The subject is not zero.
+    NOT_ZERO,
+    /// The subject is an integer.
+    INTEGER,
+    /// The subject is an integer and at least zero.
+    NATURAL,
+    /// The subject, a pole, is none of the points summed over.
+    NOT_IN_RANGE
+  }
+
+  public Condition {
+    Objects.requireNonNull(subject);
+    Objects.requireNonNull(relation);
+  }
+
+  static Condition notZero(Form subject) {
+    return new Condition(subject, Relation.NOT_ZERO);
+  }
+}

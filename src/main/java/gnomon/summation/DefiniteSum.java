@@ -1,0 +1,62 @@
+package gnomon.summation;
+
+import gnomon.form.Form;
+import java.util.List;
+import java.util.Optional;
+
+/// A definite sum or product and what is known about it.
+///
+/// @param value the closed form, or the sum or product left as it stands
+/// @param status which of these it is
+/// @param conditions under which the closed form holds
+/// @param antidifference the verified antidifference in the variable of summation behind a closed
+///   form, where one was used
+/// @param absentWithin the class in which a closed form is proved not to exist, where it is
+public record DefiniteSum(
+    Form value,
+    Status status,
+    List<Condition> conditions,
+    Optional<Form> antidifference,
+    Optional<FunctionClass> absentWithin) {
+
+  /// How the value is known.
+  public enum Status {
+    /// Every term was evaluated and all were added or multiplied.
+    TERM_BY_TERM,
+    /// A closed form with symbolic ends, or one that spares the single terms.
+    CLOSED_FORM,
+    /// No antidifference exists in a stated class; the value is the sum as it stands.
+    NO_CLOSED_FORM,
+    /// No closed form was found; the value is the sum or product as it stands.
+    LEFT_STANDING
+  }
+
+  public DefiniteSum {
+    conditions = List.copyOf(conditions);
+  }
+
+  static DefiniteSum termByTerm(Form value) {
+    return new DefiniteSum(
+        value, Status.TERM_BY_TERM, List.of(), Optional.empty(), Optional.empty());
+  }
+
+  static DefiniteSum closed(Form value, List<Condition> conditions, Form antidifference) {
+    return new DefiniteSum(
+        value, Status.CLOSED_FORM, conditions, Optional.of(antidifference), Optional.empty());
+  }
+
+  static DefiniteSum closed(Form value, List<Condition> conditions) {
+    return new DefiniteSum(
+        value, Status.CLOSED_FORM, conditions, Optional.empty(), Optional.empty());
+  }
+
+  static DefiniteSum standing(Form value) {
+    return new DefiniteSum(
+        value, Status.LEFT_STANDING, List.of(), Optional.empty(), Optional.empty());
+  }
+
+  static DefiniteSum absent(Form value, FunctionClass within) {
+    return new DefiniteSum(
+        value, Status.NO_CLOSED_FORM, List.of(), Optional.empty(), Optional.of(within));
+  }
+}

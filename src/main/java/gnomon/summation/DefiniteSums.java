@@ -1,0 +1,147 @@
+package gnomon.summation;
+
+import gnomon.algebra.Reason;
+import gnomon.algebra.Refusal;
+import gnomon.form.Accumulation;
+import gnomon.form.Form;
+import gnomon.form.Variable;
+import gnomon.number.Rational;
+import java.math.BigInteger;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.Set;
+
+/// Sums Σ(k: a..b) f(k) over a range with numeric or symbolic ends.
+///
+/// A symbolic end is taken to be an integer no less than the other end less one; an empty sum is 0.
+/// With F an antidifference the sum is F(b + 1) − F(a), used only where neither f nor F has a pole
+/// among the points it passes. A range with one numeric end is counted from that end, so that the
+/// poles of f and F in the direction of the other one are seen.
+public final class DefiniteSums {
+
+  private static final long TERM_BY_TERM_LIMIT = 400;
+
+  private final SummationEngine engine;
+
+  /// Definite sums by the antidifferences of `engine`.
+  public DefiniteSums(SummationEngine engine) {
+    this.engine = engine;
+  }
+
+  /// Σ(k: a..b) f(k).
+  ///
+  /// @throws Refusal with [Reason#POLE_IN_RANGE] when the summand has a pole that the range meets,
+  ///   with [Reason#NOT_AN_INTEGER] when numeric ends do not differ by an integer
+  public DefiniteSum sum(Form f, Variable k, Form a, Form b) {
+    Form summand = f.takingIntegers(Set.of(k));
+    Form span = b.minus(a);
+    Optional<Rational> length = span.asRational();
+    if (length.isPresent()) {
+      return counted(summand, k, a, b, length.get());
+    }
+    if (a.asRational().isPresent()) {
+      Form fromZero = summand.substitute(k, Form.of(k).plus(a));
+      return symbolic(fromZero, k, span, summand, a, b);
+    }
+    if (b.asRational().isPresent()) {
+      Form fromZero = summand.substitute(k, b.minus(Form.of(k)));
+      return symbolic(fromZero, k, span, summand, a, b);
+    }
+    return bothSymbolic(summand, k, a, b);
+  }
+
+  /// A range of a known number of points.
+  private DefiniteSum counted(Form f, Variable k, Form a, Form b, Rational length) {
+    if (!length.isInteger()) {
+      throw new Refusal(Reason.NOT_AN_INTEGER, length);
+    }
+    BigInteger count = length.numerator().add(BigInteger.ONE);
+    if (count.signum() <= 0) {
+      return DefiniteSum.termByTerm(Form.ZERO);
+    }
+    if (count.compareTo(BigInteger.valueOf(TERM_BY_TERM_LIMIT)) > 0) {
+      Form fromZero = f.substitute(k, Form.of(k).plus(a));
+      refusePole(IntegerPoles.of(fromZero, k).between(BigInteger.ZERO, length.numerator()), a);
+      if (engine.search(fromZero, k, Form.ONE) instanceof Antidifference.Found found
+          && IntegerPoles.of(found.value(), k).between(BigInteger.ZERO, count).isEmpty()) {
+        Form value = telescoped(found.value(), k, Form.ZERO, Form.of(count));
+        return DefiniteSum.closed(value, found.conditions(), found.value());
+      }
+    }
+    if (count.bitLength() > 40) {
+      return DefiniteSum.standing(standing(f, k, a, b));
+    }
+    return DefiniteSum.termByTerm(Terms.sum(f, k, a, count.longValueExact()));
+  }
+
+  /// Σ(j: 0..span) g(j) with a symbolic span.
+  private DefiniteSum symbolic(Form g, Variable k, Form span, Form f, Form a, Form b) {
+    refusePole(
+        IntegerPoles.of(g, k).atOrAbove(BigInteger.ZERO), a.asRational().isPresent() ? a : b);
+    return switch (engine.search(g, k, Form.ONE)) {
+      case Antidifference.Found found
+          when IntegerPoles.of(found.value(), k).atOrAbove(BigInteger.ZERO).isEmpty() -> {
+        Form value = telescoped(found.value(), k, Form.ZERO, span.plus(Form.ONE));
+        yield DefiniteSum.closed(
+            value.takingIntegers(integersIn(span)), found.conditions(), found.value());
+      }
+      case Antidifference.Found _, Antidifference.GaveUp _ ->
+          DefiniteSum.standing(standing(f, k, a, b));
+      case Antidifference.ProvedAbsent absent ->
+          DefiniteSum.absent(standing(f, k, a, b), absent.within());
+    };
+  }
+
+  private DefiniteSum bothSymbolic(Form f, Variable k, Form a, Form b) {
+    return switch (engine.search(f, k, Form.ONE)) {
+      case Antidifference.Found found -> {
+        List<Condition> conditions = new ArrayList<>(found.conditions());
+        IntegerPoles poles = IntegerPoles.of(found.value(), k);
+        for (BigInteger point : IntegerPoles.of(f, k).points()) {
+          conditions.add(new Condition(Form.of(point), Condition.Relation.NOT_IN_RANGE));
+        }
+        poles
+            .upTo()
+            .ifPresent(
+                last ->
+                    conditions.add(
+                        new Condition(
+                            a.minus(Form.of(last)).minus(Form.ONE), Condition.Relation.NATURAL)));
+        Form value = telescoped(found.value(), k, a, b.plus(Form.ONE));
+        yield poles.from().isPresent()
+            ? DefiniteSum.standing(standing(f, k, a, b))
+            : DefiniteSum.closed(
+                value.takingIntegers(integersIn(b.minus(a))), conditions, found.value());
+      }
+      case Antidifference.GaveUp _ -> DefiniteSum.standing(standing(f, k, a, b));
+      case Antidifference.ProvedAbsent absent ->
+          DefiniteSum.absent(standing(f, k, a, b), absent.within());
+    };
+  }
+
+  private static Form telescoped(Form antidifference, Variable k, Form from, Form to) {
+    return antidifference.substitute(k, to).minus(antidifference.substitute(k, from));
+  }
+
+  private static Form standing(Form f, Variable k, Form a, Form b) {
+    return Accumulation.of(Accumulation.Kind.SUM, k, a, b, f);
+  }
+
+  private static void refusePole(Optional<BigInteger> offset, Form end) {
+    if (offset.isPresent()) {
+      throw new Refusal(Reason.POLE_IN_RANGE, offset.get(), end);
+    }
+  }
+
+  /// The variable that is an integer because `span` is: span = ±v + integer.
+  static Set<Variable> integersIn(Form span) {
+    if (span.variables().size() != 1) {
+      return Set.of();
+    }
+    Variable only = span.variables().first();
+    Form rest = span.minus(Form.of(only));
+    Form sum = span.plus(Form.of(only));
+    return rest.asInteger().isPresent() || sum.asInteger().isPresent() ? Set.of(only) : Set.of();
+  }
+}
