@@ -43,15 +43,9 @@ final class Antidifferences {
   }
 
   private Optional<Form> apply(Operator operator, Form f) {
-    Optional<Divisor> ofSymbol =
-        operator.symbol().isZero()
-            ? Optional.empty()
-            : divisor(List.of(operator.symbol())).filter(d -> rest(operator, d).isZero());
-    if (ofSymbol.isPresent()) {
-      return ofSymbol.map(d -> apply(operator, f, d));
-    }
-    List<Form> forms = List.of(operator.symbol(), operator.boundary(x));
-    return divisor(forms).map(d -> apply(operator, f, d));
+    boolean functional = operator.symbol().isZero();
+    return divisor(functional ? operator.boundary(x) : operator.symbol())
+        .map(d -> apply(operator, f, d));
   }
 
   /// What the operator is beyond the divisor's finite sums of its sums and integrals.
@@ -128,47 +122,44 @@ final class Antidifferences {
     return found;
   }
 
-  private Optional<Divisor> divisor(List<Form> forms) {
+  private Optional<Divisor> divisor(Form form) {
+    if (form.isZero()) {
+      return Optional.of(new Divisor(0, 0, Form.ONE));
+    }
     int integrals = 0;
     int sums = 0;
     List<Form> steps = new ArrayList<>();
-    for (Form form : forms) {
-      if (form.isZero()) {
+    for (Factored.Factor factor : Structure.factored(form).factors()) {
+      if (factor.multiplicity() >= 0 || !factor.base().dependsOn(t)) {
         continue;
       }
-      for (Factored.Factor factor : Structure.factored(form).factors()) {
-        if (factor.multiplicity() >= 0 || !factor.base().dependsOn(t)) {
-          continue;
-        }
-        Optional<Form> step = step(factor.base());
-        if (factor.base().dividedBy(Form.of(t)).dependsOn(t)) {
-          sums = step.isEmpty() ? sums : Math.max(sums, -factor.multiplicity());
-          step.ifPresent(steps::add);
-        } else {
-          integrals = Math.max(integrals, -factor.multiplicity());
-        }
+      Optional<Form> step = step(factor.base());
+      if (factor.base().dividedBy(Form.of(t)).dependsOn(t)) {
+        sums = step.isEmpty() ? sums : Math.max(sums, -factor.multiplicity());
+        step.ifPresent(steps::add);
+      } else {
+        integrals = -factor.multiplicity();
       }
     }
-    return fitting(forms, integrals, sums, steps);
+    return fitting(form, integrals, sums, steps);
   }
 
-  /// The least multiple of a step met whose divisor clears all the forms.
-  private Optional<Divisor> fitting(List<Form> forms, int integrals, int sums, List<Form> steps) {
+  /// The least multiple of a step met whose divisor clears the form.
+  private Optional<Divisor> fitting(Form form, int integrals, int sums, List<Form> steps) {
     if (steps.isEmpty()) {
-      return Optional.of(new Divisor(integrals, 0, Form.ONE)).filter(d -> clears(d, forms));
+      return Optional.of(new Divisor(integrals, 0, Form.ONE)).filter(d -> clears(d, form));
     }
     for (int n = 1; n <= STEPS; n++) {
       Divisor divisor = new Divisor(integrals, sums, steps.getFirst().times(Form.of(n)));
-      if (clears(divisor, forms)) {
+      if (clears(divisor, form)) {
         return Optional.of(divisor);
       }
     }
     return Optional.empty();
   }
 
-  private boolean clears(Divisor divisor, List<Form> forms) {
-    return forms.stream()
-        .allMatch(f -> Splitting.parts(f.times(divisor.symbol(t)), t, f).isPresent());
+  private boolean clears(Divisor divisor, Form form) {
+    return Splitting.parts(form.times(divisor.symbol(t)), t, form).isPresent();
   }
 
   /// h when the factor is c (e^(a t) − e^(b t)) with a − b = h, taken positive where it is

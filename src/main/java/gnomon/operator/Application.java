@@ -41,6 +41,10 @@ final class Application {
     if (acting.size() != 1) {
       throw new Refusal(Reason.INFINITE_SERIES, operator.symbol(), f);
     }
+    boolean isSeries = operator.isPlain() && !operator.isSingular();
+    if (isSeries) {
+      throw refusal;
+    }
     return Antidifferences.tryApply(operator, acting.iterator().next(), f, engine)
         .orElseThrow(() -> refusal);
   }

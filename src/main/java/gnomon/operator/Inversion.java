@@ -19,11 +19,11 @@ final class Inversion {
 
   static Operator inverse(Operator operator) {
     Form symbol = operator.symbol();
-    if (symbol.isZero()) {
-      throw new Refusal(Reason.DIVISION_BY_ZERO, symbol);
-    }
     if (!operator.boundaries().isEmpty()) {
       throw new Refusal(Reason.NO_INVERSE, symbol);
+    }
+    if (symbol.isZero()) {
+      throw new Refusal(Reason.DIVISION_BY_ZERO, symbol);
     }
     if (symbol.duals().isEmpty() && operator.kernelOrders().isEmpty()) {
       return Operator.multiplication(symbol.inverse());

@@ -71,14 +71,14 @@ final class Kernels {
   /// the kernel that A itself leaves undetermined.
   private static int carried(Operator a, Variable x, int k) {
     Dual t = new Dual(x);
-    if (a.symbol().dependsOn(x) || valuation(a.boundary(x), t) < k) {
+    if (valuation(a.boundary(x), t) < k) {
       throw new Refusal(Reason.KERNEL_LOST, a.symbol(), Form.of(x), k);
     }
-    if (a.symbol().isZero()) {
+    int valuation = valuation(a.symbol(), t);
+    if (valuation >= k) {
       return 0;
     }
-    int valuation = valuation(a.symbol(), t);
-    if (valuation < 0 && a.kernelOrder(x) < -valuation) {
+    if (a.symbol().dependsOn(x) || valuation < 0 && a.kernelOrder(x) < -valuation) {
       throw new Refusal(Reason.KERNEL_LOST, a.symbol(), Form.of(x), k);
     }
     return Math.max(0, k - valuation);

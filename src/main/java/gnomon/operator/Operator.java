@@ -8,14 +8,18 @@ import gnomon.form.Form;
 import gnomon.form.Variable;
 import gnomon.number.Rational;
 import gnomon.series.Expansion;
+import gnomon.series.LazySeries;
+import gnomon.series.PowerSeries;
 import java.util.Collections;
 import java.util.List;
+import java.util.Map;
 import java.util.Objects;
 import java.util.Optional;
 import java.util.SortedMap;
 import java.util.SortedSet;
 import java.util.TreeMap;
 import java.util.TreeSet;
+import java.util.concurrent.ConcurrentHashMap;
 import java.util.function.UnaryOperator;
 
 /// A linear operator f ↦ a(x, D) f + [r(x, D_y) f(y)] at y = 0.
@@ -39,6 +43,7 @@ public final class Operator {
   private final Form symbol;
   private final SortedMap<Variable, Form> boundaries;
   private final SortedMap<Variable, Integer> kernelOrders;
+  private final Map<Variable, LazySeries> expansions = new ConcurrentHashMap<>();
 
   Operator(
       Form symbol,
@@ -162,6 +167,13 @@ public final class Operator {
   /// The boundary parts that are not zero.
   public SortedMap<Variable, Form> boundaries() {
     return boundaries;
+  }
+
+  /// The expansion of the symbol in powers of the dual of x, to the order; kept for later calls.
+  ///
+  /// @throws Refusal with [Reason#NO_SERIES] where there is none
+  public PowerSeries series(Variable x, int order) {
+    return expansions.computeIfAbsent(x, v -> LazySeries.of(symbol, new Dual(v))).to(order);
   }
 
   /// How many of 1, x, x², … the image leaves undetermined.

@@ -92,7 +92,7 @@ final class Splitting {
         Budget.checkpoint();
         result.add(new Product(part.kernel().times(polynomial), slope));
         polynomial = polynomial.derivative(t).times(Rational.of(1, k + 1));
-        slope = slope.derivative(x);
+        slope = polynomial.isZero() ? slope : slope.derivative(x);
       }
     }
     return result;
@@ -107,7 +107,7 @@ final class Splitting {
         Budget.checkpoint();
         result.add(new Product(slope, part.kernel().times(polynomial)));
         polynomial = polynomial.derivative(x).times(Rational.of(1, k + 1));
-        slope = slope.derivative(t);
+        slope = polynomial.isZero() ? slope : slope.derivative(t);
       }
     }
     return result;

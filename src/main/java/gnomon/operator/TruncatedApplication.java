@@ -28,7 +28,7 @@ final class TruncatedApplication {
     }
     Variable x = acting.first();
     Dual t = new Dual(x);
-    PowerSeries series = Expansion.of(operator.symbol(), t, order);
+    PowerSeries series = operator.series(x, order);
     PowerSeries boundary = Expansion.of(operator.boundary(x), t, order);
     List<Form> parts = new ArrayList<>();
     Form slope = f;

@@ -71,4 +71,29 @@ sealed interface CoefficientField<T> permits RationalCoefficients, FormCoefficie
     }
     return sum(parts);
   }
+
+  /// 1/a, for a_0 invertible.
+  default List<T> inverse(List<T> a, int length) {
+    return SeriesAlgorithms.inverse(this, a, length);
+  }
+
+  /// e^a, for a_0 = 0.
+  default List<T> exp(List<T> a, int length) {
+    return SeriesAlgorithms.exp(this, a, length);
+  }
+
+  /// a^e, for a_0 = 1.
+  default List<T> power(List<T> a, T exponent, int length) {
+    return SeriesAlgorithms.power(this, a, exponent, length);
+  }
+
+  /// outer(inner), for inner_0 = 0.
+  default List<T> compose(List<T> outer, List<T> inner, int length) {
+    return SeriesAlgorithms.compose(this, outer, inner, length);
+  }
+
+  /// The compositional inverse, for a_0 = 0 and a_1 invertible.
+  default List<T> reversion(List<T> a, int length) {
+    return SeriesAlgorithms.reversion(this, a, length);
+  }
 }

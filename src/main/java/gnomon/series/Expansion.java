@@ -5,6 +5,8 @@ import gnomon.algebra.Refusal;
 import gnomon.form.Exponential;
 import gnomon.form.Form;
 import gnomon.form.Generator;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Optional;
 
 /// The Laurent expansion of an exact form about 0 in one variable or dual.
@@ -15,6 +17,7 @@ import java.util.Optional;
 public final class Expansion {
 
   private static final int EXTRA = 400;
+  private static final int PROBE = 6;
 
   private Expansion() {}
 
@@ -23,8 +26,12 @@ public final class Expansion {
   /// @throws Refusal with [Reason#NO_SERIES] when there is no Laurent series with finitely many
   ///   negative powers, or none is known, for a kernel of the form; data: the form
   public static PowerSeries of(Form form, Generator t, int order) {
-    int work = Math.max(order, 0);
     int limit = Math.addExact(Math.max(order, 0), EXTRA);
+    int work = Math.max(order, 0);
+    if (work > PROBE) {
+      int lost = attempt(form, t, PROBE).map(s -> PROBE - s.order()).orElse(0);
+      work += Math.max(0, lost);
+    }
     while (true) {
       Optional<PowerSeries> found = attempt(form, t, work);
       if (found.isPresent() && found.get().order() >= order) {
@@ -59,12 +66,12 @@ public final class Expansion {
   /// The singular part Σ_(j≥1) c_j t^(−j) of the form at t = 0, as the list of c_1, c_2, ….
   ///
   /// @throws Refusal with [Reason#NO_SERIES] as [#of]
-  public static java.util.List<Form> singularPart(Form form, Generator t) {
+  public static List<Form> singularPart(Form form, Generator t) {
     if (!mayBeSingular(form, t)) {
-      return java.util.List.of();
+      return List.of();
     }
     PowerSeries series = of(form, t, -1);
-    java.util.List<Form> result = new java.util.ArrayList<>();
+    List<Form> result = new ArrayList<>();
     for (int j = 1; j <= -series.valuation(); j++) {
       result.add(series.coefficient(-j));
     }

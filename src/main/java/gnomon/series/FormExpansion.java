@@ -25,6 +25,7 @@ import gnomon.polynomial.Monomial;
 import gnomon.polynomial.Polynomial;
 import java.util.HashMap;
 import java.util.Map;
+import java.util.Optional;
 
 /// One expansion of a form in powers of t at a fixed working order.
 ///
@@ -71,6 +72,19 @@ final class FormExpansion {
 
   /// The polynomial divided by a monomial, so that exponents that cancel are not expanded apart.
   private PowerSeries polynomial(Polynomial polynomial, Monomial below) {
+    Rational ofT = below.exponent(t);
+    Monomial others = below.without(t);
+    if (ofT.isInteger()) {
+      Polynomial quotient = polynomial.times(others.power(Rational.MINUS_ONE));
+      Optional<PowerSeries> fast = ExponentialSums.expand(quotient, t, work);
+      if (fast.isPresent()) {
+        return fast.get().shifted(-ofT.intValueExact());
+      }
+    }
+    return termByTerm(polynomial, below);
+  }
+
+  private PowerSeries termByTerm(Polynomial polynomial, Monomial below) {
     PowerSeries sum = null;
     for (var term : polynomial.terms()) {
       Budget.checkpoint();

@@ -207,7 +207,7 @@ public final class PowerSeries {
         new Binary() {
           @Override
           public <T> List<T> apply(CoefficientField<T> field, List<T> a, List<T> b) {
-            return SeriesAlgorithms.inverse(field, a, length);
+            return field.inverse(a, length);
           }
         });
   }
@@ -264,8 +264,7 @@ public final class PowerSeries {
         new Binary() {
           @Override
           public <T> List<T> apply(CoefficientField<T> field, List<T> a, List<T> b) {
-            return SeriesAlgorithms.power(
-                field, a, b.isEmpty() ? field.zero() : b.getFirst(), length);
+            return field.power(a, b.isEmpty() ? field.zero() : b.getFirst(), length);
           }
         });
   }
@@ -291,7 +290,7 @@ public final class PowerSeries {
               new Binary() {
                 @Override
                 public <T> List<T> apply(CoefficientField<T> field, List<T> a, List<T> b) {
-                  return SeriesAlgorithms.exp(field, a, length);
+                  return field.exp(a, length);
                 }
               });
     }
@@ -372,7 +371,7 @@ public final class PowerSeries {
         new Binary() {
           @Override
           public <T> List<T> apply(CoefficientField<T> field, List<T> a, List<T> b) {
-            return SeriesAlgorithms.compose(field, a, b, length);
+            return field.compose(a, b, length);
           }
         });
   }
@@ -391,7 +390,7 @@ public final class PowerSeries {
         new Binary() {
           @Override
           public <T> List<T> apply(CoefficientField<T> field, List<T> a, List<T> b) {
-            return SeriesAlgorithms.reversion(field, a, length);
+            return field.reversion(a, length);
           }
         });
   }

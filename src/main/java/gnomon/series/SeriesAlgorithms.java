@@ -75,7 +75,7 @@ final class SeriesAlgorithms {
 
   /// outer(inner) for inner_0 = 0, by baby steps and giant steps: about 2√n products.
   static <T> List<T> compose(CoefficientField<T> field, List<T> outer, List<T> inner, int length) {
-    int step = Math.max(1, squareRoot(length));
+    int step = squareRoot(length);
     List<List<T>> powers = powers(field, inner, step, length);
     List<T> giant = powers.get(step);
     List<T> result = zeros(field, length);
@@ -103,7 +103,7 @@ final class SeriesAlgorithms {
       return result;
     }
     List<T> ratio = inverse(field, a.subList(1, a.size()), length - 1);
-    int step = Math.max(1, squareRoot(length));
+    int step = squareRoot(length);
     List<List<T>> small = powers(field, ratio, step, length - 1);
     List<T> giant = constant(field, length - 1);
     for (int k = 1; k < length; k++) {
@@ -155,9 +155,9 @@ final class SeriesAlgorithms {
     return new ArrayList<>(Collections.nCopies(length, field.zero()));
   }
 
-  /// The least integer whose square is at least n.
-  private static int squareRoot(int n) {
-    int root = 0;
+  /// The least positive integer whose square is at least n.
+  static int squareRoot(int n) {
+    int root = 1;
     while (root * root < n) {
       root++;
     }
