@@ -14,6 +14,9 @@ final class Expectation {
 
   /// The words for these token types, the most telling first.
   static List<String> words(IntervalSet expected) {
+    if (expected.contains(GnomonParser.LET)) {
+      return List.of("a statement");
+    }
     List<String> words = new ArrayList<>();
     boolean comparison = expected.contains(GnomonParser.AT_LEAST);
     if (!comparison) {
@@ -27,7 +30,7 @@ final class Expectation {
     if (afterOperand) {
       words.add("an operation");
     } else if (expected.contains(GnomonParser.NUMBER)) {
-      words.add("a number, a name or a bracket");
+      words.add("a value");
     } else if (expected.contains(GnomonParser.NAME)) {
       words.add("a name");
     } else {

@@ -127,6 +127,7 @@ final class ExpressionBuilder {
   /// A power and what stands behind its base, with the exponents folded from the right.
   Expression power(GnomonParser.PowerContext context) {
     List<GnomonParser.OperandContext> operands = context.operand();
+    operands.stream().skip(1).forEach(this::refuseRow);
     Expression folded = suffixed(operands.getLast(), List.of());
     int end = Tokens.span(context.getStop()).end();
     for (int at = operands.size() - 2; at >= 0; at--) {
@@ -138,6 +139,17 @@ final class ExpressionBuilder {
       folded = suffixed(operands.get(at), List.of(new Suffix.Raised(exponent, raised)));
     }
     return folded;
+  }
+
+  private void refuseRow(GnomonParser.OperandContext operand) {
+    refuseRow(operand.atom());
+  }
+
+  /// Refuses `x^(a, b)`.
+  private void refuseRow(GnomonParser.AtomContext atom) {
+    if (atom.parenthesis() != null && atom.parenthesis().value().size() > 1) {
+      throw mistakes.rowAlone(span(atom), Span.at(span(atom).start()));
+    }
   }
 
   private Expression suffixed(GnomonParser.OperandContext context, List<Suffix> raised) {
@@ -166,6 +178,7 @@ final class ExpressionBuilder {
     if (context.BANG() != null) {
       return new Suffix.Factorial(span);
     }
+    refuseRow(context.atom());
     Expression atom = atom(context.atom());
     Expression index =
         isNegative(context.signs()) ? new Sign(atom, span(context.signs()).to(atom.span())) : atom;

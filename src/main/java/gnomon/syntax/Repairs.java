@@ -2,7 +2,6 @@ package gnomon.syntax;
 
 import gnomon.diagnostic.Diagnostic;
 import gnomon.diagnostic.Span;
-import gnomon.syntax.grammar.GnomonParser;
 import java.util.List;
 import java.util.Map;
 import java.util.stream.Stream;
@@ -38,7 +37,8 @@ final class Repairs {
       return diagnostic;
     }
     List<CommonToken> tokens = text.length() > LONGEST ? List.of() : Tokens.visible(text);
-    return Stream.concat(candidates(text, diagnostic, tokens), Stream.of(page(text)))
+    return Stream.concat(
+            candidates(text, diagnostic, tokens), Stream.of(page(tokens, diagnostic.span())))
         .map(line -> line.replaceAll("\\s*[\\r\\n]+\\s*| {2,}", " ").strip())
         .filter(line -> !line.contains("#") && reads(line))
         .findFirst()
@@ -55,11 +55,12 @@ final class Repairs {
     String at = text.substring(span.start(), span.end());
     String head = text.substring(0, span.start());
     String tail = text.substring(span.end());
+    String open = text.replaceAll("[,\\s]+$", "");
     Stream<String> general =
         Stream.concat(
             Stream.of(" = ", ": ", "..", ", ", " fractions ", " to ")
                 .map(word -> head.stripTrailing() + word + at + tail),
-            Stream.of(head + tail));
+            Stream.of(without(head, tail)));
     Stream<String> special =
         switch (diagnostic.code()) {
           case "syntax-equation" -> Stream.of("let " + text, "claim " + text);
@@ -68,15 +69,18 @@ final class Repairs {
                   Stream.of(translated(text)),
                   FOREIGN.getOrDefault(at, List.of("", "*")).stream()
                       .map(sign -> head + sign + tail));
-          case "syntax-bracket" ->
-              Stream.of(
-                  text.stripTrailing() + ")", text.stripTrailing() + "]", head + other(at) + tail);
+          case "syntax-bracket" -> Stream.of(open + ")", open + "]", head + other(at) + tail);
           case "syntax-quotation" -> Stream.of(text + "\"");
           case "syntax-line" -> Stream.of(head);
           case "syntax-comparison" -> Stream.of("given " + text);
-          case "syntax-binder" -> Stream.of(head + at + " " + minusInBrackets(tail));
+          case "syntax-binder" -> Stream.of(head + at + " " + summand(at, tail));
           case "syntax-clause" -> Stream.of(bracketedSide(text));
-          default -> at.equals("-") ? Stream.of(head + "(" + at + tail + ")") : Stream.empty();
+          default ->
+              switch (at) {
+                case "-" -> Stream.of(head + "(" + at + tail + ")");
+                case ".." -> Stream.of("n for n: " + text.strip());
+                default -> Stream.empty();
+              };
         };
     Stream<String> spelt =
         Explanation.nearStatement(tokens.getFirst()).stream()
@@ -84,9 +88,24 @@ final class Repairs {
     return Stream.of(spelt, special, general).flatMap(stream -> stream);
   }
 
-  private static String minusInBrackets(String tail) {
+  /// What may stand after the head of a binder instead of `tail`.
+  private static String summand(String head, String tail) {
     String body = tail.strip();
-    return body.startsWith("*") ? body.substring(1) : "(" + body + ")";
+    if (body.isEmpty()) {
+      return head.substring(head.indexOf('(') + 1, head.indexOf(':'));
+    }
+    return body.startsWith("*") || body.startsWith("+") ? body.substring(1) : "(" + body + ")";
+  }
+
+  /// Two parts of a line with what stood between them left out, kept apart if they would run
+  /// together.
+  private static String without(String head, String tail) {
+    boolean together =
+        !head.isEmpty()
+            && !tail.isEmpty()
+            && Character.isLetterOrDigit(head.charAt(head.length() - 1))
+            && Character.isLetterOrDigit(tail.charAt(0));
+    return head + (together ? " " : "") + tail;
   }
 
   /// The text with every foreign character put into the language.
@@ -113,14 +132,18 @@ final class Repairs {
     };
   }
 
-  private static String page(String text) {
-    List<CommonToken> tokens = text.length() > LONGEST ? List.of() : Tokens.visible(text);
-    return tokens.stream()
+  /// The page of the last word of a statement or clause up to the mistake.
+  private static String page(List<CommonToken> tokens, Span place) {
+    return tokens.reversed().stream()
+        .filter(token -> token.getStartIndex() <= place.start())
+        .filter(token -> Vocabulary.find(token.getText()).filter(Repairs::hasPage).isPresent())
         .findFirst()
-        .filter(first -> first.getType() <= GnomonParser.PRESENTATION)
-        .filter(first -> Vocabulary.find(first.getText()).isPresent())
-        .map(first -> "help " + first.getText())
+        .map(token -> "help " + token.getText())
         .orElse("help");
+  }
+
+  private static boolean hasPage(Word word) {
+    return word.sort() == Word.Sort.STATEMENT || word.sort() == Word.Sort.CLAUSE;
   }
 
   private static boolean reads(String line) {

@@ -149,7 +149,7 @@ final class TermBuilder {
       if (divisor > 0 && piece.touching() && (!argument || before.isPlainNumeral())) {
         Span over = pieces.get(divisor).span().to(before.span());
         Span numerator = pieces.getFirst().span().to(pieces.get(divisor - 1).span());
-        throw mistakes.doubtfulQuotient(numerator, over, piece.span());
+        throw mistakes.doubtfulQuotient(numerator, over, touchingRun(pieces, at));
       }
       if (piece.connective() == Connective.DIVIDED) {
         divisor = at;
@@ -167,6 +167,14 @@ final class TermBuilder {
         refuseFunctionAsExponent(before.value(), piece.span());
       }
     }
+  }
+
+  private static Span touchingRun(List<Piece> pieces, int from) {
+    int last = from;
+    while (last + 1 < pieces.size() && pieces.get(last + 1).touching()) {
+      last++;
+    }
+    return pieces.get(from).span().to(pieces.get(last).span());
   }
 
   private void refuseFunctionAsExponent(Expression before, Span argument) {

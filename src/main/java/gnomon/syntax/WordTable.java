@@ -56,7 +56,7 @@ final class WordTable {
           word("inf", "∞", CONSTANT, "infinity, as a limit"),
           word("e", CONSTANT, "base of the natural logarithm"),
           word("i", CONSTANT, "imaginary unit"),
-          word("C1", CONSTANT, "constant that an inverse leaves open; so are C2, C3, ..."));
+          word("C1", CONSTANT, "constant that an inverse leaves open; so are C2, C3 and so on"));
 
   static final List<Word> STATEMENTS =
       List.of(

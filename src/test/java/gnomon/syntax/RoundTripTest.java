@@ -12,7 +12,7 @@ import org.junit.jupiter.params.provider.EnumSource;
 /// parse(show(t)) = t.
 final class RoundTripTest {
   private static final long SEED = 20_260_131;
-  private static final int TREES = 4_000;
+  private static final int TREES = 1_500;
 
   @ParameterizedTest
   @EnumSource(Spelling.class)

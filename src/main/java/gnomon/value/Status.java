@@ -1,0 +1,52 @@
+package gnomon.value;
+
+/// What is known about an answer besides its value: for sums whether a closed form was found, for
+/// claims whether they were decided. `detail` narrows it, as `for n >= 1` does; it may be empty.
+public record Status(Kind kind, String detail) {
+
+  /// The kinds of status, with the words of the status line.
+  public enum Kind {
+    NONE(""),
+    CLOSED_FORM("closed form"),
+    RECURRENCE("recurrence"),
+    NO_CLOSED_FORM("no closed form"),
+    LEFT_AS_SUM("left as a sum"),
+    PROVED("proved"),
+    REFUTED("refuted"),
+    OPEN("open");
+
+    private final String word;
+
+    Kind(String word) {
+      this.word = word;
+    }
+
+    /// The word of the status line.
+    public String word() {
+      return word;
+    }
+  }
+
+  /// Nothing besides the value.
+  public static final Status NONE = of(Kind.NONE);
+
+  /// The status without detail.
+  public static Status of(Kind kind) {
+    return new Status(kind, "");
+  }
+
+  /// The same kind with the detail.
+  public Status withDetail(String words) {
+    return new Status(kind, words);
+  }
+
+  /// The word without the detail.
+  public String word() {
+    return kind.word();
+  }
+
+  /// The word with its detail, such as `closed form for n >= 1`.
+  public String text() {
+    return detail.isEmpty() ? word() : (word() + " " + detail).strip();
+  }
+}
