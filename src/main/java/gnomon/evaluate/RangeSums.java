@@ -1,0 +1,154 @@
+package gnomon.evaluate;
+
+import gnomon.algebra.Halt;
+import gnomon.diagnostic.DiagnosedException;
+import gnomon.diagnostic.Span;
+import gnomon.evaluate.Binders.Limits;
+import gnomon.form.Form;
+import gnomon.form.Variable;
+import gnomon.summation.DefiniteProducts;
+import gnomon.summation.DefiniteSum;
+import gnomon.summation.DefiniteSums;
+import gnomon.summation.InfiniteSums;
+import gnomon.summation.SummationEngine;
+import gnomon.syntax.Expression;
+import gnomon.value.FormValue;
+import gnomon.value.Status;
+import gnomon.value.Value;
+import java.math.BigInteger;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+
+/// Sums and products over a range of integers. Functions go to the summation engine; a body that
+/// has a meaning only for each integer, such as a power of an operator, is evaluated for each.
+final class RangeSums {
+  private static final int MOST_TERMS = 10_000;
+
+  private final Evaluator evaluator;
+  private final Evaluation evaluation;
+
+  RangeSums(Evaluator evaluator, Evaluation evaluation) {
+    this.evaluator = evaluator;
+    this.evaluation = evaluation;
+  }
+
+  Value value(Limits limits, Expression body, boolean adding, Scope scope) {
+    Span span = limits.span().to(body.span());
+    Optional<Form> form = symbolic(limits, body, scope);
+    return form.isPresent()
+        ? Places.at(span, () -> ofForm(limits, form.get(), adding, scope))
+        : oneByOne(limits, body, adding, scope);
+  }
+
+  /// The body as a function of the bound variable; between numbers it need not be one.
+  private Optional<Form> symbolic(Limits limits, Expression body, Scope scope) {
+    Scope inside = scope.with(limits.variable().name(), new Binding.Bound(limits.variable()));
+    try {
+      Value value = evaluator.value(body, inside);
+      if (value instanceof FormValue form) {
+        return Optional.of(form.form());
+      }
+      if (!limits.isNumeric()) {
+        throw Problems.of(
+            "kind-not-a-function",
+            "what is summed is " + Sorts.article(value) + ", not a function",
+            body.span());
+      }
+      return Optional.empty();
+    } catch (LocatedRefusal | DiagnosedException needsNumbers) {
+      if (limits.isNumeric()) {
+        return Optional.empty();
+      }
+      throw needsNumbers;
+    }
+  }
+
+  private Value ofForm(Limits limits, Form body, boolean adding, Scope scope) {
+    Variable k = limits.variable();
+    SummationEngine engine = evaluation.sums();
+    DefiniteSums sums = new DefiniteSums(engine);
+    DefiniteSum sum;
+    if (!adding) {
+      Form upper =
+          limits
+              .upper()
+              .orElseThrow(
+                  () ->
+                      Problems.of(
+                          "domain-infinite-product",
+                          "a product needs an upper limit",
+                          limits.span()));
+      sum = new DefiniteProducts(sums).product(body, k, limits.lower(), upper);
+    } else if (limits.upper().isPresent()) {
+      sum = sums.sum(body, k, limits.lower(), limits.upper().get());
+    } else {
+      sum = new InfiniteSums(engine).sum(body, k, limits.lower());
+    }
+    evaluation.status(status(sum));
+    sum.antidifference().ifPresent(found -> record(found, body, sum.value(), limits, scope));
+    return Sorts.of(sum.value(), scope);
+  }
+
+  private static Status status(DefiniteSum sum) {
+    return switch (sum.status()) {
+      case TERM_BY_TERM -> Status.of(Status.Kind.CLOSED_FORM);
+      case CLOSED_FORM ->
+          Status.of(Status.Kind.CLOSED_FORM).withDetail(Conditions.words(sum.conditions()));
+      case NO_CLOSED_FORM ->
+          Status.of(Status.Kind.NO_CLOSED_FORM)
+              .withDetail(
+                  sum.absentWithin().map(kind -> "among " + Conditions.words(kind)).orElse(""));
+      case LEFT_STANDING -> Status.of(Status.Kind.LEFT_AS_SUM);
+    };
+  }
+
+  /// Records the antidifference and that its difference is the summand, which is computed here
+  /// anew.
+  private void record(Form found, Form summand, Form sum, Limits limits, Scope scope) {
+    Variable k = limits.variable();
+    Form next = Form.of(k).plus(Form.ONE);
+    Form back = found.substitute(k, next).minus(found);
+    Form moved = summand.substitute(k, Form.of(k).plus(limits.lower()));
+    boolean fromZero = back.equals(moved);
+    if (fromZero || back.equals(summand)) {
+      boolean shifted = fromZero && !limits.lower().isZero();
+      Value total = Sorts.of(sum, scope);
+      evaluation.antidifference(found, back, fromZero ? moved : summand, k, shifted);
+      Form first = shifted || fromZero ? Form.ZERO : limits.lower();
+      Optional<Form> end =
+          limits.upper().map(u -> u.plus(Form.ONE).minus(fromZero ? limits.lower() : Form.ZERO));
+      end.ifPresent(
+          past ->
+              evaluation.step(
+                  "the sum is F past the upper end less F at the lower end",
+                  Sorts.of(evaluation.named(past).minus(evaluation.named(first)), scope),
+                  total,
+                  ""));
+    }
+  }
+
+  private Value oneByOne(Limits limits, Expression body, boolean adding, Scope scope) {
+    BigInteger first = limits.first().orElseThrow();
+    BigInteger last = limits.last().orElseThrow();
+    BigInteger count = last.subtract(first).add(BigInteger.ONE);
+    if (count.compareTo(BigInteger.valueOf(MOST_TERMS)) > 0) {
+      Halt halt = new Halt(Halt.Cause.SIZE, count.min(BigInteger.TWO.pow(62)).longValue());
+      throw new LocatedHalt(halt, limits.span());
+    }
+    List<Value> values =
+        new RangeValues(evaluator).values(limits.variable(), first, last, body, scope);
+    if (values.isEmpty()) {
+      return Sorts.of(adding ? Form.ZERO : Form.ONE, scope);
+    }
+    List<Value> rest = new ArrayList<>(values);
+    Value total = rest.removeFirst();
+    for (Value value : rest) {
+      total =
+          adding
+              ? evaluator.plus(total, value, body.span(), scope)
+              : evaluator.times(total, value, body.span(), scope);
+    }
+    return total;
+  }
+}

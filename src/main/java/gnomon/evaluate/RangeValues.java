@@ -1,0 +1,82 @@
+package gnomon.evaluate;
+
+import gnomon.algebra.Budget;
+import gnomon.algebra.Refusal;
+import gnomon.diagnostic.DiagnosedException;
+import gnomon.diagnostic.Diagnostic;
+import gnomon.diagnostic.Span;
+import gnomon.form.Accumulation;
+import gnomon.form.Form;
+import gnomon.form.Variable;
+import gnomon.syntax.Expression;
+import gnomon.value.FormValue;
+import gnomon.value.Value;
+import java.math.BigInteger;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+
+/// The values of an expression for each integer in a range. It is evaluated once with the variable
+/// free where that gives a form without standing sums, else anew for each integer.
+final class RangeValues {
+  private final Evaluator evaluator;
+
+  RangeValues(Evaluator evaluator) {
+    this.evaluator = evaluator;
+  }
+
+  List<Value> values(
+      Variable variable, BigInteger first, BigInteger last, Expression body, Scope scope) {
+    Optional<FormValue> symbolic = symbolic(variable, body, scope);
+    List<Value> values = new ArrayList<>();
+    for (BigInteger k = first; k.compareTo(last) <= 0; k = k.add(BigInteger.ONE)) {
+      Budget.checkpoint();
+      values.add(valueAt(variable, k, symbolic, body, scope));
+    }
+    return values;
+  }
+
+  private Value valueAt(
+      Variable variable, BigInteger k, Optional<FormValue> symbolic, Expression body, Scope scope) {
+    Form at = Form.of(k);
+    if (symbolic.isPresent()) {
+      try {
+        return Sorts.of(symbolic.get().form().substitute(variable, at), scope);
+      } catch (Refusal pole) {
+        if (scope.running().equals(variable)) {
+          throw pole(variable, k, body.span());
+        }
+      }
+    }
+    try {
+      return evaluator.value(
+          body, scope.with(variable.name(), new Binding.Held(Sorts.of(at, scope))));
+    } catch (LocatedRefusal refused) {
+      if (symbolic.isPresent()) {
+        throw pole(variable, k, body.span());
+      }
+      throw refused;
+    }
+  }
+
+  private Optional<FormValue> symbolic(Variable variable, Expression body, Scope scope) {
+    try {
+      Scope inside = scope.with(variable.name(), new Binding.Bound(variable));
+      return evaluator.value(body, inside) instanceof FormValue value && !hasStandingSums(value)
+          ? Optional.of(value)
+          : Optional.empty();
+    } catch (LocatedRefusal | DiagnosedException needsNumbers) {
+      return Optional.empty();
+    }
+  }
+
+  private static boolean hasStandingSums(FormValue value) {
+    return value.form().generators().stream().anyMatch(Accumulation.class::isInstance);
+  }
+
+  static DiagnosedException pole(Variable variable, BigInteger k, Span span) {
+    return new DiagnosedException(
+        Diagnostic.of("domain-pole", "there is a pole inside the range", span)
+            .withEvidence("It is undefined at " + variable.name() + " = " + k + "."));
+  }
+}

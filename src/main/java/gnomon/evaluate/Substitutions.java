@@ -1,0 +1,108 @@
+package gnomon.evaluate;
+
+import gnomon.basis.MappedOperator;
+import gnomon.diagnostic.Span;
+import gnomon.form.Accumulation;
+import gnomon.form.Form;
+import gnomon.form.Generator;
+import gnomon.form.Variable;
+import gnomon.operator.Operator;
+import gnomon.syntax.Clause;
+import gnomon.value.FormValue;
+import gnomon.value.ListValue;
+import gnomon.value.SeriesValue;
+import gnomon.value.TableValue;
+import gnomon.value.Value;
+import java.math.BigInteger;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+
+/// `… at x = a`: values put in for variables, all at once. Standing sums whose limits become
+/// numbers are added up.
+final class Substitutions {
+  private static final int ADDED_UP = 10_000;
+
+  private final Evaluator evaluator;
+
+  Substitutions(Evaluator evaluator) {
+    this.evaluator = evaluator;
+  }
+
+  Value value(Value subject, Clause.At clause, Scope scope) {
+    Map<Generator, Form> images = new HashMap<>();
+    for (Clause.Substitution substitution : clause.substitutions()) {
+      Variable variable = new Variable(substitution.variable().text());
+      Value image = evaluator.value(substitution.value(), scope);
+      images.put(variable, Sorts.form(image, substitution.value().span(), "what is put in"));
+    }
+    return put(subject, images, clause.span(), scope);
+  }
+
+  private Value put(Value subject, Map<Generator, Form> images, Span span, Scope scope) {
+    return switch (subject) {
+      case FormValue form -> Sorts.of(addedUp(form.form().substitute(images)), scope);
+      case ListValue list ->
+          new ListValue(list.items().stream().map(item -> put(item, images, span, scope)).toList());
+      case TableValue table ->
+          new TableValue(
+              List.of(),
+              table.rows().stream()
+                  .map(row -> row.stream().map(v -> put(v, images, span, scope)).toList())
+                  .toList());
+      case SeriesValue series ->
+          new SeriesValue(
+              series.family(),
+              series.first(),
+              series.coefficients().stream().map(c -> c.substitute(images)).toList(),
+              series.order());
+      case Value other -> operator(other, images, span);
+    };
+  }
+
+  /// Parameters of an operator, such as a step, but not the variable it acts on.
+  private static Value operator(Value subject, Map<Generator, Form> images, Span span) {
+    Operator operator =
+        Sorts.asOperator(subject)
+            .flatMap(MappedOperator::asOperator)
+            .filter(Operator::isPlain)
+            .filter(plain -> plain.variables().stream().noneMatch(images::containsKey))
+            .orElseThrow(
+                () ->
+                    Problems.of(
+                        "kind-at",
+                        "nothing can be put into " + Sorts.article(subject) + " here",
+                        span));
+    return Sorts.of(Operator.ofSymbol(operator.symbol().substitute(images)));
+  }
+
+  /// The form with its sums and products between numbers worked out.
+  static Form addedUp(Form form) {
+    boolean standing = form.generators().stream().anyMatch(Accumulation.class::isInstance);
+    return standing ? form.mapGenerators(Substitutions::addedUp) : form;
+  }
+
+  private static Form addedUp(Generator generator) {
+    if (generator instanceof Accumulation standing
+        && standing.kind() != Accumulation.Kind.INTEGRAL
+        && standing.lower().asInteger().isPresent()
+        && standing.upper().asInteger().isPresent()) {
+      BigInteger first = standing.lower().asInteger().get();
+      BigInteger last = standing.upper().asInteger().get();
+      if (last.subtract(first).compareTo(BigInteger.valueOf(ADDED_UP)) <= 0) {
+        return addedUp(standing, first, last);
+      }
+    }
+    return Form.of(generator);
+  }
+
+  private static Form addedUp(Accumulation standing, BigInteger first, BigInteger last) {
+    boolean adding = standing.kind() == Accumulation.Kind.SUM;
+    Form total = adding ? Form.ZERO : Form.ONE;
+    for (BigInteger k = first; k.compareTo(last) <= 0; k = k.add(BigInteger.ONE)) {
+      Form term = addedUp(standing.body().substitute(standing.bound(), Form.of(k)));
+      total = adding ? total.plus(term) : total.times(term);
+    }
+    return total;
+  }
+}
