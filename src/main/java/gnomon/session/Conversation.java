@@ -1,0 +1,232 @@
+package gnomon.session;
+
+import gnomon.diagnostic.DiagnosedException;
+import gnomon.diagnostic.Diagnostic;
+import gnomon.diagnostic.Source;
+import gnomon.diagnostic.Span;
+import gnomon.evaluate.Interpreter;
+import gnomon.evaluate.LocatedHalt;
+import gnomon.evaluate.LocatedRefusal;
+import gnomon.evaluate.Scope;
+import gnomon.render.Rendering;
+import gnomon.render.Wording;
+import gnomon.summation.SummationEngine;
+import gnomon.syntax.Expression;
+import gnomon.syntax.Reading;
+import gnomon.syntax.Statement;
+import gnomon.syntax.StatementReader;
+import gnomon.syntax.StatementText;
+import gnomon.value.Answer;
+import gnomon.value.Value;
+import gnomon.value.VerdictValue;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+
+/// What a statement does to a state and what is replied: a function of both, but for the files that
+/// some statements read and write.
+final class Conversation {
+  private final Settings settings;
+  private final HelpPages help;
+  private final Interpreter interpreter;
+  private final SessionFiles files;
+
+  Conversation(Settings settings, HelpPages help) {
+    this.settings = settings;
+    this.help = help;
+    this.files = new SessionFiles(settings);
+    this.interpreter =
+        new Interpreter(
+            settings.limits().depth(),
+            settings.limits().steps(),
+            SummationEngine.standard(),
+            (value, running) -> Rendering.latex().withRunning(running).line(value));
+  }
+
+  /// The state after a statement and the reply to it. After a failure the state is as before.
+  record Outcome(State state, Reply reply) {}
+
+  Outcome outcome(State state, Request request) {
+    Source source = new Source("input", request.text(), request.line());
+    try {
+      return switch (StatementReader.read(source)) {
+        case Reading.Rejected(Diagnostic diagnostic) -> failure(state, diagnostic, source);
+        case Reading.Unfinished(Diagnostic diagnostic) -> failure(state, diagnostic, source);
+        case Reading.Understood(Statement statement) ->
+            recorded(outcome(state, statement), statement, request);
+      };
+    } catch (DiagnosedException diagnosed) {
+      return failure(state, diagnosed.diagnostic(), source);
+    } catch (LocatedRefusal refused) {
+      return failure(state, wording(state).of(refused.refusal(), refused.span()), source);
+    } catch (LocatedHalt halted) {
+      return failure(state, wording(state).of(halted.halt(), halted.span()), source);
+    } catch (StackOverflowError tooDeep) {
+      Span whole = new Span(0, request.text().length());
+      return failure(
+          state, Diagnostic.of("limit-depth", "this is nested too deeply", whole), source);
+    } catch (OutOfMemoryError tooLarge) {
+      Span whole = new Span(0, request.text().length());
+      return failure(
+          state, Diagnostic.of("limit-size", "this does not fit into memory", whole), source);
+    } catch (RuntimeException fault) {
+      return failure(state, Faults.diagnostic(fault, request.text().length()), source);
+    }
+  }
+
+  private static Outcome failure(State state, Diagnostic diagnostic, Source source) {
+    return new Outcome(state, new Reply.Failure(diagnostic, source));
+  }
+
+  private Wording wording(State state) {
+    return Wording.in(ShownValue.rendering(settings.spelling(), state.scope().running()));
+  }
+
+  private static Outcome recorded(Outcome outcome, Statement statement, Request request) {
+    boolean kept =
+        switch (statement) {
+          case Statement.ExpressionStatement _,
+              Statement.Let _,
+              Statement.Claim _,
+              Statement.Given _,
+              Statement.Drop _,
+              Statement.DropGiven _,
+              Statement.Vary _,
+              Statement.Arbitrary _,
+              Statement.Why _ ->
+              outcome.reply().isAccepted();
+          case Statement.Names _,
+              Statement.Keep _,
+              Statement.Replay _,
+              Statement.Recheck _,
+              Statement.Rerecord _,
+              Statement.Help _,
+              Statement.Leave _,
+              Statement.Empty _ ->
+              false;
+        };
+    return kept
+        ? new Outcome(
+            outcome
+                .state()
+                .withExchange(new Exchange(request.line(), request.text(), outcome.reply())),
+            outcome.reply())
+        : outcome;
+  }
+
+  private Outcome outcome(State state, Statement statement) {
+    Scope scope = state.scope();
+    return switch (statement) {
+      case Statement.ExpressionStatement(Expression expression, Span _) -> {
+        Answer answer = interpreter.value(expression, scope);
+        yield answered(state, scope, expression, answer);
+      }
+      case Statement.Let let when let.parameters().isEmpty() -> {
+        Interpreter.Definition definition = interpreter.let(let, scope);
+        yield answered(state, definition.scope(), let.body(), definition.answer());
+      }
+      case Statement.Let let -> {
+        String text = StatementText.of(let, syntaxSpelling());
+        yield noted(state.withScope(interpreter.rule(let, scope)), List.of(text.substring(4)));
+      }
+      case Statement.Claim claim -> {
+        Answer answer = interpreter.claim(claim, scope);
+        yield answered(state, scope, claim.left(), answer);
+      }
+      case Statement.Given given ->
+          noted(state.withScope(interpreter.given(given, scope)), List.of());
+      case Statement.Drop drop -> noted(state.withScope(interpreter.drop(drop, scope)), List.of());
+      case Statement.DropGiven _ -> noted(state.withScope(Interpreter.dropGiven(scope)), List.of());
+      case Statement.Vary vary -> noted(state.withScope(interpreter.vary(vary, scope)), List.of());
+      case Statement.Arbitrary arbitrary ->
+          noted(state.withScope(interpreter.arbitrary(arbitrary, scope)), List.of());
+      case Statement.Why why -> new Outcome(state, why(state, why));
+      case Statement.Names _ -> noted(state, Listing.names(scope, settings.spelling()));
+      case Statement.Keep keep -> noted(state, files.keep(keep, state));
+      case Statement.Replay replay -> replayed(state, replay);
+      case Statement.Recheck recheck ->
+          new Outcome(state, new Reply.Rechecked(files.recheck(recheck)));
+      case Statement.Rerecord rerecord -> noted(state, files.rerecord(rerecord));
+      case Statement.Help(Optional<String> topic, Span span) ->
+          new Outcome(state, help(topic, span));
+      case Statement.Leave _ -> new Outcome(state, new Reply.Left());
+      case Statement.Empty _ -> new Outcome(state, new Reply.Nothing());
+    };
+  }
+
+  private static Outcome noted(State state, List<String> lines) {
+    return new Outcome(state, new Reply.Note(lines));
+  }
+
+  private Outcome answered(State state, Scope scope, Expression expression, Answer answer) {
+    Scope next = Interpreter.withResult(scope, answer.value(), expression, state.scope());
+    Shown shown = new ShownValue(answer.value(), state.scope().running());
+    boolean verdict = answer.value() instanceof VerdictValue;
+    return new Outcome(
+        state.withAnswer(next, answer),
+        new Reply.Answer(
+            next.latest(), shown, answer.status().word(), verdict ? "" : answer.status().text()));
+  }
+
+  private gnomon.syntax.Spelling syntaxSpelling() {
+    return switch (settings.spelling()) {
+      case UNICODE -> gnomon.syntax.Spelling.UNICODE;
+      case ASCII -> gnomon.syntax.Spelling.ASCII;
+    };
+  }
+
+  private Reply why(State state, Statement.Why why) {
+    int latest = state.answers().size();
+    int number = why.handle().map(handle -> handle.number().orElse(latest)).orElse(latest);
+    if (number < 1 || number > latest) {
+      throw new DiagnosedException(
+          Diagnostic.of(
+              "name-no-result",
+              latest == 0 ? "there is no result yet" : "there is no result @" + number,
+              why.span()));
+    }
+    Answer answer = state.answers().get(number - 1);
+    Rendering rendering = ShownValue.rendering(settings.spelling(), state.scope().running());
+    return new Reply.Note(rendering.why(answer.derivation()).lines().toList());
+  }
+
+  private Reply help(Optional<String> topic, Span span) {
+    if (topic.isEmpty()) {
+      return new Reply.Note(Listing.words(help));
+    }
+    return help.page(topic.get())
+        .<Reply>map(Reply.Page::new)
+        .orElseThrow(
+            () ->
+                new DiagnosedException(
+                    Diagnostic.of("name-no-page", "there is no page for " + topic.get(), span)
+                        .withHint("help")));
+  }
+
+  private Outcome replayed(State state, Statement.Replay replay) {
+    List<Exchange> exchanges = new ArrayList<>();
+    State current = state;
+    for (var exchange : files.read(replay.file(), replay.span()).exchanges()) {
+      Outcome outcome = outcome(current, new Request(exchange.statement(), exchange.line()));
+      exchanges.add(new Exchange(exchange.line(), exchange.statement(), outcome.reply()));
+      current = outcome.state();
+      if (outcome.reply() instanceof Reply.Left) {
+        break;
+      }
+    }
+    return new Outcome(current, new Reply.Replayed(exchanges));
+  }
+
+  /// The value that a recorded answer means in a state, if it reads as an expression.
+  Optional<Value> reading(State state, String text) {
+    try {
+      Source source = new Source("recorded", text);
+      return StatementReader.read(source) instanceof Reading.Understood(Statement statement)
+              && statement instanceof Statement.ExpressionStatement(Expression expression, Span _)
+          ? Optional.of(interpreter.value(expression, state.scope()).value())
+          : Optional.empty();
+    } catch (DiagnosedException | LocatedRefusal | LocatedHalt unreadable) {
+      return Optional.empty();
+    }
+  }
+}
