@@ -26,7 +26,7 @@ PROMPTS = ("∟ ".encode(), b"_| ")
 
 def until_end(command):
     start = time.perf_counter()
-    subprocess.run(command, check=True, stdout=subprocess.DEVNULL, stdin=subprocess.DEVNULL)
+    subprocess.run(command, check=False, stdout=subprocess.DEVNULL, stdin=subprocess.DEVNULL)
     return time.perf_counter() - start
 
 

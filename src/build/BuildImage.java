@@ -1,11 +1,14 @@
 import java.io.IOException;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
 import java.nio.file.attribute.PosixFilePermissions;
+import java.time.Duration;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.concurrent.TimeUnit;
 import java.util.stream.Collectors;
 
 /// Puts the runnable image together: a Java runtime, the jars, ahead-of-time caches, the launcher.
@@ -14,6 +17,7 @@ import java.util.stream.Collectors;
 /// `TARGET/image-jars` holds the jars the program needs and `JAR` is its own. The image is
 /// `TARGET/gnomon`. The runtime is made again only when the JDK has changed.
 public final class BuildImage {
+  private static final String REHEARSAL = "src/build/rehearsal.gnomon";
   private static final String MODULES = "java.base,java.logging,jdk.unsupported";
 
   private final Path project;
@@ -42,8 +46,8 @@ public final class BuildImage {
     for (String text : List.of("LICENSE", "THIRD-PARTY.md")) {
       copy(project.resolve(text), image.resolve(text));
     }
-    rehearse("console", List.of("-XX:+UseSerialGC"), names);
-    rehearse("batch", List.of("-XX:+UseSerialGC", "-XX:TieredStopAtLevel=1"), names);
+    rehearse("batch", List.of("-XX:TieredStopAtLevel=1"), names, List.of("run", REHEARSAL));
+    rehearse("console", List.of(), names, List.of());
   }
 
   private void linkRuntime() throws IOException, InterruptedException {
@@ -56,7 +60,7 @@ public final class BuildImage {
     }
     delete(runtime);
     Files.createDirectories(image);
-    run(
+    List<String> command =
         List.of(
             Path.of(System.getProperty("java.home"), "bin", "jlink").toString(),
             "--add-modules",
@@ -65,7 +69,12 @@ public final class BuildImage {
             "--no-header-files",
             "--no-man-pages",
             "--output",
-            runtime.toString()));
+            runtime.toString());
+    Ended linking = run(command);
+    if (linking.status() != 0) {
+      System.err.println(linking.output());
+      System.exit(1);
+    }
     Files.writeString(stamp, jdk);
   }
 
@@ -97,35 +106,40 @@ public final class BuildImage {
     return names.stream().map(name -> home + "/lib/" + name).collect(Collectors.joining(":"));
   }
 
-  /// Runs the program once over typical work and keeps what it loaded and linked.
-  private void rehearse(String cache, List<String> tuning, List<String> names)
+  /// Runs the program once over typical work and keeps what it loaded and linked. Statements of the
+  /// rehearsal may fail, so their status does not count; without a cache gnomon only starts more
+  /// slowly.
+  private void rehearse(
+      String cache, List<String> tuning, List<String> names, List<String> arguments)
       throws IOException, InterruptedException {
+    Path file = image.resolve("lib").resolve(cache + ".aot");
     List<String> command = new ArrayList<>();
     command.add(image.resolve("runtime/bin/java").toString());
     command.addAll(tuning);
-    command.add("-XX:AOTCacheOutput=" + image.resolve("lib").resolve(cache + ".aot"));
-    command.add("-Xlog:disable");
-    command.add("-Xss4m");
-    command.add("--enable-native-access=ALL-UNNAMED");
+    command.addAll(List.of("-XX:+UseSerialGC", "-XX:AOTCacheOutput=" + file, "-Xlog:disable"));
+    command.addAll(List.of("-Xss4m", "--enable-native-access=ALL-UNNAMED"));
     command.add("--sun-misc-unsafe-memory-access=allow");
-    command.add("-cp");
-    command.add(classPath(image.toString(), names));
-    command.add("gnomon.launch.Rehearsal");
-    command.add(cache);
-    command.add(project.resolve("src/build/rehearsal.gnomon").toString());
-    run(command);
+    command.addAll(List.of("-cp", classPath(image.toString(), names), "gnomon.launch.Main"));
+    command.addAll(arguments);
+    String output = arguments.isEmpty() ? Typist.converse(command, lines()) : run(command).output();
+    if (!Files.exists(file)) {
+      System.err.println(output);
+      System.err.println("No " + cache + " cache was made; gnomon will start more slowly.");
+    }
   }
 
-  private static void run(List<String> command) throws IOException, InterruptedException {
-    Process process = new ProcessBuilder(command).redirectErrorStream(true).start();
+  private List<String> lines() throws IOException {
+    return Files.readAllLines(project.resolve(REHEARSAL));
+  }
+
+  private record Ended(int status, String output) {}
+
+  private Ended run(List<String> command) throws IOException, InterruptedException {
+    Process process =
+        new ProcessBuilder(command).directory(project.toFile()).redirectErrorStream(true).start();
     process.getOutputStream().close();
     String output = new String(process.getInputStream().readAllBytes());
-    int status = process.waitFor();
-    if (status != 0) {
-      System.err.println(String.join(" ", command));
-      System.err.println(output);
-      System.exit(1);
-    }
+    return new Ended(process.waitFor(), output);
   }
 
   private static void copy(Path from, Path to) throws IOException {
@@ -141,5 +155,89 @@ public final class BuildImage {
         Files.delete(file);
       }
     }
+  }
+}
+
+/// Types lines at a console that runs on a pseudo-terminal, where the system has the command
+/// `script` to make one; elsewhere the console gets a plain pipe.
+final class Typist {
+  private static final Duration PATIENCE = Duration.ofSeconds(10);
+  private static final String PROMPT = "∟";
+
+  private final Process console;
+  private final StringBuilder seen = new StringBuilder();
+
+  private Typist(Process console) {
+    this.console = console;
+  }
+
+  /// Types the lines, one at each prompt, then a completion and the end; answers with what was
+  /// shown.
+  static String converse(List<String> command, List<String> lines)
+      throws IOException, InterruptedException {
+    Path state = Files.createTempDirectory("gnomon-rehearsal");
+    ProcessBuilder builder = new ProcessBuilder(onTerminal(command)).redirectErrorStream(true);
+    builder.environment().put("XDG_STATE_HOME", state.toString());
+    builder.environment().put("TERM", "xterm-256color");
+    builder.environment().put("LC_ALL", "C.UTF-8");
+    Typist typist = new Typist(builder.start());
+    Thread.ofPlatform().daemon().start(typist::watch);
+    for (String line : lines) {
+      typist.type(line + "\r");
+    }
+    typist.type("Del\t\u0003");
+    typist.type("leave\r");
+    if (!typist.console.waitFor(2, TimeUnit.MINUTES)) {
+      typist.console.destroy();
+    }
+    return typist.shown();
+  }
+
+  private static List<String> onTerminal(List<String> command) {
+    boolean linux = System.getProperty("os.name").equals("Linux");
+    if (!linux || !Files.isExecutable(Path.of("/usr/bin/script"))) {
+      return command;
+    }
+    String line =
+        command.stream()
+            .map(word -> "'" + word.replace("'", "'\\''") + "'")
+            .collect(Collectors.joining(" "));
+    return List.of("/usr/bin/script", "-qec", "stty rows 30 cols 100; " + line, "/dev/null");
+  }
+
+  private void type(String keys) throws IOException, InterruptedException {
+    awaitPrompt();
+    console.getOutputStream().write(keys.getBytes(StandardCharsets.UTF_8));
+    console.getOutputStream().flush();
+  }
+
+  private synchronized void awaitPrompt() throws InterruptedException {
+    long end = System.nanoTime() + PATIENCE.toNanos();
+    while (seen.indexOf(PROMPT) < 0 && System.nanoTime() < end) {
+      wait(100);
+    }
+    // What is drawn again after a key is let pass before the next line.
+    wait(50);
+    seen.setLength(0);
+  }
+
+  private void watch() {
+    try (var reader = console.inputReader(StandardCharsets.UTF_8)) {
+      char[] some = new char[4096];
+      for (int count = reader.read(some); count >= 0; count = reader.read(some)) {
+        see(new String(some, 0, count));
+      }
+    } catch (IOException over) {
+      see("");
+    }
+  }
+
+  private synchronized void see(String text) {
+    seen.append(text);
+    notifyAll();
+  }
+
+  private synchronized String shown() {
+    return seen.toString();
   }
 }

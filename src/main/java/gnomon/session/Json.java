@@ -3,30 +3,38 @@ package gnomon.session;
 import java.util.StringJoiner;
 
 /// Builds one JSON object on a single line (RFC 8259), fields in the order they are added.
-final class Json {
+public final class Json {
   private final StringJoiner fields = new StringJoiner(",", "{", "}");
 
-  Json with(String name, String value) {
+  /// An object without fields.
+  public Json() {}
+
+  /// Adds a text.
+  public Json with(String name, String value) {
     fields.add(quoted(name) + ":" + quoted(value));
     return this;
   }
 
-  Json with(String name, long value) {
+  /// Adds a number.
+  public Json with(String name, long value) {
     fields.add(quoted(name) + ":" + value);
     return this;
   }
 
-  Json withNull(String name) {
+  /// Adds a field without a value.
+  public Json withNull(String name) {
     fields.add(quoted(name) + ":null");
     return this;
   }
 
-  Json with(String name, Json object) {
+  /// Adds an object.
+  public Json with(String name, Json object) {
     fields.add(quoted(name) + ":" + object.text());
     return this;
   }
 
-  String text() {
+  /// The object as text without line breaks.
+  public String text() {
     return fields.toString();
   }
 

@@ -25,8 +25,7 @@ class FractionalDivisionTest {
   void aDivisorWithFinerExponentsThanTheDividendIsDivided() {
     Polynomial one = Polynomial.ONE;
     Polynomial dividend = power(1, 1).minus(one);
-    assertEquals(
-        Optional.of(power(1, 2).minus(one)), dividend.tryDividedBy(power(1, 2).plus(one)));
+    assertEquals(Optional.of(power(1, 2).minus(one)), dividend.tryDividedBy(power(1, 2).plus(one)));
     assertEquals(List.of(), dividend.tryDividedBy(power(1, 3).plus(one)).stream().toList());
   }
 }
