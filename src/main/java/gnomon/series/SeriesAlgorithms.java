@@ -81,7 +81,7 @@ final class SeriesAlgorithms {
     List<T> result = zeros(field, length);
     int blocks = Math.ceilDiv(Math.min(outer.size(), length), step);
     for (int block = blocks - 1; block >= 0; block--) {
-      result = field.product(result, giant, length);
+      result = new ArrayList<>(field.product(result, giant, length));
       for (int n = 0; n < length; n++) {
         Budget.checkpoint();
         List<T> parts = new ArrayList<>();
