@@ -85,11 +85,11 @@ public final class Console {
   private boolean answerAll(String text) {
     for (String statement : Statements.split(text)) {
       switch (new Evaluation(session, terminal, look).answer(statement)) {
-        case Evaluation.Outcome.Answered(Reply.Left _, boolean _) -> {
+        case Evaluation.Outcome.Answered(Reply.Left _, var _, boolean _) -> {
           return false;
         }
-        case Evaluation.Outcome.Answered(Reply reply, boolean stopped) -> {
-          say(new Printed(look, Look.width(terminal)).lines(reply));
+        case Evaluation.Outcome.Answered(Reply _, var lines, boolean stopped) -> {
+          say(lines);
           if (stopped) {
             return true;
           }
@@ -99,7 +99,7 @@ public final class Console {
           return true;
         }
         case Evaluation.Outcome.Broken(Throwable fault) ->
-            say("A fault of the program itself: " + fault + ". The definitions are as they were.");
+            say("A fault of the program itself: " + fault + ". The session goes on.");
       }
     }
     return true;
@@ -120,7 +120,7 @@ public final class Console {
   /// Evaluates a statement again without showing the answer; whether it was accepted.
   boolean restore(String statement) {
     return new Evaluation(session, terminal, look).answer(statement)
-            instanceof Evaluation.Outcome.Answered(Reply reply, boolean stopped)
+            instanceof Evaluation.Outcome.Answered(Reply reply, var _, boolean stopped)
         && !stopped
         && reply.isAccepted();
   }

@@ -3,10 +3,12 @@ package gnomon.console;
 import gnomon.session.Reply;
 import gnomon.session.Session;
 import java.time.Duration;
+import java.util.List;
 import java.util.concurrent.BlockingQueue;
 import java.util.concurrent.LinkedBlockingQueue;
 import java.util.concurrent.TimeUnit;
 import org.jline.terminal.Terminal;
+import org.jline.utils.AttributedString;
 import org.jspecify.annotations.Nullable;
 
 /// Has the session answer a statement in a thread of its own, so that the person can stop it.
@@ -23,17 +25,21 @@ final class Evaluation {
   private final Session session;
   private final Terminal terminal;
   private final Look look;
+  private final Printed printed;
 
   Evaluation(Session session, Terminal terminal, Look look) {
     this.session = session;
     this.terminal = terminal;
     this.look = look;
+    this.printed = new Printed(look, Look.width(terminal));
   }
 
   /// How a statement ended.
   sealed interface Outcome {
-    /// The session replied; `stopped` says that the person had asked it to stop.
-    record Answered(Reply reply, boolean stopped) implements Outcome {}
+    /// The session replied, and these lines show it; `stopped` says that the person had asked it to
+    /// stop.
+    record Answered(Reply reply, List<AttributedString> lines, boolean stopped)
+        implements Outcome {}
 
     /// The person stopped a computation that did not heed it in time.
     record GivenUp() implements Outcome {}
@@ -70,7 +76,8 @@ final class Evaluation {
 
   private Outcome reply(String statement) {
     try {
-      return new Outcome.Answered(session.submit(statement), false);
+      Reply reply = session.submit(statement);
+      return new Outcome.Answered(reply, printed.lines(reply), false);
     } catch (RuntimeException | StackOverflowError | OutOfMemoryError fault) {
       return new Outcome.Broken(fault);
     }
@@ -83,8 +90,8 @@ final class Evaluation {
     while (true) {
       Duration elapsed = Duration.ofNanos(System.nanoTime() - start);
       switch (next(events, elapsed.compareTo(QUIET) < 0 ? QUIET.minus(elapsed) : PULSE)) {
-        case Event.Ended(Outcome.Answered(Reply reply, boolean _)) -> {
-          return new Outcome.Answered(reply, stopping);
+        case Event.Ended(Outcome.Answered(Reply reply, var lines, boolean _)) -> {
+          return new Outcome.Answered(reply, lines, stopping);
         }
         case Event.Ended(Outcome other) -> {
           return other;

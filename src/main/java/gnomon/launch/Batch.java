@@ -1,10 +1,11 @@
 package gnomon.launch;
 
+import gnomon.session.Exchange;
 import gnomon.session.Reply;
 import gnomon.session.ReplyText;
 import gnomon.session.Request;
+import gnomon.session.Run;
 import gnomon.session.Session;
-import gnomon.session.Spelling;
 import java.io.BufferedReader;
 import java.io.IOException;
 import java.io.PrintStream;
@@ -37,8 +38,10 @@ record Batch(Session session, PrintStream out, boolean json) {
         }
         case StatementFeed.Stretch.Statement(String text, int line) -> {
           Request request = new Request(text, line);
-          Reply reply = deadline.answer(request);
-          print(request, reply);
+          Deadline.Told told = deadline.answer(request, reply -> text(request, reply));
+          out.print(told.text());
+          out.flush();
+          Reply reply = told.reply();
           status = reply.isAccepted() ? status : ExitStatus.SOME_FAILED;
           if (reply instanceof Reply.Left) {
             return status;
@@ -48,17 +51,16 @@ record Batch(Session session, PrintStream out, boolean json) {
     }
   }
 
-  private void print(Request request, Reply reply) {
-    List<String> lines = new ArrayList<>();
+  private String text(Request request, Reply reply) {
+    Exchange exchange = new Exchange(request.line(), request.text(), reply);
+    List<String> answers = ReplyText.lines(reply, session.settings().spelling());
     if (json) {
-      lines.add(new JsonAnswer(request, reply).line());
-    } else {
-      lines.addAll(request.text().lines().toList());
-      for (String answer : ReplyText.lines(reply, Spelling.UNICODE)) {
-        lines.add(answer.isEmpty() ? "|" : "| " + answer);
-      }
+      return new Run.Done(exchange, answers).json() + "\n";
     }
-    out.print(String.join("\n", lines) + "\n");
-    out.flush();
+    List<String> lines = new ArrayList<>(request.text().lines().toList());
+    for (String answer : answers) {
+      lines.add(answer.isEmpty() ? "|" : "| " + answer);
+    }
+    return String.join("\n", lines) + "\n";
   }
 }

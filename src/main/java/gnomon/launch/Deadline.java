@@ -12,6 +12,7 @@ import java.util.concurrent.CompletableFuture;
 import java.util.concurrent.ExecutionException;
 import java.util.concurrent.TimeUnit;
 import java.util.concurrent.TimeoutException;
+import java.util.function.Function;
 
 /// Has a session answer a statement in a thread of its own, with room for deep nesting.
 ///
@@ -22,44 +23,52 @@ record Deadline(Session session) {
   private static final Duration GRACE = Duration.ofSeconds(2);
   private static final long STACK = 512L << 20;
 
-  /// The answer, in bounded time if the session has a limit of time.
-  Reply answer(Request request) {
-    CompletableFuture<Reply> reply = new CompletableFuture<>();
+  /// A reply with the text made of it.
+  record Told(Reply reply, String text) {}
+
+  /// The answer, in bounded time if the session has a limit of time. `tell` makes the text of it,
+  /// in the same thread.
+  Told answer(Request request, Function<Reply, String> tell) {
+    CompletableFuture<Told> told = new CompletableFuture<>();
     Thread thread =
         Thread.ofPlatform()
             .daemon()
             .name("evaluation")
             .stackSize(STACK)
-            .start(() -> complete(reply, request));
+            .start(() -> complete(told, request, tell));
     Optional<Duration> limit = session.settings().limits().time();
     try {
       return limit.isEmpty()
-          ? reply.get()
-          : reply.get(limit.get().plus(GRACE).toMillis(), TimeUnit.MILLISECONDS);
+          ? told.get()
+          : told.get(limit.get().plus(GRACE).toMillis(), TimeUnit.MILLISECONDS);
     } catch (TimeoutException late) {
       session.cancel();
       session.abandon();
       thread.setPriority(Thread.MIN_PRIORITY);
-      return failure("limit-time", "the limit of time for one statement is reached", request);
+      return failed("limit-time", "the limit of time for one statement is reached", request, tell);
     } catch (InterruptedException stopped) {
       Thread.currentThread().interrupt();
-      return failure("limit-cancelled", "the computation was stopped", request);
+      return failed("limit-cancelled", "the computation was stopped", request, tell);
     } catch (ExecutionException broken) {
-      return failure("internal-fault", "a fault of the program itself", request);
+      return failed("internal-fault", "a fault of the program itself", request, tell);
     }
   }
 
-  private void complete(CompletableFuture<Reply> reply, Request request) {
+  private void complete(
+      CompletableFuture<Told> told, Request request, Function<Reply, String> tell) {
     try {
-      reply.complete(session.submit(request));
+      Reply reply = session.submit(request);
+      told.complete(new Told(reply, tell.apply(reply)));
     } catch (RuntimeException | StackOverflowError | OutOfMemoryError fault) {
-      reply.completeExceptionally(fault);
+      told.completeExceptionally(fault);
     }
   }
 
-  private static Reply failure(String code, String message, Request request) {
+  private static Told failed(
+      String code, String message, Request request, Function<Reply, String> tell) {
     Span all = new Span(0, request.text().length());
     Source source = new Source("input", request.text(), request.line());
-    return new Reply.Failure(Diagnostic.of(code, message, all), source);
+    Reply failure = new Reply.Failure(Diagnostic.of(code, message, all), source);
+    return new Told(failure, tell.apply(failure));
   }
 }

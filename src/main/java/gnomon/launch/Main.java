@@ -1,6 +1,9 @@
 package gnomon.launch;
 
 import gnomon.console.Console;
+import gnomon.session.JunitReport;
+import gnomon.session.Recheck;
+import gnomon.session.RecheckReport;
 import gnomon.session.Session;
 import gnomon.session.Settings;
 import java.io.BufferedOutputStream;
@@ -18,7 +21,9 @@ import java.nio.file.FileSystemException;
 import java.nio.file.Files;
 import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import org.jline.terminal.Size;
 import org.jline.terminal.Terminal;
 import org.jline.terminal.TerminalBuilder;
@@ -57,7 +62,7 @@ public final class Main {
       return switch (command) {
         case Command.OpenConsole(boolean ascii) -> converse(ascii);
         case Command.Run(String file, boolean json) -> run(file, json);
-        case Command.Recheck recheck -> throw new IOException(recheck.toString());
+        case Command.Recheck(List<String> files, Optional<String> report) -> recheck(files, report);
         case Command.ShowUsage _ -> print(USAGE);
         case Command.ShowVersion _ -> print("gnomon " + VERSION + "\n");
         case Command.Misused(String reason) -> {
@@ -103,6 +108,31 @@ public final class Main {
       Session session = Session.of(Settings.batch().withFolder(folder));
       return new Batch(session, out, json).answer(input);
     }
+  }
+
+  private static ExitStatus recheck(List<String> files, Optional<String> report)
+      throws IOException {
+    ExitStatus status = ExitStatus.FINE;
+    List<Recheck.Input> inputs = new ArrayList<>();
+    for (String file : files) {
+      try {
+        inputs.add(new Recheck.Input(Path.of(file), Files.readString(Path.of(file))));
+      } catch (IOException unreadable) {
+        complain(wording(unreadable) + "\n");
+        status = ExitStatus.FILE;
+      }
+    }
+    int workers = Runtime.getRuntime().availableProcessors();
+    List<RecheckReport> reports = Recheck.checkAll(inputs, Settings.batch(), workers);
+    for (RecheckReport each : reports) {
+      each.lines().forEach(line -> print(line + "\n"));
+      status = status.worse(each.isGood() ? ExitStatus.FINE : ExitStatus.SOME_FAILED);
+    }
+    print(RecheckReport.summary(reports) + "\n");
+    if (report.isPresent()) {
+      Files.writeString(Path.of(report.get()), JunitReport.xml(reports));
+    }
+    return status;
   }
 
   private static BufferedReader standardInput() {

@@ -3,38 +3,30 @@ package gnomon.session;
 import java.util.StringJoiner;
 
 /// Builds one JSON object on a single line (RFC 8259), fields in the order they are added.
-public final class Json {
+final class Json {
   private final StringJoiner fields = new StringJoiner(",", "{", "}");
 
-  /// An object without fields.
-  public Json() {}
-
-  /// Adds a text.
-  public Json with(String name, String value) {
+  Json with(String name, String value) {
     fields.add(quoted(name) + ":" + quoted(value));
     return this;
   }
 
-  /// Adds a number.
-  public Json with(String name, long value) {
+  Json with(String name, long value) {
     fields.add(quoted(name) + ":" + value);
     return this;
   }
 
-  /// Adds a field without a value.
-  public Json withNull(String name) {
+  Json withNull(String name) {
     fields.add(quoted(name) + ":null");
     return this;
   }
 
-  /// Adds an object.
-  public Json with(String name, Json object) {
+  Json with(String name, Json object) {
     fields.add(quoted(name) + ":" + object.text());
     return this;
   }
 
-  /// The object as text without line breaks.
-  public String text() {
+  String text() {
     return fields.toString();
   }
 
