@@ -1,10 +1,13 @@
 package gnomon.evaluate;
 
 import gnomon.form.Form;
+import gnomon.form.Generator;
+import gnomon.number.Rational;
 import gnomon.summation.Condition;
 import gnomon.summation.FunctionClass;
 import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
 import java.util.stream.Collectors;
 
 /// The side conditions of an answer in the words of the status line. Forms in them are simple
@@ -22,11 +25,23 @@ final class Conditions {
   private static String words(Condition condition) {
     String subject = text(condition.subject());
     return switch (condition.relation()) {
-      case NOT_ZERO -> subject + " != 0";
+      case NOT_ZERO -> compared(condition.subject(), " != ");
       case INTEGER -> "integer " + subject;
-      case NATURAL -> subject + " >= 0";
+      case NATURAL -> compared(condition.subject(), " >= ");
       case NOT_IN_RANGE -> subject + " outside the range";
     };
+  }
+
+  /// The subject compared with zero; of the shape v + c the variable v with −c.
+  private static String compared(Form subject, String relation) {
+    if (subject.variables().size() == 1) {
+      Form variable = Form.of(subject.variables().first());
+      Optional<Rational> constant = variable.minus(subject).asRational();
+      if (constant.isPresent()) {
+        return text(variable) + relation + constant.get();
+      }
+    }
+    return text(subject) + relation + "0";
   }
 
   static String words(FunctionClass kind) {
@@ -34,6 +49,6 @@ final class Conditions {
   }
 
   private static String text(Form form) {
-    return form.key();
+    return form.asGenerator().map(Generator::key).orElseGet(form::key);
   }
 }

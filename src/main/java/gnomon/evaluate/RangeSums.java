@@ -87,6 +87,7 @@ final class RangeSums {
     }
     evaluation.status(status(sum));
     sum.antidifference().ifPresent(found -> record(found, body, sum.value(), limits, scope));
+    sum.recurrence().ifPresent(found -> new RecurrenceSteps(evaluation, k).record(found));
     return Sorts.of(sum.value(), scope);
   }
 
@@ -99,6 +100,9 @@ final class RangeSums {
           Status.of(Status.Kind.NO_CLOSED_FORM)
               .withDetail(
                   sum.absentWithin().map(kind -> "among " + Conditions.words(kind)).orElse(""));
+      case RECURRENCE ->
+          Status.of(Status.Kind.RECURRENCE)
+              .withDetail("of order " + sum.recurrence().orElseThrow().order() + ", see why");
       case LEFT_STANDING -> Status.of(Status.Kind.LEFT_AS_SUM);
     };
   }

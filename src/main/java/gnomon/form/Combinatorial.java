@@ -6,6 +6,7 @@ import gnomon.algebra.Refusal;
 import gnomon.number.Integers;
 import gnomon.number.Rational;
 import gnomon.polynomial.Term;
+import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -13,7 +14,7 @@ import java.util.Optional;
 /// Factorials, binomial coefficients, falling and rising powers and harmonic numbers.
 ///
 /// Normalised so that (u+1)! = (u+1) u! and H(u+1) = H(u) + 1/(u+1) hold by equality, and so that
-/// half-integers are written by the duplication formula: (u + 1/2)! through (2u+1)! and u!.
+/// the factorials of u, u + 1/m, …, u + (m−1)/m are written through m − 1 of them and (mu+m−1)!.
 public final class Combinatorial {
   private Combinatorial() {}
 
@@ -33,7 +34,8 @@ public final class Combinatorial {
     }
     Split split = Split.of(u);
     Form reduced = u.minus(Form.of(split.whole()));
-    Form kernel = split.fraction().equals(Rational.HALF) ? half(reduced) : kernel(reduced);
+    int parts = lastPart(split.fraction());
+    Form kernel = parts > 0 ? multiplied(reduced, parts) : kernel(reduced);
     return kernel.times(steps(reduced, split.whole()));
   }
 
@@ -41,12 +43,28 @@ public final class Combinatorial {
     return Form.of(new Factorial(reduced));
   }
 
-  /// (L + 1/2)! = (2L+1)! √π / (2^(2L+1) L!), the duplication formula of the gamma function.
-  private static Form half(Form reduced) {
-    Form l = reduced.minus(Form.HALF);
-    Form odd = l.times(Form.TWO).plus(Form.ONE);
-    Form top = factorial(odd).times(Elementary.sqrt(Form.PI));
-    return top.dividedBy(Elementary.power(Form.TWO, odd).times(factorial(l)));
+  /// The m for a fraction (m−1)/m with 2 ≤ m ≤ 12, otherwise 0.
+  private static int lastPart(Rational fraction) {
+    Rational rest = Rational.ONE.minus(fraction);
+    boolean last = !fraction.isZero() && rest.numerator().equals(BigInteger.ONE);
+    return last && rest.denominator().bitLength() < 4 ? rest.denominator().intValue() : 0;
+  }
+
+  /// (L + (m−1)/m)! by Gauss's multiplication formula, L! (L+1/m)! … (L+(m−1)/m)! = (2π)^((m−1)/2)
+  /// m^(1/2−m(L+1)) (mL+m−1)!, which is Legendre's duplication formula for m = 2.
+  ///
+  /// Source: DLMF (5.5.6), from memory.
+  private static Form multiplied(Form reduced, int m) {
+    Form l = reduced.minus(Form.of(Rational.of(m - 1, m)));
+    Form times = Form.of(m).times(l.plus(Form.ONE));
+    Form top = factorial(times.minus(Form.ONE));
+    Form circle = Elementary.power(Form.PI.times(Form.TWO), Form.of(Rational.of(m - 1, 2)));
+    Form scale = Elementary.power(Form.of(m), Form.HALF.minus(times));
+    Form bottom = Form.ONE;
+    for (int j = 0; j < m - 1; j++) {
+      bottom = bottom.times(factorial(l.plus(Form.of(Rational.of(j, m)))));
+    }
+    return top.times(circle).times(scale).dividedBy(bottom);
   }
 
   /// (reduced + whole)!/reduced!, a product of linear factors or its reciprocal.

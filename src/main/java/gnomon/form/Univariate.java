@@ -6,10 +6,10 @@ import java.util.List;
 
 /// A polynomial in one variable over the field of forms, coefficients ascending, without leading
 /// zeros.
-record Univariate(List<Form> coefficients) {
-  static final Univariate ZERO = new Univariate(List.of());
+public record Univariate(List<Form> coefficients) {
+  public static final Univariate ZERO = new Univariate(List.of());
 
-  Univariate {
+  public Univariate {
     int size = coefficients.size();
     while (size > 0 && coefficients.get(size - 1).isZero()) {
       size--;
@@ -17,27 +17,27 @@ record Univariate(List<Form> coefficients) {
     coefficients = List.copyOf(coefficients.subList(0, size));
   }
 
-  static Univariate constant(Form value) {
+  public static Univariate constant(Form value) {
     return new Univariate(List.of(value));
   }
 
-  int degree() {
+  public int degree() {
     return coefficients.size() - 1;
   }
 
-  boolean isZero() {
+  public boolean isZero() {
     return coefficients.isEmpty();
   }
 
-  Form coefficient(int index) {
+  public Form coefficient(int index) {
     return index < coefficients.size() ? coefficients.get(index) : Form.ZERO;
   }
 
-  Form leading() {
+  public Form leading() {
     return coefficients.getLast();
   }
 
-  Univariate minus(Univariate that) {
+  public Univariate minus(Univariate that) {
     List<Form> sum = new ArrayList<>();
     for (int i = 0; i < Math.max(coefficients.size(), that.coefficients.size()); i++) {
       sum.add(coefficient(i).minus(that.coefficient(i)));
@@ -45,7 +45,7 @@ record Univariate(List<Form> coefficients) {
     return new Univariate(sum);
   }
 
-  Univariate times(Univariate that) {
+  public Univariate times(Univariate that) {
     if (isZero() || that.isZero()) {
       return ZERO;
     }
@@ -61,7 +61,7 @@ record Univariate(List<Form> coefficients) {
     return new Univariate(product);
   }
 
-  Univariate power(int exponent) {
+  public Univariate power(int exponent) {
     Univariate result = constant(Form.ONE);
     for (int i = 0; i < exponent; i++) {
       result = result.times(this);
@@ -70,9 +70,9 @@ record Univariate(List<Form> coefficients) {
   }
 
   /// Quotient and remainder.
-  record Division(Univariate quotient, Univariate remainder) {}
+  public record Division(Univariate quotient, Univariate remainder) {}
 
-  Division dividedBy(Univariate divisor) {
+  public Division dividedBy(Univariate divisor) {
     List<Form> rest = new ArrayList<>(coefficients);
     List<Form> quotient = new ArrayList<>();
     Form scale = divisor.leading().inverse();
@@ -89,7 +89,7 @@ record Univariate(List<Form> coefficients) {
   }
 
   /// The inverse of this polynomial modulo a coprime one.
-  Univariate inverseModulo(Univariate modulus) {
+  public Univariate inverseModulo(Univariate modulus) {
     Univariate a = modulus;
     Univariate b = dividedBy(modulus).remainder();
     Univariate s = ZERO;

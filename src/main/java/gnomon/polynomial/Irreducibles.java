@@ -81,8 +81,7 @@ final class Irreducibles {
 
   /// Whether the polynomial in `main` alone, got by setting all others to integers from `start`, is
   /// square-free of the same degree and irreducible.
-  private static boolean imageIsIrreducible(
-      Polynomial polynomial, Indeterminate main, int start) {
+  private static boolean imageIsIrreducible(Polynomial polynomial, Indeterminate main, int start) {
     Polynomial image = polynomial;
     int value = start;
     for (Indeterminate other : polynomial.indeterminates()) {

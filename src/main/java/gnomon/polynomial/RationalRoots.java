@@ -22,8 +22,7 @@ final class RationalRoots {
       prime = DegreePatterns.primeAbove(prime);
       long[] image = Residues.reduce(polynomial, prime);
       long[] derivative = Residues.derivative(image, prime);
-      if (image.length < polynomial.length
-          || Residues.gcd(image, derivative, prime).length != 1) {
+      if (image.length < polynomial.length || Residues.gcd(image, derivative, prime).length != 1) {
         continue;
       }
       List<Long> roots = roots(image, prime);
@@ -70,10 +69,7 @@ final class RationalRoots {
       BigInteger error = evaluate(polynomial, value, modulus);
       value = value.subtract(error.multiply(inverse)).mod(modulus);
       BigInteger slope = evaluate(derivative, value, modulus);
-      inverse =
-          inverse
-              .multiply(BigInteger.TWO.subtract(slope.multiply(inverse)))
-              .mod(modulus);
+      inverse = inverse.multiply(BigInteger.TWO.subtract(slope.multiply(inverse))).mod(modulus);
     }
     BigInteger numerator = value.multiply(lead).mod(modulus);
     if (numerator.compareTo(modulus.shiftRight(1)) > 0) {

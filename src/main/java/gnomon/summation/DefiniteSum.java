@@ -12,12 +12,14 @@ import java.util.Optional;
 /// @param antidifference the verified antidifference in the variable of summation behind a closed
 ///   form, where one was used
 /// @param absentWithin the class in which a closed form is proved not to exist, where it is
+/// @param recurrence a recurrence of the sum in a variable of its ends, where one was found
 public record DefiniteSum(
     Form value,
     Status status,
     List<Condition> conditions,
     Optional<Form> antidifference,
-    Optional<FunctionClass> absentWithin) {
+    Optional<FunctionClass> absentWithin,
+    Optional<SumRecurrence> recurrence) {
 
   /// How the value is known.
   public enum Status {
@@ -25,6 +27,8 @@ public record DefiniteSum(
     TERM_BY_TERM,
     /// A closed form with symbolic ends, or one that spares the single terms.
     CLOSED_FORM,
+    /// No closed form was found, but a recurrence; the value is the sum as it stands.
+    RECURRENCE,
     /// No antidifference exists in a stated class; the value is the sum as it stands.
     NO_CLOSED_FORM,
     /// No closed form was found; the value is the sum or product as it stands.
@@ -37,26 +41,71 @@ public record DefiniteSum(
 
   static DefiniteSum termByTerm(Form value) {
     return new DefiniteSum(
-        value, Status.TERM_BY_TERM, List.of(), Optional.empty(), Optional.empty());
+        value,
+        Status.TERM_BY_TERM,
+        List.of(),
+        Optional.empty(),
+        Optional.empty(),
+        Optional.empty());
   }
 
   static DefiniteSum closed(Form value, List<Condition> conditions, Form antidifference) {
     return new DefiniteSum(
-        value, Status.CLOSED_FORM, conditions, Optional.of(antidifference), Optional.empty());
+        value,
+        Status.CLOSED_FORM,
+        conditions,
+        Optional.of(antidifference),
+        Optional.empty(),
+        Optional.empty());
   }
 
   static DefiniteSum closed(Form value, List<Condition> conditions) {
     return new DefiniteSum(
-        value, Status.CLOSED_FORM, conditions, Optional.empty(), Optional.empty());
+        value,
+        Status.CLOSED_FORM,
+        conditions,
+        Optional.empty(),
+        Optional.empty(),
+        Optional.empty());
   }
 
   static DefiniteSum standing(Form value) {
     return new DefiniteSum(
-        value, Status.LEFT_STANDING, List.of(), Optional.empty(), Optional.empty());
+        value,
+        Status.LEFT_STANDING,
+        List.of(),
+        Optional.empty(),
+        Optional.empty(),
+        Optional.empty());
   }
 
   static DefiniteSum absent(Form value, FunctionClass within) {
     return new DefiniteSum(
-        value, Status.NO_CLOSED_FORM, List.of(), Optional.empty(), Optional.of(within));
+        value,
+        Status.NO_CLOSED_FORM,
+        List.of(),
+        Optional.empty(),
+        Optional.of(within),
+        Optional.empty());
+  }
+
+  static DefiniteSum recurrent(Form value, SumRecurrence recurrence) {
+    return new DefiniteSum(
+        value,
+        Status.RECURRENCE,
+        List.of(),
+        Optional.empty(),
+        Optional.empty(),
+        Optional.of(recurrence));
+  }
+
+  static DefiniteSum telescoped(Form value, List<Condition> conditions, SumRecurrence recurrence) {
+    return new DefiniteSum(
+        value,
+        Status.CLOSED_FORM,
+        conditions,
+        Optional.empty(),
+        Optional.empty(),
+        Optional.of(recurrence));
   }
 }

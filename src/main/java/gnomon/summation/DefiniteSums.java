@@ -40,6 +40,11 @@ public final class DefiniteSums {
     if (length.isPresent()) {
       return counted(summand, k, a, b, length.get());
     }
+    if (span.variables().stream().anyMatch(summand::dependsOn)) {
+      Form reversed = summand.substitute(k, a.plus(b).minus(Form.of(k)));
+      boolean free = span.variables().stream().noneMatch(reversed::dependsOn);
+      return free ? sum(reversed, k, a, b) : new EntangledSums(engine).sum(summand, k, a, b);
+    }
     if (a.asRational().isPresent()) {
       Form fromZero = summand.substitute(k, Form.of(k).plus(a));
       return symbolic(fromZero, k, span, summand, a, b);
@@ -120,11 +125,11 @@ public final class DefiniteSums {
     };
   }
 
-  private static Form telescoped(Form antidifference, Variable k, Form from, Form to) {
+  static Form telescoped(Form antidifference, Variable k, Form from, Form to) {
     return antidifference.substitute(k, to).minus(antidifference.substitute(k, from));
   }
 
-  private static Form standing(Form f, Variable k, Form a, Form b) {
+  static Form standing(Form f, Variable k, Form a, Form b) {
     return Accumulation.of(Accumulation.Kind.SUM, k, a, b, f);
   }
 

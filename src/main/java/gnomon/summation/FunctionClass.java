@@ -10,6 +10,8 @@ public enum FunctionClass {
   RATIONAL,
   /// Rational functions together with harmonic numbers H(x + c, r) with constant coefficients.
   RATIONAL_WITH_HARMONIC_NUMBERS,
+  /// Terms whose ratio t(x+1)/t(x) is a rational function of x.
+  HYPERGEOMETRIC,
   /// Sums of functions of the classes above, each summed on its own.
   MIXED
 }

@@ -28,9 +28,12 @@ public final class SummationEngine implements Summation {
     this.solvers = List.copyOf(solvers);
   }
 
-  /// The engine for polynomials, polynomials times exponentials, and rational functions.
+  /// The engine for polynomials, polynomials times exponentials, rational functions and
+  /// hypergeometric terms.
   public static SummationEngine standard() {
-    return new SummationEngine(List.of(new ExponentialPolynomialSolver(), new RationalSolver()));
+    return new SummationEngine(
+        List.of(
+            new ExponentialPolynomialSolver(), new RationalSolver(), new HypergeometricSolver()));
   }
 
   /// The outcome of [#search] as operators ask for it.
