@@ -33,7 +33,7 @@ final class Attempt {
     List<CommonToken> marked = new ArrayList<>(Marking.of(tokens));
     marked.add(end(text));
     try {
-      return new Reading.Understood(build(text, parse(marked)));
+      return new Reading.Understood(build(text, marked));
     } catch (Unexpected unexpected) {
       return unfinished.isPresent() && unexpected.token().getType() == Token.EOF
           ? new Reading.Unfinished(unfinished.get())
@@ -51,9 +51,11 @@ final class Attempt {
     return parser.statement();
   }
 
-  private static Statement build(String text, GnomonParser.StatementContext context) {
-    Statement statement = new StatementBuilder(text).statement(context);
-    if (Parts.height(Parts.of(statement), Limits.HEIGHT) > Limits.HEIGHT) {
+  /// Every part of a tree has a token of its own, so that few tokens need no look at the height.
+  private static Statement build(String text, List<CommonToken> tokens) {
+    Statement statement = new StatementBuilder(text).statement(parse(tokens));
+    if (tokens.size() > Limits.HEIGHT
+        && Parts.height(Parts.of(statement), Limits.HEIGHT) > Limits.HEIGHT) {
       throw new Mistakes(text).tooDeep(statement.span());
     }
     return statement;

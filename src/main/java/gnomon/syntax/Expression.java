@@ -23,9 +23,11 @@ public sealed interface Expression {
       if (numerator.signum() < 0 || denominator.signum() <= 0) {
         throw new IllegalArgumentException(numerator + "/" + denominator);
       }
-      BigInteger common = numerator.gcd(denominator);
-      numerator = numerator.divide(common);
-      denominator = denominator.divide(common);
+      if (!denominator.equals(BigInteger.ONE)) {
+        BigInteger common = numerator.gcd(denominator);
+        numerator = numerator.divide(common);
+        denominator = denominator.divide(common);
+      }
     }
 
     /// Whether it was written without a fractional part other than zeros.

@@ -13,7 +13,6 @@ import gnomon.syntax.Expression.Suffixed;
 import gnomon.syntax.Expression.Sum;
 import gnomon.syntax.Expression.Summand;
 import gnomon.syntax.grammar.GnomonParser;
-import java.math.BigDecimal;
 import java.math.BigInteger;
 import java.text.Normalizer;
 import java.util.ArrayList;
@@ -28,6 +27,8 @@ import org.antlr.v4.runtime.tree.TerminalNode;
 /// Parse trees of expressions to our own. Recursion follows brackets only, whose depth has been
 /// checked; rows and chains of any length are loops.
 final class ExpressionBuilder {
+  private static final char FIRST_MARK = '\u0300';
+
   private final Mistakes mistakes;
   private final TermBuilder terms;
 
@@ -114,11 +115,10 @@ final class ExpressionBuilder {
     List<Summand> summands = new ArrayList<>();
     boolean subtracted = false;
     for (ParseTree child : context.children) {
-      switch (child) {
-        case GnomonParser.TermContext term ->
-            summands.add(new Summand(subtracted, terms.term(term)));
-        case TerminalNode sign -> subtracted = isMinus(sign.getSymbol());
-        default -> throw new IllegalStateException("in a sum: " + child.getText());
+      if (child instanceof GnomonParser.TermContext term) {
+        summands.add(new Summand(subtracted, terms.term(term)));
+      } else {
+        subtracted = isMinus(((TerminalNode) child).getSymbol());
       }
     }
     return new Sum(summands, span(context));
@@ -215,8 +215,14 @@ final class ExpressionBuilder {
     if (span.length() > Limits.DIGITS) {
       throw mistakes.tooManyDigits(span);
     }
-    BigDecimal number = new BigDecimal(token.getText());
-    return new Numeral(number.unscaledValue(), BigInteger.TEN.pow(number.scale()), span);
+    String digits = token.getText();
+    int point = digits.indexOf('.');
+    return point < 0
+        ? new Numeral(new BigInteger(digits), BigInteger.ONE, span)
+        : new Numeral(
+            new BigInteger(digits.substring(0, point) + digits.substring(point + 1)),
+            BigInteger.TEN.pow(digits.length() - point - 1),
+            span);
   }
 
   private Name name(GnomonParser.NameContext context) {
@@ -261,7 +267,12 @@ final class ExpressionBuilder {
     return Vocabulary.ascii(normal(token.getText()));
   }
 
+  /// One spelling for letters that can be written with or without combining marks. The tables of
+  /// the normalizer are slow to load and only needed where there are such marks.
   private static String normal(String text) {
+    if (text.chars().noneMatch(c -> c >= FIRST_MARK)) {
+      return text;
+    }
     return Normalizer.normalize(text, Normalizer.Form.NFC);
   }
 }
