@@ -1,10 +1,14 @@
 package gnomon.evaluate;
 
+import gnomon.algebra.Refusal;
 import gnomon.basis.MappedOperator;
 import gnomon.diagnostic.Span;
 import gnomon.form.Form;
-import gnomon.operator.Functional;
+import gnomon.form.Structure;
+import gnomon.form.Variable;
 import gnomon.operator.Operator;
+import gnomon.summation.DefiniteSum;
+import gnomon.summation.DefiniteSums;
 import gnomon.value.FormValue;
 import gnomon.value.FunctionalValue;
 import gnomon.value.ListValue;
@@ -13,6 +17,7 @@ import gnomon.value.OperatorValue;
 import gnomon.value.SeriesValue;
 import gnomon.value.Status;
 import gnomon.value.Value;
+import java.util.Optional;
 
 /// An operator, basis map or functional in front of what it acts on: applied to functions, composed
 /// with operators.
@@ -50,40 +55,49 @@ final class Application {
   }
 
   private Value toForm(Value a, Form f, Span span, Scope scope) {
+    Variable x = scope.running();
     if (a instanceof FunctionalValue value) {
-      Functional functional = value.functional();
-      Form image = functional.applyTo(f, evaluation.sums());
-      evaluation.step("the functional applied", a, Sorts.of(image, scope), "");
+      Form image = value.functional().applyTo(f, evaluation.sums());
+      evaluation.grounds().applied(Sorts.of(value.functional().toOperator()), f, image, x);
       return Sorts.of(image, scope);
+    }
+    Optional<Operator> plain = Sorts.asPlainOperator(a);
+    if (plain.filter(operator -> operator.equals(Operator.sum(x))).isPresent()) {
+      return sum(f, scope);
     }
     MappedOperator operator = Sorts.asOperator(a).orElseThrow();
     Form image = operator.applyTo(f, evaluation.sums());
-    if (operator.asOperator().filter(Application::sums).isPresent()) {
+    if (plain.filter(Application::sums).isPresent()) {
       evaluation.status(Status.of(Status.Kind.CLOSED_FORM));
-      checkSum(operator.asOperator().orElseThrow(), image, f, scope);
-    } else {
-      evaluation.step("the operator applied", Sorts.of(f, scope), Sorts.of(image, scope), "");
     }
+    evaluation.grounds().applied(a, f, image, x);
     return Sorts.of(image, scope);
+  }
+
+  /// Σ f: in closed form, or else the sum over 0..x-1 as it stands.
+  private Value sum(Form f, Scope scope) {
+    Variable x = scope.running();
+    try {
+      Form image = Operator.sum(x).applyTo(f, evaluation.sums());
+      evaluation.status(Status.of(Status.Kind.CLOSED_FORM));
+      evaluation.grounds().antidifference(image, f, x);
+      return Sorts.of(image, scope);
+    } catch (Refusal notFound) {
+      Variable k = new Variable(x.name() + "'");
+      Form summand = f.substitute(x, Form.of(k));
+      DefiniteSum sum =
+          new DefiniteSums(evaluation.sums())
+              .sum(summand, k, Form.ZERO, Form.of(x).minus(Form.ONE));
+      evaluation.status(RangeSums.status(sum, evaluation.writing(), x));
+      return Sorts.of(sum.value(), scope);
+    }
   }
 
   /// Whether shifts are inverted: the image then is a sum.
   private static boolean sums(Operator operator) {
-    return !operator.boundaries().isEmpty() || !operator.kernelOrders().isEmpty();
-  }
-
-  /// Records for an inverse of Q that Q brings the image back to f, if it does.
-  private void checkSum(Operator operator, Form image, Form f, Scope scope) {
-    Operator difference = Operator.forwardDifference(scope.running(), Form.ONE);
-    if (operator.equals(Operator.sum(scope.running())) || isInverseOf(operator, difference)) {
-      Form back = difference.applyTo(image);
-      if (back.equals(f)) {
-        evaluation.antidifference(image, back, f, scope.running(), false);
-      }
-    }
-  }
-
-  private static boolean isInverseOf(Operator operator, Operator difference) {
-    return operator.symbol().times(difference.symbol()).isOne();
+    boolean shifts =
+        operator.symbol().duals().stream()
+            .anyMatch(t -> !Structure.isRationalIn(operator.symbol(), t));
+    return shifts && !operator.kernelOrders().isEmpty();
   }
 }

@@ -9,7 +9,6 @@ import gnomon.syntax.Expression;
 import gnomon.syntax.Range;
 import gnomon.syntax.Statement;
 import gnomon.value.DecimalValue;
-import gnomon.value.Equation;
 import gnomon.value.FormValue;
 import gnomon.value.FunctionalValue;
 import gnomon.value.ListValue;
@@ -148,7 +147,7 @@ final class Claims {
     Form a = assumptions.simplified(left);
     Form b = assumptions.simplified(right);
     if (a.equals(b)) {
-      return normalForm(Sorts.of(left, scope), Sorts.of(right, scope), Sorts.of(a, scope));
+      return normalForm(Sorts.of(a, scope), Sorts.of(b, scope), Sorts.of(a, scope), scope);
     }
     Optional<Witness> choice = UnknownFunctions.witness(a, b, assumptions, scope);
     if (choice.isPresent()) {
@@ -160,8 +159,8 @@ final class Claims {
     }
     String checked =
         search.agreed() == 0
-            ? "no point"
-            : search.agreed() + (search.agreed() == 1 ? " point" : " points");
+            ? "no point could be checked"
+            : "equal at " + search.agreed() + (search.agreed() == 1 ? " point" : " points");
     return new Open(checked, "the normal forms differ, and no point was found that decides");
   }
 
@@ -171,14 +170,19 @@ final class Claims {
     if (left instanceof FunctionalValue a
         && right instanceof FunctionalValue b
         && a.functional().equals(b.functional())) {
-      return normalForm(left, right, left);
+      return normalForm(left, right, left, scope);
     }
     MappedOperator a = asOperator(left, span);
     MappedOperator b = asOperator(right, span);
     Variable x = variable(a, b, scope);
     Comparison comparison = a.comparedWith(b, x, CHECKED_TO, evaluation.sums());
     return switch (comparison) {
-      case Comparison.Equal _ -> normalForm(left, right, Sorts.of(a));
+      case Comparison.Equal _ -> normalForm(Sorts.of(a), Sorts.of(b), Sorts.of(a), scope);
+      case Comparison.Different(int power, Form first, Form second)
+          when OpenConstants.mayAgree(first, second, x) ->
+          new Open(
+              "the sides differ on " + x.name() + "^" + power + " by constants left open",
+              "an inverse modulo a kernel is determined only up to C1, C2, ...");
       case Comparison.Different(int power, Form first, Form second) ->
           new Refuted(
               new Witness.OnFunction(
@@ -247,10 +251,9 @@ final class Claims {
     return new Proved(new Ground.Words("both sides agree item by item", Optional.of(left)));
   }
 
-  private VerdictValue normalForm(Value left, Value right, Value common) {
-    evaluation.step(
-        "both sides have the same normal form",
-        List.of(new Equation(left, common), new Equation(right, common)));
+  private VerdictValue normalForm(Value left, Value right, Value common, Scope scope) {
+    evaluation.grounds().say("the left side has the normal form", left, scope.running());
+    evaluation.grounds().say("the right side has the normal form", right, scope.running());
     return new Proved(new Ground.NormalForm(common));
   }
 }

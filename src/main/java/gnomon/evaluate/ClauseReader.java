@@ -18,6 +18,7 @@ import gnomon.value.FormulaValue;
 import gnomon.value.ListValue;
 import gnomon.value.SeriesValue;
 import gnomon.value.Shape;
+import gnomon.value.Status;
 import gnomon.value.Value;
 import java.util.List;
 import java.util.Optional;
@@ -90,7 +91,10 @@ final class ClauseReader {
           series(value, evaluator.whole(order, scope), span, scope);
       case Clause.Digits(Expression count, Span span) ->
           Digits.of(value, evaluator.whole(count, scope), span);
-      case Clause.At at -> substitutions.value(value, at, scope);
+      case Clause.At at -> {
+        evaluation.status(Status.NONE);
+        yield substitutions.value(value, at, scope);
+      }
       case Clause.For table -> throw Problems.of("kind-table", "for stands last", table.span());
     };
   }
@@ -99,7 +103,7 @@ final class ClauseReader {
 
   private Value presented(Value value, Presentation presentation, Span span, Scope scope) {
     if (presentation == Presentation.TEX) {
-      return new FormulaValue(evaluation.typesetter().tex(value, scope.running()));
+      return new FormulaValue(evaluation.writing().tex(value, scope.running()));
     }
     if (value instanceof ListValue list) {
       return new ListValue(
@@ -127,7 +131,7 @@ final class ClauseReader {
 
   private FormValue expansion(Form form, Basis basis, Scope scope) {
     FormValue value = Expansions.polynomial(form, basis, evaluation.sums(), scope);
-    evaluation.step("the expansion adds up to the function", Sorts.of(form, scope), value, "");
+    evaluation.grounds().expansion(value, basis);
     return value;
   }
 
@@ -156,7 +160,7 @@ final class ClauseReader {
       }
       if (sum.equals(a)) {
         return new SeriesValue(
-            series.family(), series.first(), series.coefficients(), Integer.MAX_VALUE);
+            series.family(), series.first(), series.coefficients(), SeriesValue.EXACT);
       }
       order *= 4;
     }

@@ -1,28 +1,34 @@
 package gnomon.evaluate;
 
 import gnomon.form.Form;
-import gnomon.form.Generator;
+import gnomon.form.Variable;
 import gnomon.number.Rational;
 import gnomon.summation.Condition;
 import gnomon.summation.FunctionClass;
+import gnomon.value.FormValue;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import java.util.stream.Collectors;
 
-/// The side conditions of an answer in the words of the status line. Forms in them are simple
-/// enough to be written by their keys.
+/// The side conditions of an answer in the words of the status line.
 final class Conditions {
 
-  private Conditions() {}
+  private final Writing writing;
+  private final Variable running;
 
-  static String words(List<Condition> conditions) {
-    return conditions.isEmpty()
-        ? ""
-        : "for " + conditions.stream().map(Conditions::words).collect(Collectors.joining(", "));
+  Conditions(Writing writing, Variable running) {
+    this.writing = writing;
+    this.running = running;
   }
 
-  private static String words(Condition condition) {
+  String words(List<Condition> conditions) {
+    return conditions.isEmpty()
+        ? ""
+        : "for " + conditions.stream().map(this::words).collect(Collectors.joining(", "));
+  }
+
+  private String words(Condition condition) {
     String subject = text(condition.subject());
     return switch (condition.relation()) {
       case NOT_ZERO -> compared(condition.subject(), " != ");
@@ -33,7 +39,7 @@ final class Conditions {
   }
 
   /// The subject compared with zero; of the shape v + c the variable v with −c.
-  private static String compared(Form subject, String relation) {
+  private String compared(Form subject, String relation) {
     if (subject.variables().size() == 1) {
       Form variable = Form.of(subject.variables().first());
       Optional<Rational> constant = variable.minus(subject).asRational();
@@ -48,7 +54,7 @@ final class Conditions {
     return kind.name().toLowerCase(Locale.ROOT).replace('_', ' ') + " functions";
   }
 
-  private static String text(Form form) {
-    return form.asGenerator().map(Generator::key).orElseGet(form::key);
+  private String text(Form form) {
+    return writing.line(FormValue.of(form, running), running);
   }
 }

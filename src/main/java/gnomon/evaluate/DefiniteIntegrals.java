@@ -7,6 +7,7 @@ import gnomon.form.Structure;
 import gnomon.form.Variable;
 import gnomon.number.Rational;
 import gnomon.operator.Operator;
+import gnomon.value.FormValue;
 import java.util.List;
 import java.util.Optional;
 
@@ -30,7 +31,8 @@ final class DefiniteIntegrals {
     if (!back.equals(integrand)) {
       throw Problems.of("domain-no-antiderivative", "no antiderivative was found", limits.span());
     }
-    evaluation.step("the derivative of F is the integrand", back, integrand, t, "");
+    evaluation.grounds().say("an antiderivative", FormValue.of(antiderivative, t), t);
+    evaluation.grounds().equal("its derivative is the integrand", back, integrand, t);
     return antiderivative
         .substitute(t, limits.upper().get())
         .minus(antiderivative.substitute(t, limits.lower()));

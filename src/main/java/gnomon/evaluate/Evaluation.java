@@ -2,17 +2,8 @@ package gnomon.evaluate;
 
 import gnomon.algebra.Budget;
 import gnomon.diagnostic.Span;
-import gnomon.form.Form;
-import gnomon.form.Unknown;
-import gnomon.form.Variable;
 import gnomon.summation.SummationEngine;
-import gnomon.value.Equation;
-import gnomon.value.FormValue;
 import gnomon.value.Status;
-import gnomon.value.Step;
-import gnomon.value.Value;
-import java.util.ArrayList;
-import java.util.List;
 import java.util.function.Supplier;
 
 /// What is gathered and counted while one statement is evaluated: calls of defined functions, the
@@ -21,18 +12,19 @@ final class Evaluation {
   private final int callLimit;
   private final int depthLimit;
   private final SummationEngine sums;
-  private final Typesetter typesetter;
-  private final List<Step> steps = new ArrayList<>();
+  private final Writing writing;
+  private final Grounds grounds;
   private Status status = Status.NONE;
   private Assumptions implied = Assumptions.NONE;
   private int calls;
   private int depth;
 
-  Evaluation(int depthLimit, int callLimit, SummationEngine sums, Typesetter typesetter) {
+  Evaluation(int depthLimit, int callLimit, SummationEngine sums, Writing writing, boolean explaining) {
     this.depthLimit = depthLimit;
     this.callLimit = callLimit;
     this.sums = sums;
-    this.typesetter = typesetter;
+    this.writing = writing;
+    this.grounds = new Grounds(explaining, this);
   }
 
   /// The search for antidifferences.
@@ -40,9 +32,9 @@ final class Evaluation {
     return sums;
   }
 
-  /// What writes values for typesetting.
-  Typesetter typesetter() {
-    return typesetter;
+  /// What writes values.
+  Writing writing() {
+    return writing;
   }
 
   /// Counts a call of the defined function `name` at `span` while `call` runs.
@@ -68,48 +60,9 @@ final class Evaluation {
     }
   }
 
-  /// Records a step that was checked by computing both sides.
-  void step(String rule, Value left, Value right, String note) {
-    steps.add(new Step(rule, List.of(new Equation(left, right)), true, note));
-  }
-
-  /// Records a step of several equations, each checked by computing both sides.
-  void step(String rule, List<Equation> equations) {
-    steps.add(new Step(rule, equations, true, ""));
-  }
-
-  /// Records a step about forms.
-  void step(String rule, Form left, Form right, Variable running, String note) {
-    step(rule, FormValue.of(left, running), FormValue.of(right, running), note);
-  }
-
-  /// Records an antidifference F and that its difference is the summand.
-  void antidifference(Form f, Form difference, Form summand, Variable k, boolean shifted) {
-    Form at = Form.of(k);
-    step(
-        "an antidifference F of the summand",
-        named(at),
-        f,
-        k,
-        shifted ? "counted from the lower limit" : "");
-    step(
-        "its difference is the summand",
-        named(at.plus(Form.ONE)).minus(named(at)),
-        difference,
-        k,
-        "");
-    if (!difference.equals(summand)) {
-      throw new IllegalArgumentException("not an antidifference");
-    }
-  }
-
-  /// F at an argument, where F is a name for an antidifference in a derivation.
-  Form named(Form argument) {
-    return Form.of(new Unknown("F", 0, argument));
-  }
-
-  List<Step> steps() {
-    return List.copyOf(steps);
+  /// The explanation of the answer, where one was asked for.
+  Grounds grounds() {
+    return grounds;
   }
 
   Status status() {

@@ -72,7 +72,7 @@ final class Evaluator {
                         "kind-arguments",
                         "arguments without a function before them",
                         parenthesis.span()));
-    return value(item, scope);
+    return Expansions.settled(value(item, scope));
   }
 
   private Value sum(Expression.Sum sum, Scope scope) {

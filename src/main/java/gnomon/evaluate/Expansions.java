@@ -91,6 +91,24 @@ final class Expansions {
     return new SeriesValue(family(basis), 0, expansion.coefficients(), last + 1);
   }
 
+  /// The value as it takes part in further work: a finite sum of powers of an operator is that
+  /// operator again.
+  static Value settled(Value value) {
+    if (value instanceof SeriesValue series
+        && series.isExact()
+        && series.family() instanceof Family.OperatorPowers(Operator q)) {
+      Operator sum = Operator.zero();
+      for (int j = 0; j < series.coefficients().size(); j++) {
+        Form coefficient = series.coefficients().get(j);
+        if (!coefficient.isZero()) {
+          sum = sum.plus(q.power(series.first() + j).times(coefficient));
+        }
+      }
+      return Sorts.of(sum);
+    }
+    return value;
+  }
+
   /// A in powers of Q, to Q^last.
   static SeriesValue ofOperator(Operator a, Operator q, Variable x, int last) {
     Budget.charge(last);

@@ -24,16 +24,16 @@ import java.util.List;
 public final class Interpreter {
   private final int depth;
   private final int calls;
-  private final Typesetter typesetter;
+  private final Writing writing;
   private final SummationEngine sums;
 
   /// An interpreter in which calls of defined functions may be nested `depth` deep and be `calls`
   /// many in one statement.
-  public Interpreter(int depth, int calls, SummationEngine sums, Typesetter typesetter) {
+  public Interpreter(int depth, int calls, SummationEngine sums, Writing writing) {
     this.depth = depth;
     this.calls = calls;
     this.sums = sums;
-    this.typesetter = typesetter;
+    this.writing = writing;
   }
 
   /// A definition made: the scope that has it, and the value, if it is not a function.
@@ -50,16 +50,38 @@ public final class Interpreter {
   public Answer claim(Statement.Claim claim, Scope scope) {
     Evaluation evaluation = evaluation();
     VerdictValue verdict = new Claims(new Evaluator(evaluation), evaluation).verdict(claim, scope);
-    return new Answer(verdict, verdict.status(), new Derivation(evaluation.steps()));
+    return new Answer(verdict, verdict.status(), Derivation.NONE);
+  }
+
+  /// How the answer to a statement in a scope is reached: it is evaluated once more, and each step is
+  /// checked as it is recorded.
+  public Derivation why(Statement statement, Scope scope) {
+    Evaluation evaluation = new Evaluation(depth, calls, sums, writing, true);
+    Evaluator evaluator = new Evaluator(evaluation);
+    switch (statement) {
+      case Statement.ExpressionStatement(Expression expression, Span _) ->
+          evaluation
+              .grounds()
+              .say("the result", evaluator.value(expression, scope), scope.running());
+      case Statement.Let let -> {
+        Value value = evaluator.value(let.body(), scope);
+        evaluation.grounds().say("the result", value, scope.running());
+      }
+      case Statement.Claim claim -> {
+        Value verdict = new Claims(evaluator, evaluation).verdict(claim, scope);
+        evaluation.grounds().say("so the claim is", verdict, scope.running());
+      }
+      case Statement other -> throw new IllegalArgumentException(other.toString());
+    }
+    return new Derivation(evaluation.grounds().steps());
   }
 
   private Evaluation evaluation() {
-    return new Evaluation(depth, calls, sums, typesetter);
+    return new Evaluation(depth, calls, sums, writing, false);
   }
 
   private static Answer answer(Value value, Evaluation evaluation) {
-    return new Answer(
-        value, status(value, evaluation.status()), new Derivation(evaluation.steps()));
+    return new Answer(value, status(value, evaluation.status()), Derivation.NONE);
   }
 
   /// What is known of the value: of the sums met on the way only what still holds of the value.

@@ -95,7 +95,7 @@ final class Names {
     return moved && Sorts.acts(named.value())
         ? Places.calledFrom(
             span, () -> evaluator.value(named.expression(), named.scope().running(scope.running())))
-        : named.value();
+        : Expansions.settled(named.value());
   }
 
   private Value unbound(Expression.Name name, Scope scope) {

@@ -85,17 +85,17 @@ final class RangeSums {
     } else {
       sum = new InfiniteSums(engine).sum(body, k, limits.lower());
     }
-    evaluation.status(status(sum));
-    sum.antidifference().ifPresent(found -> record(found, body, sum.value(), limits, scope));
+    evaluation.status(status(sum, evaluation.writing(), scope.running()));
+    sum.antidifference().ifPresent(found -> record(found, body, sum.value(), limits));
     sum.recurrence().ifPresent(found -> new RecurrenceSteps(evaluation, k).record(found));
     return Sorts.of(sum.value(), scope);
   }
 
-  private static Status status(DefiniteSum sum) {
+  static Status status(DefiniteSum sum, Writing writing, Variable running) {
     return switch (sum.status()) {
       case TERM_BY_TERM -> Status.of(Status.Kind.CLOSED_FORM);
       case CLOSED_FORM ->
-          Status.of(Status.Kind.CLOSED_FORM).withDetail(Conditions.words(sum.conditions()));
+          Status.of(Status.Kind.CLOSED_FORM).withDetail(new Conditions(writing, running).words(sum.conditions()));
       case NO_CLOSED_FORM ->
           Status.of(Status.Kind.NO_CLOSED_FORM)
               .withDetail(
@@ -107,29 +107,20 @@ final class RangeSums {
     };
   }
 
-  /// Records the antidifference and that its difference is the summand, which is computed here
-  /// anew.
-  private void record(Form found, Form summand, Form sum, Limits limits, Scope scope) {
+  /// Records the antidifference, whose difference is formed anew, and the sum as a difference of its
+  /// values. The engine may count from the lower limit.
+  private void record(Form found, Form summand, Form sum, Limits limits) {
     Variable k = limits.variable();
     Form next = Form.of(k).plus(Form.ONE);
-    Form back = found.substitute(k, next).minus(found);
     Form moved = summand.substitute(k, Form.of(k).plus(limits.lower()));
-    boolean fromZero = back.equals(moved);
-    if (fromZero || back.equals(summand)) {
-      boolean shifted = fromZero && !limits.lower().isZero();
-      Value total = Sorts.of(sum, scope);
-      evaluation.antidifference(found, back, fromZero ? moved : summand, k, shifted);
-      Form first = shifted || fromZero ? Form.ZERO : limits.lower();
-      Optional<Form> end =
-          limits.upper().map(u -> u.plus(Form.ONE).minus(fromZero ? limits.lower() : Form.ZERO));
-      end.ifPresent(
-          past ->
-              evaluation.step(
-                  "the sum is F past the upper end less F at the lower end",
-                  Sorts.of(evaluation.named(past).minus(evaluation.named(first)), scope),
-                  total,
-                  ""));
-    }
+    boolean fromZero = found.substitute(k, next).minus(found).equals(moved);
+    evaluation.grounds().antidifference(found, fromZero ? moved : summand, k);
+    Form lower = fromZero ? Form.ZERO : limits.lower();
+    Form shift = fromZero ? limits.lower() : Form.ZERO;
+    limits
+        .upper()
+        .map(upper -> upper.plus(Form.ONE).minus(shift))
+        .ifPresent(past -> evaluation.grounds().telescoped(found, past, lower, sum, k));
   }
 
   private Value oneByOne(Limits limits, Expression body, boolean adding, Scope scope) {

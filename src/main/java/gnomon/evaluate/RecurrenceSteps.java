@@ -20,7 +20,7 @@ final class RecurrenceSteps {
   /// found, by dividing the telescoped identity by the summand.
   void record(SumRecurrence recurrence) {
     Variable n = recurrence.variable();
-    evaluation.step(
+    evaluation.grounds().found(
         "the certificate R, with which the telescoped summand is Delta_"
             + index.name()
             + " of R times the summand",
@@ -34,7 +34,7 @@ final class RecurrenceSteps {
       Form value = Form.of(new Unknown("S", 0, Form.of(n).plus(Form.of(i))));
       left = left.plus(coefficients.get(i).times(value));
     }
-    evaluation.step(
+    evaluation.grounds().found(
         "the recurrence of the sum S",
         left,
         recurrence.rightSide(),

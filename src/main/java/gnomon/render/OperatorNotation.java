@@ -126,6 +126,9 @@ final class OperatorNotation {
     if (constant) {
       return termsOf(shiftInvariant.of(part.left().times(part.right())));
     }
+    if (part.right().duals().isEmpty() && !part.right().isOne()) {
+      return part(new SymbolParts.Part(part.left().times(part.right()), Form.ONE), acting);
+    }
     boolean identity = part.right().isOne();
     boolean polynomial = isPolynomial(part.left(), acting);
     if (identity && polynomial) {

@@ -170,7 +170,9 @@ final class ValueNotation {
         add(terms, TermNotation.scaled(forms.of(coefficient), element(element)));
       }
     }
-    terms.add(new Notation.Order(element(series.family().element(series.order()))));
+    if (!series.isExact()) {
+      terms.add(new Notation.Order(element(series.family().element(series.order()))));
+    }
     return Notation.sum(terms);
   }
 

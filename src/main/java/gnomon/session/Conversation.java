@@ -8,6 +8,8 @@ import gnomon.evaluate.Interpreter;
 import gnomon.evaluate.LocatedHalt;
 import gnomon.evaluate.LocatedRefusal;
 import gnomon.evaluate.Scope;
+import gnomon.evaluate.Writing;
+import gnomon.form.Variable;
 import gnomon.render.Rendering;
 import gnomon.render.Wording;
 import gnomon.summation.SummationEngine;
@@ -17,6 +19,7 @@ import gnomon.syntax.Statement;
 import gnomon.syntax.StatementReader;
 import gnomon.syntax.StatementText;
 import gnomon.value.Answer;
+import gnomon.value.Derivation;
 import gnomon.value.Value;
 import gnomon.value.VerdictValue;
 import java.util.ArrayList;
@@ -40,7 +43,21 @@ final class Conversation {
             settings.limits().depth(),
             settings.limits().steps(),
             SummationEngine.standard(),
-            (value, running) -> Rendering.latex().withRunning(running).line(value));
+            writing(settings.spelling()));
+  }
+
+  private static Writing writing(Spelling spelling) {
+    return new Writing() {
+      @Override
+      public String line(Value value, Variable running) {
+        return ShownValue.rendering(spelling, running).line(value);
+      }
+
+      @Override
+      public String tex(Value value, Variable running) {
+        return Rendering.latex().withRunning(running).line(value);
+      }
+    };
   }
 
   /// The state after a statement and the reply to it. After a failure the state is as before.
@@ -119,11 +136,11 @@ final class Conversation {
     return switch (statement) {
       case Statement.ExpressionStatement(Expression expression, Span _) -> {
         Answer answer = interpreter.value(expression, scope);
-        yield answered(state, scope, expression, answer);
+        yield answered(state, scope, expression, statement, answer);
       }
       case Statement.Let let when let.parameters().isEmpty() -> {
         Interpreter.Definition definition = interpreter.let(let, scope);
-        yield answered(state, definition.scope(), let.body(), definition.answer());
+        yield answered(state, definition.scope(), let.body(), statement, definition.answer());
       }
       case Statement.Let let -> {
         String text = StatementText.of(let, syntaxSpelling());
@@ -131,7 +148,7 @@ final class Conversation {
       }
       case Statement.Claim claim -> {
         Answer answer = interpreter.claim(claim, scope);
-        yield answered(state, scope, claim.left(), answer);
+        yield answered(state, scope, claim.left(), statement, answer);
       }
       case Statement.Given given ->
           noted(state.withScope(interpreter.given(given, scope)), List.of());
@@ -158,12 +175,13 @@ final class Conversation {
     return new Outcome(state, new Reply.Note(lines));
   }
 
-  private Outcome answered(State state, Scope scope, Expression expression, Answer answer) {
+  private Outcome answered(
+      State state, Scope scope, Expression expression, Statement statement, Answer answer) {
     Scope next = Interpreter.withResult(scope, answer.value(), expression, state.scope());
     Shown shown = new ShownValue(answer.value(), state.scope().running());
     boolean verdict = answer.value() instanceof VerdictValue;
     return new Outcome(
-        state.withAnswer(next, answer),
+        state.withResult(next, new State.Result(statement, state.scope())),
         new Reply.Answer(
             next.latest(), shown, answer.status().word(), verdict ? "" : answer.status().text()));
   }
@@ -176,7 +194,7 @@ final class Conversation {
   }
 
   private Reply why(State state, Statement.Why why) {
-    int latest = state.answers().size();
+    int latest = state.results().size();
     int number = why.handle().map(handle -> handle.number().orElse(latest)).orElse(latest);
     if (number < 1 || number > latest) {
       throw new DiagnosedException(
@@ -185,9 +203,10 @@ final class Conversation {
               latest == 0 ? "there is no result yet" : "there is no result @" + number,
               why.span()));
     }
-    Answer answer = state.answers().get(number - 1);
+    State.Result result = state.results().get(number - 1);
+    Derivation derivation = interpreter.why(result.statement(), result.scope());
     Rendering rendering = ShownValue.rendering(settings.spelling(), state.scope().running());
-    return new Reply.Note(rendering.why(answer.derivation()).lines().toList());
+    return new Reply.Note(rendering.why(derivation).lines().toList());
   }
 
   private Reply help(Optional<String> topic, Span span) {
