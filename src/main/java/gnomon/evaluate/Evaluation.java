@@ -19,7 +19,8 @@ final class Evaluation {
   private int calls;
   private int depth;
 
-  Evaluation(int depthLimit, int callLimit, SummationEngine sums, Writing writing, boolean explaining) {
+  Evaluation(
+      int depthLimit, int callLimit, SummationEngine sums, Writing writing, boolean explaining) {
     this.depthLimit = depthLimit;
     this.callLimit = callLimit;
     this.sums = sums;

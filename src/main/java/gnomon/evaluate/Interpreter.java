@@ -53,8 +53,8 @@ public final class Interpreter {
     return new Answer(verdict, verdict.status(), Derivation.NONE);
   }
 
-  /// How the answer to a statement in a scope is reached: it is evaluated once more, and each step is
-  /// checked as it is recorded.
+  /// How the answer to a statement in a scope is reached: it is evaluated once more, and each step
+  /// is checked as it is recorded.
   public Derivation why(Statement statement, Scope scope) {
     Evaluation evaluation = new Evaluation(depth, calls, sums, writing, true);
     Evaluator evaluator = new Evaluator(evaluation);

@@ -12,8 +12,8 @@ final class OpenConstants {
 
   private OpenConstants() {}
 
-  /// Whether two images agree for some choice of the constants left open, as far as polynomials tell:
-  /// every coefficient of their difference that is free of such constants is 0.
+  /// Whether two images agree for some choice of the constants left open, as far as polynomials
+  /// tell: every coefficient of their difference that is free of such constants is 0.
   static boolean mayAgree(Form left, Form right, Variable x) {
     Optional<List<Form>> difference = Structure.asPolynomial(left.minus(right), x);
     return difference.isPresent()

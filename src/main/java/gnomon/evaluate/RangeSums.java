@@ -95,7 +95,8 @@ final class RangeSums {
     return switch (sum.status()) {
       case TERM_BY_TERM -> Status.of(Status.Kind.CLOSED_FORM);
       case CLOSED_FORM ->
-          Status.of(Status.Kind.CLOSED_FORM).withDetail(new Conditions(writing, running).words(sum.conditions()));
+          Status.of(Status.Kind.CLOSED_FORM)
+              .withDetail(new Conditions(writing, running).words(sum.conditions()));
       case NO_CLOSED_FORM ->
           Status.of(Status.Kind.NO_CLOSED_FORM)
               .withDetail(
@@ -107,8 +108,8 @@ final class RangeSums {
     };
   }
 
-  /// Records the antidifference, whose difference is formed anew, and the sum as a difference of its
-  /// values. The engine may count from the lower limit.
+  /// Records the antidifference, whose difference is formed anew, and the sum as a difference of
+  /// its values. The engine may count from the lower limit.
   private void record(Form found, Form summand, Form sum, Limits limits) {
     Variable k = limits.variable();
     Form next = Form.of(k).plus(Form.ONE);
