@@ -63,8 +63,11 @@ final class Action {
     if (!symbol.dependsOn(t)) {
       return List.of(new Splitting.Product(symbol, f));
     }
-    Optional<List<ExponentialPart>> shifts = Splitting.parts(symbol, t, symbol);
     Optional<List<ExponentialPart>> rates = Splitting.parts(f, x, symbol);
+    Optional<List<ExponentialPart>> shifts =
+        rates.isPresent() && exceeds(symbol, t, cost(rates.get()))
+            ? Optional.empty()
+            : Splitting.parts(symbol, t, symbol);
     if (shifts.isEmpty() && rates.isEmpty()) {
       throw new Refusal(Reason.INFINITE_SERIES, symbol, f);
     }
@@ -82,6 +85,11 @@ final class Action {
       }
     }
     return result;
+  }
+
+  /// Whether a power of t above the limit occurs in the symbol.
+  private static boolean exceeds(Form symbol, Dual t, int limit) {
+    return symbol.numerator().degree(t).compareTo(Rational.of(limit)) > 0;
   }
 
   private static int cost(List<ExponentialPart> parts) {

@@ -1,5 +1,6 @@
 package gnomon.operator;
 
+import gnomon.algebra.Budget;
 import gnomon.algebra.Reason;
 import gnomon.algebra.Refusal;
 import gnomon.form.Dual;
@@ -274,6 +275,9 @@ public final class Operator {
     if (isPlain() && (symbol.duals().isEmpty() || isShiftInvariant() && !isSingular())) {
       return ofSymbol(symbol.power(exponent));
     }
+    long square = (long) exponent * exponent;
+    long capped = Math.min(square, Integer.MAX_VALUE);
+    Budget.charge(boundaries.isEmpty() ? square : Math.multiplyExact(capped, capped));
     Operator result = identity();
     for (int bit = 31 - Integer.numberOfLeadingZeros(exponent | 1); bit >= 0; bit--) {
       result = result.compose(result);

@@ -67,6 +67,7 @@ final class Splitting {
   /// The exponential parts in the generator, when their rates are scalars for every variable on
   /// which the left operator acts.
   static Optional<List<ExponentialPart>> parts(Form form, Generator v, Form left) {
+    Budget.charge(form.numerator().degree(v).abs().floor().longValueExact());
     Optional<List<ExponentialPart>> parts = Structure.exponentialParts(form, v);
     return parts.filter(list -> list.stream().allMatch(p -> isScalarRate(p.rate(), v, left)));
   }

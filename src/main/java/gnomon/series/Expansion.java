@@ -1,5 +1,6 @@
 package gnomon.series;
 
+import gnomon.algebra.Budget;
 import gnomon.algebra.Reason;
 import gnomon.algebra.Refusal;
 import gnomon.form.Exponential;
@@ -28,6 +29,7 @@ public final class Expansion {
   public static PowerSeries of(Form form, Generator t, int order) {
     int limit = Math.addExact(Math.max(order, 0), EXTRA);
     int work = Math.max(order, 0);
+    Budget.charge((long) work * work / 4);
     if (work > PROBE) {
       int lost = attempt(form, t, PROBE).map(s -> PROBE - s.order()).orElse(0);
       work += Math.max(0, lost);

@@ -12,7 +12,9 @@ import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.TreeMap;
 
 /// The expansion of sums Σ c t^j e^(q t) with rational c and q, by t^n ↦ c q^(n−j)/(n−j)!, the
 /// powers q^n taken for all the terms over one common denominator.
@@ -33,15 +35,16 @@ final class ExponentialSums {
       return Optional.empty();
     }
     ExponentialSums sums = new ExponentialSums(order);
-    for (int power = 0; power <= polynomial.degree(t).intValueExact(); power++) {
-      List<Term> group = new ArrayList<>();
-      for (Term term : polynomial.terms()) {
-        if (term.monomial().exponent(t).equals(Rational.of(power))) {
-          group.add(term);
-        }
-      }
-      sums.add(group, kernel, power);
+    Map<Rational, List<Term>> groups = new TreeMap<>();
+    for (Term term : polynomial.terms()) {
+      groups.computeIfAbsent(term.monomial().exponent(t), _ -> new ArrayList<>()).add(term);
     }
+    groups.forEach(
+        (power, group) -> {
+          if (power.compareTo(Rational.of(order)) <= 0) {
+            sums.add(group, kernel, power.intValueExact());
+          }
+        });
     return Optional.of(PowerSeries.ofRationals(sums.coefficients, order));
   }
 
