@@ -11,6 +11,8 @@ public enum Reason {
   ARCSINE_DOMAIN,
   /// A kernel whose derivative is no form. Data: the kernel, the variable.
   DERIVATIVE_UNKNOWN,
+  /// Decimal digits that more precision did not settle. Data: the form, the digits tried.
+  DIGITS_UNDECIDED,
   /// An infinite sum that diverges. Data: the summand.
   DIVERGENT,
   /// A quotient by zero, or a negative power of zero. Data: the dividend where there is one.
@@ -40,6 +42,8 @@ public enum Reason {
   NOT_A_POLYNOMIAL,
   /// A quotient of operators that do not commute. Data: the two symbols.
   NOT_COMMUTING,
+  /// A constant was needed. Data: the form that is none.
+  NOT_CONSTANT,
   /// A number at least zero was needed. Data: the value met.
   NOT_NATURAL,
   /// An operator that is not polynomial in x where a basis map has to pass it. Data: the symbol,
@@ -51,6 +55,8 @@ public enum Reason {
   NO_ANTIDIFFERENCE,
   /// Something has no closed form in this room. Data: the form.
   NO_CLOSED_FORM,
+  /// A constant without a numerical method. Data: the form.
+  NO_DIGITS,
   /// An operator without inverse, or without a known one. Data: the symbol.
   NO_INVERSE,
   /// No power series at 0, or none that is known. Data: the form or the function concerned.

@@ -139,6 +139,21 @@ final class RefusalWords {
   private static final Map<String, Words> CALCULUS =
       Map.ofEntries(
           Map.entry(
+              "DIGITS_UNDECIDED",
+              limit(
+                  "more precision does not settle the digits of this constant",
+                  "With {2} digits it cannot be told from 0 or a tie: {1}.",
+                  "sqrt(2) to 20 digits")),
+          Map.entry(
+              "NOT_CONSTANT",
+              domain("only a constant has digits", "{1} is none.", "pi^2/6 to 20 digits")),
+          Map.entry(
+              "NO_DIGITS",
+              domain(
+                  "there is no way here to compute digits of this",
+                  "It is {1}.",
+                  "ln(2) to 20 digits")),
+          Map.entry(
               "ANTIDERIVATIVE_NOT_FOUND",
               domain(
                   "no antiderivative was found, though there may be one",
