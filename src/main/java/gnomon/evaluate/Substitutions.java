@@ -1,6 +1,7 @@
 package gnomon.evaluate;
 
 import gnomon.basis.MappedOperator;
+import gnomon.basis.ShefferMap;
 import gnomon.diagnostic.Span;
 import gnomon.form.Accumulation;
 import gnomon.form.Form;
@@ -8,15 +9,18 @@ import gnomon.form.Generator;
 import gnomon.form.Variable;
 import gnomon.operator.Operator;
 import gnomon.syntax.Clause;
+import gnomon.value.Family;
 import gnomon.value.FormValue;
 import gnomon.value.ListValue;
 import gnomon.value.SeriesValue;
 import gnomon.value.TableValue;
 import gnomon.value.Value;
 import java.math.BigInteger;
+import java.util.Collections;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 
 /// `… at x = a`: values put in for variables, all at once. Standing sums whose limits become
 /// numbers are added up.
@@ -50,13 +54,38 @@ final class Substitutions {
               table.rows().stream()
                   .map(row -> row.stream().map(v -> put(v, images, span, scope)).toList())
                   .toList());
-      case SeriesValue series ->
-          new SeriesValue(
-              series.family(),
-              series.first(),
-              series.coefficients().stream().map(c -> c.substitute(images)).toList(),
-              series.order());
+      case SeriesValue series -> series(series, images, span);
       case Value other -> operator(other, images, span);
+    };
+  }
+
+  /// Parameters in the coefficients, but not the variable in which the series proceeds.
+  private static Value series(SeriesValue series, Map<Generator, Form> images, Span span) {
+    Set<Variable> proceeding = variables(series.family());
+    boolean put = proceeding.stream().anyMatch(images::containsKey);
+    if (put
+        || images.values().stream()
+            .anyMatch(image -> !Collections.disjoint(image.variables(), proceeding))) {
+      throw Problems.of(
+          "kind-at",
+          "a series has no value at a point, only before it is cut off",
+          span,
+          "exp(a x) at a = 2 to 6");
+    }
+    return new SeriesValue(
+        series.family(),
+        series.first(),
+        series.coefficients().stream().map(c -> c.substitute(images)).toList(),
+        series.order());
+  }
+
+  private static Set<Variable> variables(Family family) {
+    return switch (family) {
+      case Family.Powers(Form base) -> base.variables();
+      case Family.FallingPowers(Form base) -> base.variables();
+      case Family.RisingPowers(Form base) -> base.variables();
+      case Family.Images(ShefferMap map) -> Set.of(map.variable());
+      case Family.OperatorPowers(Operator of) -> of.variables();
     };
   }
 

@@ -50,6 +50,7 @@ final class Terms {
 
   Value value(Expression.Term term, Scope scope) {
     List<Unit> units = units(term.factors(), scope);
+    refuseAgainstDivisor(units);
     refuseDoubtful(units);
     return folded(divided(units, scope), scope);
   }
@@ -146,6 +147,23 @@ final class Terms {
   }
 
   // ---------------------------------------------------------------- doubtful writing
+
+  /// Refuses `1/k(k + 1)` where k is no function: what is written against a divisor may belong to
+  /// it.
+  private static void refuseAgainstDivisor(List<Unit> units) {
+    for (int i = 2; i < units.size(); i++) {
+      Unit divisor = units.get(i - 1);
+      Unit next = units.get(i);
+      if (divisor.connective() == Connective.DIVIDED && next.written().getFirst().isArgument()) {
+        String before = joined(units.subList(0, i - 1)).strip();
+        throw Problems.doubtful(
+            "this quotient has two readings",
+            units.getFirst().span().to(next.span()),
+            before + "/(" + divisor.text() + next.text() + ")",
+            "(" + before + "/" + divisor.text() + ") " + next.text());
+      }
+    }
+  }
 
   private static void refuseDoubtful(List<Unit> units) {
     for (int i = 0; i + 2 < units.size(); i++) {
