@@ -3,6 +3,7 @@ package gnomon.basis;
 import gnomon.algebra.Budget;
 import gnomon.form.Form;
 import gnomon.number.Rational;
+import gnomon.polynomial.DensePolynomial;
 import gnomon.series.PowerSeries;
 import java.util.ArrayList;
 import java.util.List;
@@ -55,7 +56,7 @@ final class PolynomialImages {
       Rational step = h.asRational().get();
       List<Rational> scaled = scaled(rationals(p), c.asRational().get().inverse());
       return Optional.of(
-          forms(scaled(padded(RationalRow.fromFalling(scaled), p.size()), step.inverse())));
+          forms(scaled(padded(DensePolynomial.fromFalling(scaled), p.size()), step.inverse())));
     }
     if (DeltaShape.of(map.inverseOfF(), map.dual())
             instanceof DeltaShape.Difference(Form c, Form h, Form k)
@@ -63,7 +64,7 @@ final class PolynomialImages {
         && c.asRational().isPresent()
         && h.asRational().isPresent()) {
       Rational step = h.asRational().get();
-      RationalRow stretched = RationalRow.of(scaled(rationals(p), step));
+      DensePolynomial stretched = DensePolynomial.of(scaled(rationals(p), step));
       return Optional.of(forms(scaled(stretched.toFalling(), c.asRational().get())));
     }
     return Optional.empty();
@@ -77,7 +78,7 @@ final class PolynomialImages {
     return numbers.stream().map(Form::of).toList();
   }
 
-  private static List<Rational> padded(RationalRow polynomial, int size) {
+  private static List<Rational> padded(DensePolynomial polynomial, int size) {
     List<Rational> result = new ArrayList<>(size);
     for (int k = 0; k < size; k++) {
       result.add(polynomial.coefficient(k));

@@ -1,10 +1,10 @@
 package gnomon.summation;
 
-import gnomon.basis.RationalRow;
 import gnomon.form.Form;
 import gnomon.form.Structure;
 import gnomon.form.Variable;
 import gnomon.number.Rational;
+import gnomon.polynomial.DensePolynomial;
 import java.util.List;
 
 /// The check that every antidifference passes before it is handed out.
@@ -34,11 +34,12 @@ final class Differencing {
     if (expected.isEmpty() || !PolynomialSums.allRational(expected.get())) {
       return false;
     }
-    RationalRow polynomial = dense(sum);
+    DensePolynomial polynomial = dense(sum);
     return polynomial.taylorShift(h).minus(polynomial).equals(dense(expected.get()));
   }
 
-  private static RationalRow dense(List<Form> coefficients) {
-    return RationalRow.of(coefficients.stream().map(c -> c.asRational().orElseThrow()).toList());
+  private static DensePolynomial dense(List<Form> coefficients) {
+    return DensePolynomial.of(
+        coefficients.stream().map(c -> c.asRational().orElseThrow()).toList());
   }
 }

@@ -1,11 +1,11 @@
 package gnomon.summation;
 
 import gnomon.algebra.Budget;
-import gnomon.basis.RationalRow;
 import gnomon.form.Form;
 import gnomon.form.Variable;
 import gnomon.number.Integers;
 import gnomon.number.Rational;
+import gnomon.polynomial.DensePolynomial;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -60,7 +60,7 @@ final class PolynomialSums {
       reversed.addFirst(p.get(k).times(factorial));
       power = power.times(h);
     }
-    RationalRow product = RationalRow.of(weights).times(RationalRow.of(reversed));
+    DensePolynomial product = DensePolynomial.of(weights).times(DensePolynomial.of(reversed));
     List<Form> result = new ArrayList<>();
     result.add(Form.ZERO);
     Rational scale = Rational.ONE;
