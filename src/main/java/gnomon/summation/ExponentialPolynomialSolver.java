@@ -6,8 +6,8 @@ import gnomon.form.Structure;
 import gnomon.form.Variable;
 import gnomon.number.Integers;
 import gnomon.number.Rational;
+import gnomon.polynomial.DensePolynomial;
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.List;
 
 /// Sums Σ_j b_j^x p_j(x) with polynomials p_j: also sines, cosines, (−1)^x and parametric bases.
@@ -76,25 +76,19 @@ final class ExponentialPolynomialSolver implements AntidifferenceSolver {
     return List.of(result);
   }
 
+  /// With x = h y and bE − 1 = (b − 1) + bΔ: in the falling powers y↓k the coordinates a_k of p
+  /// give (b − 1) P_k = a_k − b (k + 1) P_{k+1}.
   private static List<Form> rationalGeometric(List<Form> p, Rational b, Rational h) {
-    int size = p.size();
-    Rational[] result = new Rational[size];
+    List<Rational> numbers = p.stream().map(c -> c.asRational().orElseThrow()).toList();
+    List<Rational> falling =
+        new ArrayList<>(DensePolynomial.of(PolynomialSums.scaled(numbers, h)).toFalling());
     Rational scale = b.minus(Rational.ONE).inverse();
-    for (int m = size - 1; m >= 0; m--) {
-      Rational later = Rational.ZERO;
-      Rational factor = h;
-      for (int j = m + 1; j < size; j++) {
-        factor = j == m + 1 ? h.times(Rational.of(j)) : factor.times(ratio(j, m, h));
-        later = later.plus(result[j].times(factor));
-      }
-      Budget.checkpoint();
-      result[m] = p.get(m).asRational().orElseThrow().minus(b.times(later)).times(scale);
+    Rational above = Rational.ZERO;
+    for (int k = falling.size() - 1; k >= 0; k--) {
+      above = falling.get(k).minus(b.times(Rational.of(k + 1)).times(above)).times(scale);
+      falling.set(k, above);
     }
-    return Arrays.stream(result).map(Form::of).toList();
-  }
-
-  /// binom(j, m) h^(j−m) divided by binom(j − 1, m) h^(j−1−m).
-  private static Rational ratio(int j, int m, Rational h) {
-    return h.times(Rational.of(j, j - m));
+    List<Rational> sum = DensePolynomial.fromFalling(falling).coefficients();
+    return PolynomialSums.scaled(sum, h.inverse()).stream().map(Form::of).toList();
   }
 }

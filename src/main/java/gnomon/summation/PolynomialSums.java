@@ -12,8 +12,8 @@ import java.util.List;
 /// Antidifferences of polynomials, as coefficient lists in ascending powers.
 ///
 /// With Bernoulli numbers B_k, F = (1/h) ∫ (hD/(e^(hD) − 1)) p, so the coefficient of x^(m+1) in F
-/// is (1/(m+1)) Σ_k B_k h^(k−1) binom(m + k, k) p_{m+k}. One product of dense polynomials when all
-/// numbers are rational, quadratic otherwise.
+/// is (1/(m+1)) Σ_k B_k h^(k−1) binom(m + k, k) p_{m+k}. When all numbers are rational the falling
+/// powers are the faster way, through the dense conversions.
 final class PolynomialSums {
 
   private PolynomialSums() {}
@@ -21,7 +21,8 @@ final class PolynomialSums {
   /// F with F(x + h) − F(x) = p(x) and F(0) = 0.
   static List<Form> antidifference(List<Form> p, Form h) {
     if (h.asRational().isPresent() && allRational(p)) {
-      return rational(p.stream().map(c -> c.asRational().orElseThrow()).toList(), h);
+      return rational(
+          p.stream().map(c -> c.asRational().orElseThrow()).toList(), h.asRational().get());
     }
     int size = p.size();
     List<Form> result = new ArrayList<>();
@@ -43,30 +44,28 @@ final class PolynomialSums {
     return result;
   }
 
-  private static List<Form> rational(List<Rational> p, Form step) {
-    int size = p.size();
-    Rational h = step.asRational().orElseThrow();
-    List<Rational> weights = new ArrayList<>();
-    List<Rational> reversed = new ArrayList<>();
-    Rational power = h.inverse();
-    Rational inverseFactorial = Rational.ONE;
-    Rational factorial = Rational.ONE;
-    for (int k = 0; k < size; k++) {
-      if (k > 0) {
-        inverseFactorial = inverseFactorial.dividedBy(Rational.of(k));
-        factorial = factorial.times(Rational.of(k));
-      }
-      weights.add(Integers.bernoulli(k).times(power).times(inverseFactorial));
-      reversed.addFirst(p.get(k).times(factorial));
-      power = power.times(h);
+  /// With x = h y: the coordinates a_k of p in the falling powers y↓k give Σ a_k y↓(k+1)/(k+1).
+  private static List<Form> rational(List<Rational> p, Rational h) {
+    List<Rational> falling = DensePolynomial.of(scaled(p, h)).toFalling();
+    List<Rational> raised = new ArrayList<>();
+    raised.add(Rational.ZERO);
+    for (int k = 0; k < falling.size(); k++) {
+      raised.add(falling.get(k).times(Rational.of(1, k + 1)));
     }
-    DensePolynomial product = DensePolynomial.of(weights).times(DensePolynomial.of(reversed));
-    List<Form> result = new ArrayList<>();
-    result.add(Form.ZERO);
-    Rational scale = Rational.ONE;
-    for (int m = 0; m < size; m++) {
-      scale = scale.dividedBy(Rational.of(m + 1));
-      result.add(Form.of(product.coefficient(size - 1 - m).times(scale)));
+    List<Rational> sum = DensePolynomial.fromFalling(raised).coefficients();
+    return scaled(sum, h.inverse()).stream().map(Form::of).toList();
+  }
+
+  /// c_k r^k.
+  static List<Rational> scaled(List<Rational> coefficients, Rational r) {
+    if (r.isOne()) {
+      return coefficients;
+    }
+    List<Rational> result = new ArrayList<>();
+    Rational power = Rational.ONE;
+    for (Rational coefficient : coefficients) {
+      result.add(coefficient.times(power));
+      power = power.times(r);
     }
     return result;
   }
