@@ -232,13 +232,39 @@ public final class ShefferMap {
   }
 
   private ShefferMap product(ShefferMap first, List<ShefferMap> word) {
-    return new ShefferMap(
-        dual,
-        g.times(put(first.g, f)),
-        put(first.f, f),
-        first.w.times(put(w, first.inverse)),
-        put(inverse, first.inverse),
-        word);
+    boolean nestedInverse = hasRadical(inverse) && hasRadical(first.inverse);
+    boolean nestedF = hasRadical(f) && hasRadical(first.f);
+    if (nestedInverse && nestedF) {
+      throw new Refusal(Reason.NO_CLOSED_FORM, f);
+    }
+    if (nestedF) {
+      return first.inverse().product(inverse(), List.of()).inverse().withFactors(word);
+    }
+    Form symbolF = put(first.f, f);
+    Form symbolG = g.times(put(first.g, f));
+    if (!nestedInverse) {
+      Form weight = first.w.times(put(w, first.inverse));
+      return new ShefferMap(dual, symbolG, symbolF, weight, put(inverse, first.inverse), word);
+    }
+    Form series = InverseSeries.of(symbolF, dual, Form.of(dual));
+    Form weight = symbolG.isOne() ? symbolG : symbolG.substitute(dual, series).inverse();
+    List<ShefferMap> factored = word.isEmpty() ? joinedFactors(first) : word;
+    return new ShefferMap(dual, symbolG, symbolF, weight, series, factored);
+  }
+
+  private List<ShefferMap> joinedFactors(ShefferMap first) {
+    List<ShefferMap> all = new ArrayList<>(factorsOrSelf());
+    all.addAll(first.factorsOrSelf());
+    return all;
+  }
+
+  private ShefferMap withFactors(List<ShefferMap> word) {
+    return word.isEmpty() ? this : new ShefferMap(dual, g, f, w, inverse, word);
+  }
+
+  /// Whether a root of something that depends on t occurs; roots of roots are not formed.
+  private boolean hasRadical(Form form) {
+    return Kernels.anyMatch(form, kernel -> kernel.isAlgebraic() && kernel.dependsOn(dual));
   }
 
   private boolean isInverseOf(ShefferMap other) {
