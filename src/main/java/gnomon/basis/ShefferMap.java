@@ -13,6 +13,7 @@ import gnomon.series.LazySeries;
 import gnomon.series.PowerSeries;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 
 /// The Sheffer map U of a pair (g, f): the linear map that carries x^n to s_n(x), where Σ s_n(x)
 /// t^n/n! = w(t) e^(x F(t)) with F = f̄, the compositional inverse of f, and w = 1/g(f̄).
@@ -144,22 +145,41 @@ public final class ShefferMap {
 
   /// The series of g to the order.
   public PowerSeries gSeries(int order) {
-    return gSeries.to(order);
+    return expanded(gSeries, order).orElseGet(() -> composed(wSeries, fSeries, order));
   }
 
   /// The series of f to the order.
   public PowerSeries fSeries(int order) {
-    return fSeries.to(order);
+    return expanded(fSeries, order).orElseGet(() -> reversed(inverseSeries, order));
   }
 
   /// The series of w to the order.
   public PowerSeries weightSeries(int order) {
-    return wSeries.to(order);
+    return expanded(wSeries, order).orElseGet(() -> composed(gSeries, inverseSeries, order));
   }
 
   /// The series of f̄ to the order.
   public PowerSeries inverseSeries(int order) {
-    return inverseSeries.to(order);
+    return expanded(inverseSeries, order).orElseGet(() -> reversed(fSeries, order));
+  }
+
+  /// The expansion of the form itself, which may fail where singular parts cancel only in the
+  /// whole.
+  private static Optional<PowerSeries> expanded(LazySeries series, int order) {
+    try {
+      return Optional.of(series.to(order));
+    } catch (Refusal refusal) {
+      return Optional.empty();
+    }
+  }
+
+  /// 1/outer(inner).
+  private static PowerSeries composed(LazySeries outer, LazySeries inner, int order) {
+    return outer.to(order).compose(inner.to(Math.max(1, order))).truncated(order).inverse();
+  }
+
+  private static PowerSeries reversed(LazySeries series, int order) {
+    return series.to(Math.max(1, order)).reversion().truncated(order);
   }
 
   /// Whether this is the identity, decided where f and g are closed forms.

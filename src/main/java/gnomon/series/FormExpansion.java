@@ -23,7 +23,9 @@ import gnomon.number.Rational;
 import gnomon.polynomial.Indeterminate;
 import gnomon.polynomial.Monomial;
 import gnomon.polynomial.Polynomial;
+import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 
@@ -58,9 +60,21 @@ final class FormExpansion {
       return PowerSeries.constant(form, work);
     }
     Monomial below = form.denominator().monomialContent();
-    PowerSeries top = polynomial(form.numerator(), below);
+    Part top = polynomial(form.numerator(), below);
     Polynomial rest = form.denominator().times(below.power(Rational.MINUS_ONE));
-    return rest.isOne() ? top : top.times(inverse(polynomial(rest, Monomial.ONE)));
+    Part bottom = rest.isOne() ? Part.of(PowerSeries.constant(Form.ONE, work)) : polynomial(rest);
+    if (!top.singular().equals(bottom.singular())) {
+      throw new Refusal(Reason.NO_SERIES, form);
+    }
+    return rest.isOne() ? top.series() : top.series().times(inverse(bottom.series()));
+  }
+
+  /// A series times the powers b^s of fixed bases b with exponents s singular at t = 0, given by
+  /// their coefficients of t^(−1), t^(−2), …. In a quotient they may cancel.
+  private record Part(PowerSeries series, Map<Base, List<Form>> singular) {
+    static Part of(PowerSeries series) {
+      return new Part(series, Map.of());
+    }
   }
 
   private static PowerSeries inverse(PowerSeries series) {
@@ -71,28 +85,35 @@ final class FormExpansion {
   }
 
   /// The polynomial divided by a monomial, so that exponents that cancel are not expanded apart.
-  private PowerSeries polynomial(Polynomial polynomial, Monomial below) {
+  private Part polynomial(Polynomial polynomial, Monomial below) {
     Rational ofT = below.exponent(t);
     Monomial others = below.without(t);
     if (ofT.isInteger()) {
       Polynomial quotient = polynomial.times(others.power(Rational.MINUS_ONE));
       Optional<PowerSeries> fast = ExponentialSums.expand(quotient, t, work);
       if (fast.isPresent()) {
-        return fast.get().shifted(-ofT.intValueExact());
+        return Part.of(fast.get().shifted(-ofT.intValueExact()));
       }
     }
     return termByTerm(polynomial, below);
   }
 
-  private PowerSeries termByTerm(Polynomial polynomial, Monomial below) {
-    PowerSeries sum = null;
+  private Part polynomial(Polynomial polynomial) {
+    return polynomial(polynomial, Monomial.ONE);
+  }
+
+  private Part termByTerm(Polynomial polynomial, Monomial below) {
+    Part sum = null;
     for (var term : polynomial.terms()) {
       Budget.checkpoint();
-      PowerSeries part =
-          monomial(term.monomial().dividedBy(below)).times(Form.of(term.coefficient()));
-      sum = sum == null ? part : sum.plus(part);
+      Part part = monomial(term.monomial().dividedBy(below));
+      PowerSeries series = part.series().times(Form.of(term.coefficient()));
+      if (sum != null && !sum.singular().equals(part.singular())) {
+        throw new Refusal(Reason.NO_SERIES, Form.of(polynomial));
+      }
+      sum = new Part(sum == null ? series : sum.series().plus(series), part.singular());
     }
-    return sum == null ? PowerSeries.zero(work) : sum;
+    return sum == null ? Part.of(PowerSeries.zero(work)) : sum;
   }
 
   /// The running product of the factors of a monomial.
@@ -101,13 +122,14 @@ final class FormExpansion {
     Form free = Form.ONE;
     Form exponent = Form.ZERO;
     final Map<Base, PowerSeries> powers = new HashMap<>();
+    final Map<Base, List<Form>> singular = new HashMap<>();
 
     Product(int work) {
       series = PowerSeries.constant(Form.ONE, work);
     }
   }
 
-  private PowerSeries monomial(Monomial monomial) {
+  private Part monomial(Monomial monomial) {
     Product product = new Product(work);
     for (var factor : monomial.factors()) {
       multiply(product, factor.indeterminate(), factor.exponent());
@@ -119,7 +141,7 @@ final class FormExpansion {
             .asInteger()
             .map(java.math.BigInteger::intValueExact)
             .orElseThrow(() -> new Refusal(Reason.NO_SERIES, "t", product.exponent));
-    return product.series.times(product.free).shifted(shift);
+    return new Part(product.series.times(product.free).shifted(shift), product.singular);
   }
 
   private void multiply(Product product, Indeterminate indeterminate, Rational exponent) {
@@ -168,14 +190,19 @@ final class FormExpansion {
 
   /// The factor base^u for a base free of t and a series u.
   private static void multiplyFixedBase(Product product, Base base, PowerSeries u) {
-    if (u.valuation() < 0) {
-      throw new Refusal(Reason.NO_SERIES, base.value());
-    }
     if (u.order() < 0) {
       throw new TooShort();
     }
+    if (u.valuation() < 0) {
+      List<Form> poles = new ArrayList<>();
+      for (int k = -1; k >= u.valuation(); k--) {
+        poles.add(u.coefficient(k));
+      }
+      product.singular.put(base, poles);
+    }
     Form start = u.coefficient(0);
-    PowerSeries rest = u.minus(PowerSeries.constant(start, u.order()));
+    PowerSeries rest = PowerSeries.of(u.coefficients(), 0, u.order());
+    rest = rest.minus(PowerSeries.constant(start, u.order()));
     product.free = product.free.times(Elementary.power(base.value(), start));
     product.series = product.series.times(rest.times(base.logarithm()).exp());
   }

@@ -64,7 +64,6 @@ record RandomMaps(Variable variable, RandomGenerator random) {
             exp(number()),
             exp(one).plus(one),
             exp(one).minus(one).dividedBy(t),
-            Elementary.exp(t.power(2).times(Rational.HALF)),
             one.minus(t).power(-2)));
   }
 
@@ -76,6 +75,16 @@ record RandomMaps(Variable variable, RandomGenerator random) {
     while (true) {
       ShefferMap map = map();
       if (map.isClosed()) {
+        return map;
+      }
+    }
+  }
+
+  /// A closed map whose inverse needs no roots.
+  ShefferMap mapWithoutRoots() {
+    while (true) {
+      ShefferMap map = closedMap();
+      if (!Kernels.anyMatch(map.inverseOfF(), kernel -> kernel.isAlgebraic())) {
         return map;
       }
     }

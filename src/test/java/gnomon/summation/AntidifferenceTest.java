@@ -64,7 +64,7 @@ class AntidifferenceTest {
 
   @Test
   void sumsOfDifferencesComeBackUpToAConstant() {
-    for (long seed = 0; seed < 60; seed++) {
+    for (long seed = 0; seed < 40; seed++) {
       RandomSums random = new RandomSums(x, new SplittableRandom(seed));
       Form step = random.step();
       Form sum = random.antidifference();
@@ -108,9 +108,8 @@ class AntidifferenceTest {
 
   @Test
   void aSummandOutsideEveryClassIsGivenUp() {
-    for (Form f : List.of(Combinatorial.factorial(x), Elementary.ln(x))) {
-      assertInstanceOf(Antidifference.GaveUp.class, ENGINE.search(f, X, Form.ONE));
-    }
+    Antidifference outcome = ENGINE.search(Elementary.ln(x), X, Form.ONE);
+    assertInstanceOf(Antidifference.GaveUp.class, outcome);
   }
 
   @Test
