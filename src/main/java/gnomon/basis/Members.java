@@ -19,12 +19,23 @@ import java.util.Optional;
 /// Source: S. Roman, The Umbral Calculus (1984), theorem 2.4.5 and 3.7.1, from memory.
 final class Members {
 
+  /// Below this index the transfer formula is the shorter way.
+  private static final int SMALL_INDEX = 30;
+
   private Members() {}
 
   /// The coefficients of s_n in ascending powers.
   static List<Form> coefficients(ShefferMap map, int n) {
     requireIndex(n);
     Budget.charge((long) n * n / 4);
+    Optional<Recurrence> recurrence = n < SMALL_INDEX ? Optional.empty() : Recurrence.of(map);
+    return recurrence.isPresent()
+        ? recurrence.get().upTo(n, map.weightSeries(0).coefficient(0)).getLast()
+        : byTransferFormula(map, n);
+  }
+
+  /// f'(D) (D/f(D))^(n+1) g(D)⁻¹ x^n.
+  static List<Form> byTransferFormula(ShefferMap map, int n) {
     if (ShefferMap.containsInverseSeries(map.f())
         && !ShefferMap.containsInverseSeries(map.inverseOfF())) {
       List<Form> unit = new ArrayList<>(java.util.Collections.nCopies(n, Form.ZERO));
@@ -50,10 +61,29 @@ final class Members {
     requireIndex(n);
     Budget.charge((long) n * n / 2);
     Optional<Recurrence> recurrence = Recurrence.of(map);
+    if (map.f().equals(Form.of(map.dual()))) {
+      return appell(map.weightSeries(n), n);
+    }
     if (recurrence.isPresent()) {
       return recurrence.get().upTo(n, map.weightSeries(0).coefficient(0));
     }
     return byPowers(map, n);
+  }
+
+  /// s_n = Σ_k (n!/k!) w_(n−k) x^k, for f = t.
+  private static List<List<Form>> appell(PowerSeries weight, int last) {
+    List<List<Form>> members = new ArrayList<>();
+    for (int n = 0; n <= last; n++) {
+      Budget.checkpoint();
+      Form[] member = new Form[n + 1];
+      Rational falling = Rational.ONE;
+      for (int k = n; k >= 0; k--) {
+        member[k] = weight.coefficient(n - k).times(falling);
+        falling = falling.times(Rational.of(k));
+      }
+      members.add(List.of(member));
+    }
+    return members;
   }
 
   /// s_n = Σ_k (n!/k!) [t^n] w F^k x^k, all n together.

@@ -103,8 +103,16 @@ class MapLawsTest {
         String where = "seed " + seed + ": " + map + ", n = " + n;
         assertEquals(trimmed(map.member(n)), trimmed(matrix.get(n)), where);
         assertEquals(trimmed(map.member(n)), trimmed(map.image(power)), where);
+        assertEquals(trimmed(map.member(n)), trimmed(Members.byTransferFormula(map, n)), where);
         assertEquals(trimmed(map.member(n)), trimmed(PolynomialImages.byPowers(map, power)), where);
       }
+    }
+  }
+
+  @Test
+  void membersOfHighDegreeAgreeWithTheTransferFormula() {
+    for (ShefferMap map : List.of(delta(), delta().inverse())) {
+      assertEquals(trimmed(Members.byTransferFormula(map, 45)), trimmed(map.member(45)));
     }
   }
 
