@@ -88,7 +88,8 @@ final class Application {
       DefiniteSum sum =
           new DefiniteSums(evaluation.sums())
               .sum(summand, k, Form.ZERO, Form.of(x).minus(Form.ONE));
-      evaluation.status(RangeSums.status(sum, evaluation.writing(), x));
+      evaluation.met(RangeSums.status(sum, evaluation.writing(), x));
+      evaluation.require(sum.conditions());
       return Sorts.of(sum.value(), scope);
     }
   }

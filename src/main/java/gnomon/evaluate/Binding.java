@@ -1,6 +1,7 @@
 package gnomon.evaluate;
 
 import gnomon.form.Variable;
+import gnomon.summation.Condition;
 import gnomon.syntax.Expression;
 import gnomon.value.Value;
 import java.util.List;
@@ -9,8 +10,14 @@ import java.util.List;
 public sealed interface Binding {
 
   /// A value named by `let`, or an earlier result. The expression and the scope it was evaluated in
-  /// are kept, because an operator acts on the running variable of the place where it is used.
-  record Named(Value value, Expression expression, Scope scope) implements Binding {}
+  /// are kept, because an operator acts on the running variable of the place where it is used, and
+  /// because a closed form in the value may not hold where its conditions fail.
+  record Named(Value value, Expression expression, Scope scope, List<Condition> conditions)
+      implements Binding {
+    public Named {
+      conditions = List.copyOf(conditions);
+    }
+  }
 
   /// A function defined by `let`.
   record Rule(String name, List<String> parameters, Expression body, Scope scope)

@@ -49,7 +49,17 @@ final class Claims {
     }
     Value left = evaluator.value(claim.left(), scope);
     Value right = evaluator.value(claim.right(), scope);
-    return Places.at(claim.span(), () -> decided(left, right, claim.span(), scope));
+    return Places.at(
+        claim.span(), () -> conditioned(decided(left, right, claim.span(), scope), scope));
+  }
+
+  /// A proof holds where the closed forms in it do.
+  private VerdictValue conditioned(VerdictValue verdict, Scope scope) {
+    if (verdict instanceof Proved(Ground ground, String _)) {
+      Conditions conditions = new Conditions(evaluation.writing(), scope.running());
+      return new Proved(ground, conditions.words(evaluation.conditions()));
+    }
+    return verdict;
   }
 
   // ---------------------------------------------------------------- ranges

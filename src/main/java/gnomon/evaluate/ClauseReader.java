@@ -9,6 +9,7 @@ import gnomon.form.Structure;
 import gnomon.form.Variable;
 import gnomon.operator.Operator;
 import gnomon.series.Expansion;
+import gnomon.summation.Condition;
 import gnomon.syntax.Clause;
 import gnomon.syntax.Expression;
 import gnomon.syntax.Presentation;
@@ -43,10 +44,18 @@ final class ClauseReader {
     if (clauses.getLast() instanceof Clause.For table) {
       return tables.value(before(clausal), table, scope);
     }
+    List<Condition> earlier = evaluation.conditions();
     Value value = evaluator.value(clausal.subject(), scope);
     int at = 0;
     while (at < clauses.size()) {
       Clause clause = clauses.get(at);
+      if (clause instanceof Clause.At values
+          && Validity.fails(evaluation.conditions(), substitutions.images(values, scope))) {
+        evaluation.conditions(earlier);
+        value = evaluator.value(upTo(clausal, at), substitutions.holding(values, scope));
+        at++;
+        continue;
+      }
       Value before = value;
       Optional<Clause.To> order =
           at + 1 < clauses.size() && clauses.get(at + 1) instanceof Clause.To to
@@ -68,7 +77,12 @@ final class ClauseReader {
 
   /// The expression without its last clause.
   private static Expression before(Expression.Clauses clausal) {
-    List<Clause> rest = clausal.clauses().subList(0, clausal.clauses().size() - 1);
+    return upTo(clausal, clausal.clauses().size() - 1);
+  }
+
+  /// The expression with its first clauses only.
+  private static Expression upTo(Expression.Clauses clausal, int count) {
+    List<Clause> rest = clausal.clauses().subList(0, count);
     return rest.isEmpty()
         ? clausal.subject()
         : new Expression.Clauses(

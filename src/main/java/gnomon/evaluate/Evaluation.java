@@ -2,8 +2,13 @@ package gnomon.evaluate;
 
 import gnomon.algebra.Budget;
 import gnomon.diagnostic.Span;
+import gnomon.form.Form;
+import gnomon.summation.Condition;
 import gnomon.summation.SummationEngine;
+import gnomon.syntax.Condition.Relation;
 import gnomon.value.Status;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.function.Supplier;
 
 /// What is gathered and counted while one statement is evaluated: calls of defined functions, the
@@ -14,6 +19,7 @@ final class Evaluation {
   private final SummationEngine sums;
   private final Writing writing;
   private final Grounds grounds;
+  private final List<Condition> conditions = new ArrayList<>();
   private Status status = Status.NONE;
   private Assumptions implied = Assumptions.NONE;
   private int calls;
@@ -72,6 +78,36 @@ final class Evaluation {
 
   void status(Status other) {
     status = other;
+  }
+
+  /// The status of one more sum: of several sums the least that is known.
+  void met(Status other) {
+    status = other.kind().compareTo(status.kind()) >= 0 ? other : status;
+  }
+
+  /// The side conditions of the closed forms met so far.
+  List<Condition> conditions() {
+    return List.copyOf(conditions);
+  }
+
+  /// Notes side conditions, under which witnesses are looked for from now on.
+  void require(List<Condition> more) {
+    for (Condition condition : more) {
+      if (!conditions.contains(condition)) {
+        conditions.add(condition);
+        if (condition.relation() == Condition.Relation.NATURAL) {
+          implies(
+              Assumptions.NONE.with(
+                  new Assumptions.Comparison(condition.subject(), Relation.AT_LEAST, Form.ZERO)));
+        }
+      }
+    }
+  }
+
+  /// Goes back to these side conditions.
+  void conditions(List<Condition> earlier) {
+    conditions.clear();
+    conditions.addAll(earlier);
   }
 
   /// What the ranges met so far take for granted: symbolic limits are integers.

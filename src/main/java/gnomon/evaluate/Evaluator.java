@@ -21,13 +21,20 @@ final class Evaluator {
   private final Binders binders;
   private final ClauseReader clauses;
   private final Matrices matrices = new Matrices();
+  private final Evaluation evaluation;
 
   Evaluator(Evaluation evaluation) {
+    this.evaluation = evaluation;
     this.arithmetic = new Arithmetic(evaluation);
     this.names = new Names(this);
     this.terms = new Terms(this, new Calls(this, evaluation), arithmetic);
     this.binders = new Binders(this, evaluation);
     this.clauses = new ClauseReader(this, evaluation);
+  }
+
+  /// What is gathered while this evaluator works.
+  Evaluation evaluation() {
+    return evaluation;
   }
 
   /// The value of the expression; what goes wrong carries its place.

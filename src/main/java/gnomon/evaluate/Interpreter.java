@@ -43,7 +43,7 @@ public final class Interpreter {
   public Answer value(Expression expression, Scope scope) {
     Evaluation evaluation = evaluation();
     Value value = new Evaluator(evaluation).value(expression, scope);
-    return answer(simplified(value, scope), evaluation);
+    return answer(simplified(value, scope), evaluation, scope.running());
   }
 
   /// The verdict on a claim.
@@ -80,8 +80,13 @@ public final class Interpreter {
     return new Evaluation(depth, calls, sums, writing, false);
   }
 
-  private static Answer answer(Value value, Evaluation evaluation) {
-    return new Answer(value, status(value, evaluation.status()), Derivation.NONE);
+  private static Answer answer(Value value, Evaluation evaluation, Variable running) {
+    Status status = status(value, evaluation.status());
+    if (status.kind() == Status.Kind.CLOSED_FORM) {
+      Conditions conditions = new Conditions(evaluation.writing(), running);
+      status = status.withDetail(conditions.words(evaluation.conditions()));
+    }
+    return new Answer(value, status, Derivation.NONE, evaluation.conditions());
   }
 
   /// What is known of the value: of the sums met on the way only what still holds of the value.
@@ -110,7 +115,7 @@ public final class Interpreter {
   public Definition let(Statement.Let let, Scope scope) {
     refuseWord(let.name());
     Answer answer = value(let.body(), scope);
-    Binding.Named named = new Binding.Named(answer.value(), let.body(), scope);
+    Binding.Named named = new Binding.Named(answer.value(), let.body(), scope, answer.conditions());
     return new Definition(scope.with(let.name().text(), named), answer);
   }
 
@@ -181,8 +186,8 @@ public final class Interpreter {
   }
 
   /// The scope with one more result, which was evaluated in the scope `at`.
-  public static Scope withResult(Scope scope, Value value, Expression expression, Scope at) {
-    return scope.withResult(new Binding.Named(value, expression, at));
+  public static Scope withResult(Scope scope, Answer answer, Expression expression, Scope at) {
+    return scope.withResult(new Binding.Named(answer.value(), expression, at, answer.conditions()));
   }
 
   /// The scope in which operators act on another variable.

@@ -7,6 +7,7 @@ import gnomon.form.Form;
 import gnomon.form.Unknown;
 import gnomon.form.Variable;
 import gnomon.operator.Operator;
+import gnomon.summation.Condition;
 import gnomon.syntax.Expression;
 import gnomon.syntax.Suffix;
 import gnomon.syntax.Vocabulary;
@@ -92,10 +93,32 @@ final class Names {
 
   private Value here(Binding.Named named, Span span, Scope scope) {
     boolean moved = !named.scope().running().equals(scope.running());
+    if (!named.conditions().isEmpty()) {
+      Optional<Scope> held = held(named, scope);
+      if (held.isPresent()) {
+        return Places.calledFrom(span, () -> evaluator.value(named.expression(), held.get()));
+      }
+      evaluator.evaluation().require(named.conditions());
+    }
     return moved && Sorts.acts(named.value())
         ? Places.calledFrom(
             span, () -> evaluator.value(named.expression(), named.scope().running(scope.running())))
         : Expansions.settled(named.value());
+  }
+
+  /// The scope of a named value with the numbers that variables of its conditions have here.
+  private static Optional<Scope> held(Binding.Named named, Scope scope) {
+    Scope inside = named.scope();
+    boolean any = false;
+    for (Condition condition : named.conditions()) {
+      for (Variable variable : condition.subject().variables()) {
+        if (scope.binding(variable.name()).orElse(null) instanceof Binding.Held number) {
+          inside = inside.with(variable.name(), number);
+          any = true;
+        }
+      }
+    }
+    return any ? Optional.of(inside) : Optional.empty();
   }
 
   private Value unbound(Expression.Name name, Scope scope) {

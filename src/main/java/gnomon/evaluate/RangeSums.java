@@ -2,10 +2,12 @@ package gnomon.evaluate;
 
 import gnomon.algebra.Halt;
 import gnomon.diagnostic.DiagnosedException;
+import gnomon.diagnostic.Diagnostic;
 import gnomon.diagnostic.Span;
 import gnomon.evaluate.Binders.Limits;
 import gnomon.form.Form;
 import gnomon.form.Variable;
+import gnomon.summation.Condition;
 import gnomon.summation.DefiniteProducts;
 import gnomon.summation.DefiniteSum;
 import gnomon.summation.DefiniteSums;
@@ -18,6 +20,7 @@ import gnomon.value.Value;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 
 /// Sums and products over a range of integers. Functions go to the summation engine; a body that
@@ -44,8 +47,19 @@ final class RangeSums {
   /// The body as a function of the bound variable; between numbers it need not be one.
   private Optional<Form> symbolic(Limits limits, Expression body, Scope scope) {
     Scope inside = scope.with(limits.variable().name(), new Binding.Bound(limits.variable()));
+    List<Condition> earlier = evaluation.conditions();
     try {
+      evaluation.conditions(List.of());
       Value value = evaluator.value(body, inside);
+      List<Condition> met = evaluation.conditions();
+      evaluation.conditions(earlier);
+      if (Validity.fails(met, Map.of(limits.variable(), limits.lower()))) {
+        return withoutClosedForm(limits, met, body);
+      }
+      evaluation.require(
+          met.stream()
+              .filter(c -> !Validity.concerns(c, Map.of(limits.variable(), Form.ZERO)))
+              .toList());
       if (value instanceof FormValue form) {
         return Optional.of(form.form());
       }
@@ -57,11 +71,28 @@ final class RangeSums {
       }
       return Optional.empty();
     } catch (LocatedRefusal | DiagnosedException needsNumbers) {
+      evaluation.conditions(earlier);
       if (limits.isNumeric()) {
         return Optional.empty();
       }
       throw needsNumbers;
     }
+  }
+
+  /// A body whose closed form does not hold on the whole range: between numbers it is evaluated for
+  /// each, otherwise refused.
+  private Optional<Form> withoutClosedForm(
+      Limits limits, List<Condition> conditions, Expression body) {
+    if (limits.isNumeric()) {
+      return Optional.empty();
+    }
+    String words = new Conditions(evaluation.writing(), limits.variable()).words(conditions);
+    throw new DiagnosedException(
+        Diagnostic.of(
+                "domain-validity",
+                "the closed form of the summand does not hold on the range",
+                body.span())
+            .withEvidence("It holds " + words + "."));
   }
 
   private Value ofForm(Limits limits, Form body, boolean adding, Scope scope) {
@@ -85,7 +116,8 @@ final class RangeSums {
     } else {
       sum = new InfiniteSums(engine).sum(body, k, limits.lower());
     }
-    evaluation.status(status(sum, evaluation.writing(), scope.running()));
+    evaluation.met(status(sum, evaluation.writing(), scope.running()));
+    evaluation.require(sum.conditions());
     sum.antidifference().ifPresent(found -> record(found, body, sum.value(), limits));
     sum.recurrence().ifPresent(found -> new RecurrenceSteps(evaluation, k).record(found));
     return Sorts.of(sum.value(), scope);

@@ -8,31 +8,44 @@ import gnomon.diagnostic.Span;
 import gnomon.form.Accumulation;
 import gnomon.form.Form;
 import gnomon.form.Variable;
+import gnomon.summation.Condition;
 import gnomon.syntax.Expression;
 import gnomon.value.FormValue;
 import gnomon.value.Value;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 
 /// The values of an expression for each integer in a range. It is evaluated once with the variable
 /// free where that gives a form without standing sums, else anew for each integer.
 final class RangeValues {
   private final Evaluator evaluator;
+  private final Evaluation evaluation;
 
   RangeValues(Evaluator evaluator) {
     this.evaluator = evaluator;
+    this.evaluation = evaluator.evaluation();
   }
 
   List<Value> values(
       Variable variable, BigInteger first, BigInteger last, Expression body, Scope scope) {
+    List<Condition> earlier = evaluation.conditions();
+    evaluation.conditions(List.of());
     Optional<FormValue> symbolic = symbolic(variable, body, scope);
+    List<Condition> conditions = evaluation.conditions();
+    evaluation.conditions(earlier);
     List<Value> values = new ArrayList<>();
     for (BigInteger k = first; k.compareTo(last) <= 0; k = k.add(BigInteger.ONE)) {
       Budget.checkpoint();
-      values.add(valueAt(variable, k, symbolic, body, scope));
+      boolean valid = !Validity.fails(conditions, Map.of(variable, Form.of(k)));
+      values.add(valueAt(variable, k, symbolic.filter(_ -> valid), body, scope));
     }
+    evaluation.require(
+        conditions.stream()
+            .filter(c -> !Validity.concerns(c, Map.of(variable, Form.ZERO)))
+            .toList());
     return values;
   }
 

@@ -34,13 +34,28 @@ final class Substitutions {
   }
 
   Value value(Value subject, Clause.At clause, Scope scope) {
+    return put(subject, images(clause, scope), clause.span(), scope);
+  }
+
+  /// The scope in which the variables have their values.
+  Scope holding(Clause.At clause, Scope scope) {
+    Scope inside = scope;
+    for (Map.Entry<Generator, Form> image : images(clause, scope).entrySet()) {
+      Binding held = new Binding.Held(Sorts.of(image.getValue(), scope));
+      inside = inside.with(image.getKey().key(), held);
+    }
+    return inside;
+  }
+
+  /// What is put in for which variable.
+  Map<Generator, Form> images(Clause.At clause, Scope scope) {
     Map<Generator, Form> images = new HashMap<>();
     for (Clause.Substitution substitution : clause.substitutions()) {
       Variable variable = new Variable(substitution.variable().text());
       Value image = evaluator.value(substitution.value(), scope);
       images.put(variable, Sorts.form(image, substitution.value().span(), "what is put in"));
     }
-    return put(subject, images, clause.span(), scope);
+    return images;
   }
 
   private Value put(Value subject, Map<Generator, Form> images, Span span, Scope scope) {

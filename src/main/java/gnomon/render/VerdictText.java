@@ -21,19 +21,20 @@ final class VerdictText {
   /// One line for the verdict.
   String of(VerdictValue verdict) {
     return switch (verdict) {
-      case VerdictValue.Proved(Ground ground) -> proved(ground);
+      case VerdictValue.Proved(Ground ground, String condition) -> proved(ground, condition);
       case VerdictValue.Refuted(Witness witness) -> words("refuted: ") + refuted(witness);
       case VerdictValue.Open(String checked, String reason) ->
           words("open: " + checked + (reason.isEmpty() ? "" : "; " + reason));
     };
   }
 
-  private String proved(Ground ground) {
+  private String proved(Ground ground, String condition) {
+    String word = condition.isEmpty() ? "proved" : "proved " + condition;
     return switch (ground) {
       case Ground.NormalForm(Value common) ->
-          words("proved: both sides have the normal form ") + rendering.line(common);
+          words(word + ": both sides have the normal form ") + rendering.line(common);
       case Ground.EachPoint(Variable variable, Form from, Form to) ->
-          words("proved for ")
+          words(condition.isEmpty() ? "proved for " : word + ", ")
               + variable.name()
               + words(": ")
               + rendering.form(from)
@@ -41,7 +42,7 @@ final class VerdictText {
               + rendering.form(to)
               + words(", by checking each point");
       case Ground.Words(String words, var evidence) ->
-          words("proved: " + words + (evidence.isPresent() ? " " : ""))
+          words(word + ": " + words + (evidence.isPresent() ? " " : ""))
               + evidence.map(rendering::line).orElse("");
     };
   }

@@ -177,7 +177,7 @@ final class Conversation {
 
   private Outcome answered(
       State state, Scope scope, Expression expression, Statement statement, Answer answer) {
-    Scope next = Interpreter.withResult(scope, answer.value(), expression, state.scope());
+    Scope next = Interpreter.withResult(scope, answer, expression, state.scope());
     Shown shown = new ShownValue(answer.value(), state.scope().running());
     boolean verdict = answer.value() instanceof VerdictValue;
     return new Outcome(

@@ -4,7 +4,8 @@ import gnomon.form.Form;
 import java.util.List;
 
 /// A truncated series Σ coefficients\[j\] · element(first + j), with everything from element(order)
-/// on left out; `exp(x) to 6` has order 7, and a finite sum has the order [#EXACT]. Zero coefficients at both ends are dropped.
+/// on left out; `exp(x) to 6` has order 7, and a finite sum has the order [#EXACT]. Zero
+/// coefficients at both ends are dropped.
 public record SeriesValue(Family family, int first, List<Form> coefficients, int order)
     implements Value {
   /// The order of a series that leaves nothing out.

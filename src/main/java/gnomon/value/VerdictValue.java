@@ -8,8 +8,14 @@ import java.util.Optional;
 /// The outcome of a claim.
 public sealed interface VerdictValue extends Value {
 
-  /// The claim holds, on the stated ground.
-  record Proved(Ground ground) implements VerdictValue {
+  /// The claim holds, on the stated ground and under the condition in words, such as `for n >= 1`;
+  /// empty where there is none.
+  record Proved(Ground ground, String condition) implements VerdictValue {
+    /// Without a condition.
+    public Proved(Ground ground) {
+      this(ground, "");
+    }
+
     @Override
     public Status status() {
       return Status.of(Status.Kind.PROVED);

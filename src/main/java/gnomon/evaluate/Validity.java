@@ -1,0 +1,44 @@
+package gnomon.evaluate;
+
+import gnomon.algebra.Refusal;
+import gnomon.form.Form;
+import gnomon.form.Generator;
+import gnomon.summation.Condition;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.function.Predicate;
+
+/// Whether the side conditions of closed forms hold where values are put in.
+final class Validity {
+  private Validity() {}
+
+  /// Whether a condition that is about one of the variables is not known to hold at the values.
+  static boolean fails(List<Condition> conditions, Map<? extends Generator, Form> images) {
+    return conditions.stream()
+        .filter(condition -> concerns(condition, images))
+        .anyMatch(condition -> !holds(condition, images));
+  }
+
+  static boolean concerns(Condition condition, Map<? extends Generator, Form> images) {
+    return condition.relation() == Condition.Relation.NOT_IN_RANGE
+        || images.keySet().stream().anyMatch(condition.subject()::dependsOn);
+  }
+
+  private static boolean holds(Condition condition, Map<? extends Generator, Form> images) {
+    Form value;
+    try {
+      value = condition.subject().substitute(Map.copyOf(images));
+    } catch (Refusal undefined) {
+      return false;
+    }
+    Predicate<Form> test =
+        switch (condition.relation()) {
+          case NOT_ZERO -> form -> !form.isZero();
+          case INTEGER -> form -> form.asInteger().isPresent();
+          case NATURAL -> form -> form.asInteger().filter(n -> n.signum() >= 0).isPresent();
+          case NOT_IN_RANGE -> _ -> false;
+        };
+    return Optional.of(value).filter(test).isPresent();
+  }
+}
