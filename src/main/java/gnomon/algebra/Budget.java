@@ -83,6 +83,15 @@ public final class Budget {
     }
   }
 
+  /// Announces work on single integers of about `words` machine words. Their products cost more
+  /// than their length, so `words` times about its square root is charged.
+  ///
+  /// @throws Halt as [#charge(long)] does
+  public static void chargeInteger(long words) {
+    long half = (Long.SIZE - Long.numberOfLeadingZeros(words)) / 2;
+    charge(words >= 1L << 40 ? Long.MAX_VALUE : words << half);
+  }
+
   private void check() {
     if (cancelled) {
       throw new Halt(Halt.Cause.CANCELLED, 0);

@@ -12,7 +12,7 @@ final class Combinatorics {
   private Combinatorics() {}
 
   static BigInteger factorial(int n) {
-    Budget.charge((long) n * bits(n) / Long.SIZE + 1);
+    Budget.chargeInteger((long) n * bits(n) / Long.SIZE + 1);
     return product(1, n);
   }
 
@@ -42,7 +42,7 @@ final class Combinatorics {
   }
 
   private static BigInteger natural(long n, int k) {
-    Budget.charge((long) k * bits(n) / Long.SIZE + 1);
+    Budget.chargeInteger((long) k * bits(n) / Long.SIZE + 1);
     return product(n - k + 1, n).divide(product(1, k));
   }
 

@@ -294,7 +294,7 @@ public final class Rational implements Field<Rational>, Comparable<Rational> {
     if (equals(MINUS_ONE)) {
       return exponent % 2 == 0 ? ONE : this;
     }
-    Budget.charge(bitLength() * exponent / Long.SIZE + 1);
+    Budget.chargeInteger(bitLength() * exponent / Long.SIZE + 1);
     return lowest(numerator().pow(exponent), denominator().pow(exponent));
   }
 

@@ -58,7 +58,20 @@ final class Factoring {
       }
     }
     factors.sort(CANONICAL);
+    confirm(polynomial, factors);
     return new Factorization(unit(polynomial, factors), factors);
+  }
+
+  /// Leading monomials multiply: a lost or foreign factor shows.
+  private static void confirm(Polynomial polynomial, List<Factor> factors) {
+    Monomial product = Monomial.ONE;
+    for (Factor factor : factors) {
+      Monomial lead = factor.base().leadingTerm().monomial();
+      product = product.times(lead.power(Rational.of(factor.multiplicity())));
+    }
+    if (!product.equals(polynomial.leadingTerm().monomial())) {
+      throw new IllegalStateException("these are not all factors of " + polynomial);
+    }
   }
 
   private interface Method {

@@ -25,7 +25,21 @@ final class HeuristicGcd {
 
   /// For primitive natural integer polynomials.
   static Optional<Polynomial> of(Polynomial a, Polynomial b) {
-    return integral(a, b).map(Polynomial::primitivePart);
+    return estimatedBits(a, b) > MAX_BITS
+        ? Optional.empty()
+        : integral(a, b).map(Polynomial::primitivePart);
+  }
+
+  /// The length of the integers after all indeterminates have been replaced.
+  private static long estimatedBits(Polynomial a, Polynomial b) {
+    long bits = height(a).min(height(b)).bitLength() + 2L;
+    for (Indeterminate indeterminate : a.indeterminates()) {
+      long degree =
+          Math.max(
+              a.degree(indeterminate).intValueExact(), b.degree(indeterminate).intValueExact());
+      bits = Math.min(bits * (degree + 1), Integer.MAX_VALUE);
+    }
+    return bits;
   }
 
   /// The divisor over the integers, with its integer content.

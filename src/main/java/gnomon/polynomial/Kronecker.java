@@ -42,7 +42,7 @@ final class Kronecker {
   }
 
   private static int slot(long bits, long length) {
-    Budget.charge((bits / Long.SIZE + 1) * length);
+    Budget.chargeInteger((bits / Long.SIZE + 1) * length / 4);
     return Math.toIntExact((bits + Byte.SIZE - 1) / Byte.SIZE);
   }
 

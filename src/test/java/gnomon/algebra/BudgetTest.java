@@ -40,6 +40,26 @@ class BudgetTest {
   }
 
   @Test
+  void longIntegersAreChargedMoreThanTheirLength() {
+    Budget budget = Budget.of(Duration.ofMinutes(5), 1_000_000);
+    budget.run(
+        () -> {
+          Budget.charge(100_000);
+          return 0;
+        });
+    for (long words : new long[] {100_000, 1L << 40, Long.MAX_VALUE}) {
+      assertThrows(
+          Halt.class,
+          () ->
+              budget.run(
+                  () -> {
+                    Budget.chargeInteger(words);
+                    return 0;
+                  }));
+    }
+  }
+
+  @Test
   void workStopsWhenItsTimeIsUp() {
     Budget budget = Budget.of(Duration.ofMillis(20), Long.MAX_VALUE);
     Halt halt = assertThrows(Halt.class, () -> budget.run(BudgetTest::spin));
