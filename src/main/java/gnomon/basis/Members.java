@@ -22,6 +22,9 @@ final class Members {
   /// Below this index the transfer formula is the shorter way.
   private static final int SMALL_INDEX = 30;
 
+  /// Cells charged for n products of series of length n: n³ by this.
+  private static final int SERIES_SHARE = 256;
+
   private Members() {}
 
   /// The coefficients of s_n in ascending powers.
@@ -88,6 +91,7 @@ final class Members {
 
   /// s_n = Σ_k (n!/k!) [t^n] w F^k x^k, all n together.
   private static List<List<Form>> byPowers(ShefferMap map, int n) {
+    Budget.charge((long) n * n * n / SERIES_SHARE);
     List<List<Form>> members = new ArrayList<>();
     for (int j = 0; j <= n; j++) {
       members.add(new ArrayList<>());

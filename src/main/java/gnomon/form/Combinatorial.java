@@ -100,10 +100,7 @@ public final class Combinatorial {
   /// The constant part of an argument as an integer and a fraction in [0, 1).
   private record Split(int whole, Rational fraction) {
     static Split of(Form u) {
-      Rational constant = Rational.ZERO;
-      if (u.denominator().isConstant()) {
-        constant = constantTerm(u);
-      }
+      Rational constant = constantTerm(u);
       if (constant.abs().compareTo(Rational.of(FACTORS)) > 0) {
         throw new Refusal(Reason.OUT_OF_RANGE, Form.of(constant));
       }
@@ -111,10 +108,13 @@ public final class Combinatorial {
     }
   }
 
+  /// The number c for which u − c lacks the leading monomial of its denominator in the numerator:
+  /// the constant term of a polynomial, and additive on fractions too.
   private static Rational constantTerm(Form u) {
+    Term leading = u.denominator().terms().getFirst();
     for (Term term : u.numerator().terms()) {
-      if (term.monomial().isOne()) {
-        return term.coefficient();
+      if (term.monomial().equals(leading.monomial())) {
+        return term.coefficient().dividedBy(leading.coefficient());
       }
     }
     return Rational.ZERO;

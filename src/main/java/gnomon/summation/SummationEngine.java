@@ -1,5 +1,6 @@
 package gnomon.summation;
 
+import gnomon.algebra.Refusal;
 import gnomon.form.Form;
 import gnomon.form.Generator;
 import gnomon.form.Variable;
@@ -73,12 +74,21 @@ public final class SummationEngine implements Summation {
 
   private Antidifference tried(Form f, Variable x, Form h) {
     for (AntidifferenceSolver solver : solvers) {
-      Antidifference outcome = verified(solver.solve(f, x, h), f, x, h);
+      Antidifference outcome = attempt(solver, f, x, h);
       if (!(outcome instanceof Antidifference.GaveUp)) {
         return outcome;
       }
     }
     return new Antidifference.GaveUp(solvers.stream().map(AntidifferenceSolver::searches).toList());
+  }
+
+  /// The verified outcome of one solver; a refusal on its way means that it does not cover f.
+  private static Antidifference attempt(AntidifferenceSolver solver, Form f, Variable x, Form h) {
+    try {
+      return verified(solver.solve(f, x, h), f, x, h);
+    } catch (Refusal refusal) {
+      return new Antidifference.GaveUp(List.of(solver.searches()));
+    }
   }
 
   private static Antidifference verified(Antidifference outcome, Form f, Variable x, Form h) {

@@ -24,6 +24,21 @@ class CombinatorialTest {
   }
 
   @Test
+  void integersInsideFractionalArgumentsAreTakenOut() {
+    Form h = Form.variable("h");
+    Form ratio = n.dividedBy(h);
+    for (int m = -3; m <= 3; m++) {
+      Form shifted = n.plus(h.times(Form.of(m))).dividedBy(h);
+      Form factor = Combinatorial.rising(ratio.plus(Form.ONE), Form.of(Math.max(m, 0)));
+      Form divisor = Combinatorial.falling(ratio, Form.of(Math.max(-m, 0)));
+      Form expected = Combinatorial.factorial(ratio).times(factor).dividedBy(divisor);
+      assertEquals(expected, Combinatorial.factorial(shifted), "m = " + m);
+    }
+    Form next = Combinatorial.harmonic(ratio.plus(Form.ONE));
+    assertEquals(h.dividedBy(n.plus(h)), next.minus(Combinatorial.harmonic(ratio)));
+  }
+
+  @Test
   void binomialsHaveTheirValuesAlsoForNegativeTopAndBelowTheDiagonal() {
     Form symbol = Combinatorial.binomial(n, k);
     for (int top = -6; top <= 6; top++) {

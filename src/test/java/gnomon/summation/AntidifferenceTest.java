@@ -87,6 +87,21 @@ class AntidifferenceTest {
   }
 
   @Test
+  void aSymbolicStepScalesTheHarmonicNumbers() {
+    Form h = Form.variable("h");
+    Antidifference outcome = ENGINE.search(x.inverse(), X, h);
+    Form sum = assertInstanceOf(Antidifference.Found.class, outcome).value();
+    Form expected = Combinatorial.harmonic(x.dividedBy(h).minus(Form.ONE)).dividedBy(h);
+    assertEquals(expected, sum);
+  }
+
+  @Test
+  void aSummandThatASolverStumblesOverIsGivenUp() {
+    Antidifference outcome = ENGINE.search(Elementary.power(Form.ZERO, x), X, Form.ONE);
+    assertInstanceOf(Antidifference.GaveUp.class, outcome);
+  }
+
+  @Test
   void aRationalSummandIsProvedToHaveNoRationalSum() {
     Form f = x.power(2).plus(Form.ONE).inverse();
     Antidifference absent = new Antidifference.ProvedAbsent(FunctionClass.RATIONAL);
