@@ -4,6 +4,7 @@ import static gnomon.polynomial.PolynomialTest.x;
 import static gnomon.polynomial.PolynomialTest.y;
 import static gnomon.polynomial.PolynomialTest.z;
 import static gnomon.polynomial.RandomPolynomials.X;
+import static org.junit.jupiter.api.Assertions.assertArrayEquals;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
@@ -85,7 +86,7 @@ class FactoringTest {
   /// practice).
   @Test
   void powersMinusOneHaveOneFactorForEachDivisor() {
-    for (int n : new int[] {1, 2, 6, 12, 30, 36}) {
+    for (int n : new int[] {1, 2, 6, 12, 30, 36, 105, 200, 210}) {
       Polynomial polynomial = x.power(n).minus(ONE);
       int divisors = 0;
       for (int d = 1; d <= n; d++) {
@@ -101,6 +102,54 @@ class FactoringTest {
   void degreePatternsAloneDoNotDecideEverything() {
     assertEquals(List.of(x.power(4).plus(ONE)), bases(x.power(4).plus(ONE)));
     assertEquals(2, bases(x.power(4).plus(Polynomial.of(4))).size());
+  }
+
+  /// The cyclotomic polynomial of order 105 is the first with a coefficient beyond 1 in size
+  /// (common practice).
+  @Test
+  void cyclotomicPolynomialsAreRecognised() {
+    assertEquals(BigInteger.TWO.negate(), Cyclotomic.ofOrder(105)[7]);
+    for (int order = 3; order <= 60; order++) {
+      BigInteger[] cyclotomic = Cyclotomic.ofOrder(order);
+      BigInteger[] other = {BigInteger.TWO, BigInteger.ONE, BigInteger.ONE, BigInteger.TEN};
+      BigInteger[] product = Kronecker.times(cyclotomic, other);
+      List<BigInteger[]> found = Cyclotomic.factors(product);
+      assertEquals(1, found.size());
+      assertArrayEquals(cyclotomic, found.getFirst());
+      assertEquals(List.of(), Cyclotomic.factors(other));
+    }
+  }
+
+  /// x^n - a is irreducible when a is no power that divides n, and not -4 times a fourth power for
+  /// n a multiple of 4 (theorem of Capelli, common practice).
+  @Test
+  void powersMinusConstantsFollowTheTheoremOfCapelli() {
+    assertEquals(1, bases(x.power(200).minus(Polynomial.of(2))).size());
+    assertEquals(1, bases(x.power(60).plus(Polynomial.of(3))).size());
+    assertEquals(2, bases(x.power(12).plus(Polynomial.of(4))).size());
+    assertEquals(2, bases(x.power(15).minus(Polynomial.of(8))).size());
+    assertEquals(1, bases(x.power(14).minus(Polynomial.of(8))).size());
+    assertFactorsOf(
+        x.power(24).minus(Polynomial.of(4096)), x.power(24).minus(Polynomial.of(4096)).factor());
+  }
+
+  @Test
+  void polynomialsInAPowerAgreeWithTheLibrary() {
+    Seeded.each(
+        52_000,
+        40,
+        r -> {
+          BigInteger[] small = RandomPolynomials.integers(r, 2 + r.nextInt(3), 3);
+          small[0] = BigInteger.valueOf(1L << r.nextInt(6));
+          small[small.length - 1] = BigInteger.valueOf(1 + r.nextInt(4));
+          int step = 2 + r.nextInt(5);
+          Polynomial polynomial =
+              Univariate.toPolynomial(small, X).substitute(X, x.power(step)).primitivePart();
+          assertFactorsOf(polynomial, polynomial.factor());
+          for (Polynomial base : bases(polynomial)) {
+            assertEquals(1, RingsBridge.irreducibleFactors(base).size(), base.toString());
+          }
+        });
   }
 
   @Test
