@@ -23,7 +23,7 @@ import org.apfloat.Apfloat;
 public record Digits(BigDecimal real, BigDecimal imaginary) {
 
   /// The largest number of digits given.
-  public static final int MOST = 100_000;
+  public static final int MOST = 20_000;
 
   private static final int GUARD = 20;
 

@@ -1,5 +1,6 @@
 package gnomon.decimal;
 
+import gnomon.algebra.Budget;
 import java.math.BigInteger;
 import org.apfloat.Apfloat;
 import org.apfloat.ApfloatMath;
@@ -11,6 +12,7 @@ final class SpecialValues {
 
   /// x! = Γ(x+1). Its slope is Γ(x+1) ψ(x+1).
   static Ball factorial(Ball x, long precision) {
+    charge(precision);
     Ball shifted = x.plus(Ball.of(BigInteger.ONE, precision), precision);
     Apfloat point = shifted.middle().real();
     Apfloat value = ApfloatMath.gamma(point);
@@ -26,10 +28,16 @@ final class SpecialValues {
       return HurwitzZeta.of(order, one, precision)
           .plus(HurwitzZeta.of(order, shifted, precision).negated(), precision);
     }
+    charge(precision);
     Apfloat point = shifted.middle().real();
     Apfloat value = ApfloatMath.digamma(point).add(ApfloatMath.euler(precision));
     Apfloat steep = steepness(shifted);
     return shifted.map(value, steep.multiply(steep), precision);
+  }
+
+  /// The library computes these in about quadratic time, without looking at a cancellation.
+  private static void charge(long precision) {
+    Budget.charge(10 * precision * precision);
   }
 
   /// More than the size of the digamma function and of 1/(distance to the nearest pole), the poles
