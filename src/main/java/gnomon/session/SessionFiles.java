@@ -23,7 +23,7 @@ final class SessionFiles {
   List<String> keep(Statement.Keep keep, State state) {
     String text = Transcript.of(state, settings.spelling());
     write(keep.file(), text, keep.span());
-    return List.of("kept " + state.exchanges().size() + " statements in " + keep.file());
+    return List.of("kept " + counted(state.exchanges().size()) + " in " + keep.file());
   }
 
   SessionFile read(String name, Span span) {
@@ -42,7 +42,11 @@ final class SessionFiles {
     SessionFile renewed = Recheck.renewed(file, apart(path));
     write(rerecord.file(), renewed.text(), rerecord.span());
     return List.of(
-        "wrote the answers of " + file.exchanges().size() + " statements in " + rerecord.file());
+        "wrote the answers of " + counted(file.exchanges().size()) + " in " + rerecord.file());
+  }
+
+  private static String counted(int statements) {
+    return statements == 1 ? "1 statement" : statements + " statements";
   }
 
   /// The settings of a session apart from this one that runs a file.
