@@ -6,6 +6,7 @@ import gnomon.form.Form;
 import gnomon.form.Generator;
 import gnomon.form.Variable;
 import gnomon.number.Rational;
+import gnomon.polynomial.Polynomial;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
@@ -16,11 +17,6 @@ import java.util.Optional;
 /// Collects the factors of one term, above and below the fraction bar. Powers with the same base or
 /// the same exponent are joined, so that (2^x)² is written 4^x and √2·√3 is written √6.
 final class FactorNotation {
-  private static final BigInteger LARGEST_JOINED_BASE = BigInteger.valueOf(1_000_000);
-
-  /// The exponent (as key of its form) of some joined bases, with the bases multiplied out.
-  private record Joint(Form exponent, Rational base) {}
-
   private final Lexicon lexicon;
   private final KernelNotation kernels;
   private final List<Notation> constants = new ArrayList<>();
@@ -28,7 +24,8 @@ final class FactorNotation {
   private final List<Notation> powers = new ArrayList<>();
   private final List<Notation> functions = new ArrayList<>();
   private final List<Notation> below = new ArrayList<>();
-  private final Map<String, Joint> joints = new LinkedHashMap<>();
+  private final List<Notation> operators = new ArrayList<>();
+  private final JoinedPowers primes = new JoinedPowers();
   private final Map<Notation, Form> shifts = new LinkedHashMap<>();
   private final Map<Variable, Form> variables = new LinkedHashMap<>();
   private Form natural = Form.ZERO;
@@ -62,16 +59,20 @@ final class FactorNotation {
     }
   }
 
-  /// Adds a polynomial factor already in notation.
-  void addFactor(Notation base, int multiplicity) {
+  /// Adds a power of a polynomial, given with its notation.
+  void addFactor(Polynomial polynomial, Notation base, int multiplicity) {
     if (multiplicity < 0) {
       below.add(raised(base, Rational.of(-multiplicity)));
     } else {
-      letters.add(raised(base, Rational.of(multiplicity)));
+      boolean operator = lexicon.hasLetters(Form.of(polynomial));
+      (operator ? operators : letters).add(raised(base, Rational.of(multiplicity)));
     }
   }
 
   private List<Notation> place(Generator generator) {
+    if (lexicon.hasLetters(Form.of(generator))) {
+      return operators;
+    }
     return switch (generator) {
       case gnomon.form.Constant _, gnomon.form.AngleConstant _ -> constants;
       case gnomon.form.Logarithm log when Form.of(log).isConstant() -> constants;
@@ -92,69 +93,61 @@ final class FactorNotation {
   private void addPower(Exponential power, Rational exponent) {
     switch (power.base()) {
       case Base.Natural _ -> natural = natural.plus(power.unit().times(exponent));
-      case Base.Prime(BigInteger prime) -> join(prime, power.unit(), exponent);
-      case Base.Turn _, Base.Zero _, Base.GaussianAngle _, Base.Of _ -> {
-        Form base = power.base().value();
-        Optional<Generator> generator = base.asGenerator();
-        if (generator.isPresent() && generator.get() instanceof Variable v) {
-          variables.merge(v, power.unit().times(exponent), Form::plus);
-        } else if (power.unit().isOne() && exponent.sign() < 0) {
-          below.add(raised(kernels.inner(base), exponent.negated()));
-        } else if (power.unit().isOne()) {
-          constantOr(base).add(raised(kernels.inner(base), exponent));
-        } else {
-          powers.add(power(kernels.inner(base), power.unit().times(exponent)));
-        }
+      case Base.Prime(BigInteger prime) -> primes.add(prime, power.unit(), exponent);
+      case Base.GaussianAngle(BigInteger re, BigInteger im) -> {
+        Form base = Form.of(re).plus(Form.of(im).times(Form.I));
+        BigInteger norm = re.multiply(re).add(im.multiply(im));
+        addPower(base, power.unit(), exponent);
+        primes.add(norm, power.unit(), exponent.times(Rational.HALF).negated());
       }
+      case Base.Turn _, Base.Zero _, Base.Of _ ->
+          addPower(power.base().value(), power.unit(), exponent);
     }
   }
 
-  private List<Notation> constantOr(Form base) {
-    return base.isConstant() ? constants : powers;
-  }
-
-  private void join(BigInteger prime, Form unit, Rational exponent) {
-    Rational whole = Rational.ONE;
-    Rational rest = exponent;
-    if (exponent.isInteger() && exponent.fitsInt()) {
-      Rational joined = Rational.of(prime).power(exponent.intValueExact());
-      if (small(joined)) {
-        whole = joined;
-        rest = Rational.ONE;
-      }
+  private void addPower(Form base, Form unit, Rational exponent) {
+    Optional<Generator> generator = base.asGenerator();
+    if (generator.isPresent() && generator.get() instanceof Variable v) {
+      variables.merge(v, unit.times(exponent), Form::plus);
+    } else if (unit.isOne() && exponent.sign() < 0) {
+      below.add(raised(kernels.inner(base), exponent.negated()));
+    } else if (unit.isOne()) {
+      listFor(base, base.isConstant() ? constants : powers)
+          .add(raised(kernels.inner(base), exponent));
+    } else {
+      Form whole = unit.times(exponent);
+      listFor(base.plus(whole), powers).add(power(kernels.inner(base), whole));
     }
-    if (whole.isOne()) {
-      whole = Rational.of(prime);
-    }
-    Form shared = unit.times(rest);
-    Rational base = whole;
-    joints.merge(
-        shared.key(),
-        new Joint(shared, base),
-        (old, _) -> new Joint(shared, old.base().times(base)));
   }
 
-  private static boolean small(Rational value) {
-    return value.numerator().compareTo(LARGEST_JOINED_BASE) < 0
-        && value.denominator().compareTo(LARGEST_JOINED_BASE) < 0;
+  private List<Notation> listFor(Form form, List<Notation> otherwise) {
+    return lexicon.hasLetters(form) ? operators : otherwise;
   }
 
-  /// The factors above the fraction bar, those of the polynomial given among them.
+  /// The factors above the fraction bar: constants, letters, powers, functions, and what acts as an
+  /// operator last.
   List<Notation> over() {
     List<Notation> all = new ArrayList<>();
     List<Notation> exponentials = new ArrayList<>(powers);
-    joints.values().forEach(joint -> addJoint(joint, all, exponentials));
+    List<Notation> acting = new ArrayList<>();
+    primes.forEach((base, exponent) -> addPrimes(base, exponent, all, exponentials));
     all.addAll(constants);
     if (!natural.isZero()) {
-      (natural.isConstant() ? all : exponentials).add(exponential());
+      List<Notation> place = natural.isConstant() ? all : exponentials;
+      (lexicon.hasLetters(natural) ? operators : place).add(exponential());
     }
     List<Notation> symbolic = new ArrayList<>();
-    variables.forEach((v, exponent) -> addVariable(v, exponent, all, symbolic));
+    variables.forEach(
+        (v, exponent) ->
+            addVariable(
+                v, exponent, lexicon.stands(v, Lexicon.Role.LETTER) ? acting : all, symbolic));
     exponentials.addAll(0, symbolic);
-    shifts.forEach((letter, step) -> addShift(letter, step, exponentials));
+    shifts.forEach((letter, step) -> addShift(letter, step, acting));
     all.addAll(letters);
     all.addAll(exponentials);
     all.addAll(functions);
+    all.addAll(acting);
+    all.addAll(operators);
     return all;
   }
 
@@ -197,18 +190,13 @@ final class FactorNotation {
     }
   }
 
-  private void addJoint(Joint joint, List<Notation> constant, List<Notation> varying) {
-    Form exponent = joint.exponent();
-    Rational base = joint.base();
-    if (base.numerator().equals(BigInteger.ONE)) {
-      base = base.inverse();
-      exponent = exponent.negated();
-    }
+  private void addPrimes(
+      Rational base, Form exponent, List<Notation> constant, List<Notation> varying) {
+    Notation over = new Notation.Numeral(base.numerator());
     Notation written =
         base.isInteger()
-            ? new Notation.Numeral(base.numerator())
-            : new Notation.Quotient(
-                new Notation.Numeral(base.numerator()), new Notation.Numeral(base.denominator()));
+            ? over
+            : new Notation.Quotient(over, new Notation.Numeral(base.denominator()));
     (exponent.isConstant() ? constant : varying).add(power(written, exponent));
   }
 

@@ -84,11 +84,14 @@ public final class FormNotation {
     }
     List<Notation> terms = new ArrayList<>();
     Map<Monomial, Polynomial> groups = groups(numerator);
+    if (groups.size() > 1 && lexicon.hasLetters(Form.of(denominator))) {
+      return fractions.whole(numerator, denominator, compact);
+    }
     for (Monomial kernel : groups.keySet().stream().sorted(order::compareGroups).toList()) {
       Form coefficient = Form.fraction(groups.get(kernel), denominator);
       terms.addAll(fractions.group(coefficient, kernel, compact));
     }
-    return Notation.sum(terms);
+    return FractionNotation.inOrder(terms);
   }
 
   /// The polynomial as a sum of powers of kernels with their coefficients.

@@ -44,7 +44,7 @@ final class FractionNotation {
     Rational number = content(fraction.numerator()).dividedBy(content(fraction.denominator()));
     addWhole(factors, primitive(fraction.numerator()), 1);
     if (fraction.denominator().size() > 1 || !fraction.denominator().isConstant()) {
-      number = number.times(addFactored(factors, primitive(fraction.denominator()), -1));
+      number = number.times(addFactored(factors, primitive(fraction.denominator()), -1, number));
     }
     return TermNotation.of(number, factors.over(), factors.under(), compact);
   }
@@ -60,6 +60,19 @@ final class FractionNotation {
     return terms;
   }
 
+  private Notation sum(Polynomial polynomial) {
+    return inOrder(terms(polynomial, false));
+  }
+
+  /// The sum of the terms; of two the one without a minus sign first.
+  static Notation inOrder(List<Notation> terms) {
+    boolean swapped =
+        terms.size() == 2
+            && terms.getFirst() instanceof Notation.Minus
+            && !(terms.getLast() instanceof Notation.Minus);
+    return Notation.sum(swapped ? terms.reversed() : terms);
+  }
+
   private void addPowers(FactorNotation factors, Monomial monomial) {
     for (Monomial.Power power : order.sideBySide(monomial)) {
       factors.add((Generator) power.indeterminate(), power.exponent());
@@ -71,43 +84,65 @@ final class FractionNotation {
     if (polynomial.size() == 1) {
       addPowers(factors, polynomial.terms().getFirst().monomial().power(Rational.of(sign)));
     } else {
-      factors.addFactor(Notation.sum(terms(polynomial, false)), sign);
+      factors.addFactor(polynomial, sum(polynomial), sign);
     }
   }
 
-  /// Adds the irreducible factors of a polynomial, and answers with the number left over.
-  private Rational addFactored(FactorNotation factors, Polynomial polynomial, int sign) {
+  /// Adds the irreducible factors of a polynomial, and answers with the number left over; a number
+  /// so far that is negative may have its sign taken into a denominator, as in 1/(1 - x).
+  private Rational addFactored(
+      FactorNotation factors, Polynomial polynomial, int sign, Rational soFar) {
     if (polynomial.size() == 1 || polynomial.size() > LARGEST_FACTORED) {
       addWhole(factors, polynomial, sign);
       return Rational.ONE;
     }
-    return addFactors(factors, polynomial, sign);
+    return addFactors(factors, polynomial, sign, soFar);
   }
 
-  private Rational addFactors(FactorNotation factors, Polynomial polynomial, int sign) {
+  private Rational addFactors(
+      FactorNotation factors, Polynomial polynomial, int sign, Rational soFar) {
     var factorization = polynomial.factor();
     Rational unit = factorization.unit();
+    List<Factor> primitives = new ArrayList<>();
     for (Factor factor : order.factors(factorization.factors())) {
-      Polynomial base = factor.base();
-      Rational number = content(base);
-      unit = unit.times(number.power(factor.multiplicity()));
-      Polynomial primitive = primitive(base);
-      int multiplicity = sign * factor.multiplicity();
-      if (primitive.size() == 1) {
-        Monomial monomial = primitive.terms().getFirst().monomial();
-        addPowers(factors, monomial.power(Rational.of(multiplicity)));
-      } else {
-        factors.addFactor(Notation.sum(terms(primitive, false)), multiplicity);
+      unit = unit.times(content(factor.base()).power(factor.multiplicity()));
+      primitives.add(new Factor(primitive(factor.base()), factor.multiplicity()));
+    }
+    if (sign < 0 && soFar.times(unit).sign() < 0) {
+      for (int at = 0; at < primitives.size(); at++) {
+        Factor factor = primitives.get(at);
+        if (factor.multiplicity() % 2 == 1 && isDifference(factor.base())) {
+          primitives.set(at, new Factor(factor.base().negated(), factor.multiplicity()));
+          unit = unit.negated();
+          break;
+        }
       }
     }
+    primitives.forEach(
+        factor -> addPrimitive(factors, factor.base(), sign * factor.multiplicity()));
     return unit.power(sign);
+  }
+
+  private void addPrimitive(FactorNotation factors, Polynomial base, int multiplicity) {
+    if (base.size() == 1) {
+      Monomial monomial = base.terms().getFirst().monomial();
+      addPowers(factors, monomial.power(Rational.of(multiplicity)));
+    } else {
+      factors.addFactor(base, sum(base), multiplicity);
+    }
+  }
+
+  /// Whether the polynomial is a term less a number.
+  private boolean isDifference(Polynomial polynomial) {
+    Term last = order.terms(polynomial).getLast();
+    return polynomial.size() == 2 && last.monomial().isOne() && last.coefficient().sign() < 0;
   }
 
   /// The fraction with both parts factored.
   Notation factored(Form form) {
     FactorNotation factors = new FactorNotation(lexicon, kernels);
-    Rational number = addFactors(factors, form.numerator(), 1);
-    number = number.times(addFactors(factors, form.denominator(), -1));
+    Rational number = addFactors(factors, form.numerator(), 1, Rational.ONE);
+    number = number.times(addFactors(factors, form.denominator(), -1, number));
     return TermNotation.of(number, factors.over(), factors.under(), false);
   }
 
@@ -144,7 +179,7 @@ final class FractionNotation {
     if (primitive.size() == 1) {
       addWhole(factors, primitive.power(power), -1);
     } else {
-      factors.addFactor(Notation.sum(terms(primitive, false)), -power);
+      factors.addFactor(primitive, sum(primitive), -power);
     }
     return TermNotation.of(number, factors.over(), factors.under(), false);
   }

@@ -1,6 +1,8 @@
 package gnomon.render;
 
+import gnomon.form.Base;
 import gnomon.form.Dual;
+import gnomon.form.Exponential;
 import gnomon.form.Form;
 import gnomon.form.Structure;
 import gnomon.form.Variable;
@@ -18,6 +20,8 @@ import java.util.TreeSet;
 /// polynomials, then a shift-invariant operator in the spelling that is shortest, then what is read
 /// off at 0.
 final class OperatorNotation {
+  private static final int SHORT = 16;
+
   private final Variable main;
   private final ShiftInvariantNotation shiftInvariant;
 
@@ -36,7 +40,11 @@ final class OperatorNotation {
     if (!operator.kernelOrders().isEmpty()) {
       return modulo(operator, operator.kernelOrders().firstKey());
     }
-    List<Notation> candidates = new ArrayList<>(List.of(plain(operator)));
+    Notation plain = plain(operator);
+    if (operator.boundaries().isEmpty() && ShiftInvariantNotation.length(plain) < SHORT) {
+      return plain;
+    }
+    List<Notation> candidates = new ArrayList<>(List.of(plain));
     for (Variable variable : operator.variables()) {
       candidates.addAll(new PoleNotation(this, shiftInvariant).of(operator, variable));
     }
@@ -58,6 +66,13 @@ final class OperatorNotation {
   private Notation modulo(Operator operator, Variable variable) {
     int order = operator.kernelOrders().get(variable);
     Dual dual = new Dual(variable);
+    Form regular = regularPart(operator.symbol(), dual);
+    if (!regular.isZero() && !regular.equals(operator.symbol())) {
+      Notation first = modulo(operator.minus(Operator.ofSymbol(regular)), variable);
+      List<Notation> terms = new ArrayList<>(termsOf(first));
+      terms.addAll(terms(regular));
+      return Notation.sum(terms);
+    }
     List<Notation> candidates = new ArrayList<>();
     Operator derivative = Operator.derivative(variable);
     candidates.add(modulo(operator, derivative, order, Glyph.plain("D"), dual));
@@ -68,13 +83,29 @@ final class OperatorNotation {
     return ShiftInvariantNotation.shortest(candidates);
   }
 
+  private Form regularPart(Form symbol, Dual dual) {
+    Form regular = Form.ZERO;
+    for (SymbolParts.Part part : parts(symbol)) {
+      if (ShiftInvariantNotation.pole(part.right(), dual) == 0) {
+        regular = regular.plus(part.left().times(part.right()));
+      }
+    }
+    return regular;
+  }
+
   private Notation modulo(Operator operator, Operator outer, int order, Glyph glyph, Dual dual) {
     Operator rest = operator;
     for (int count = 0; count < order; count++) {
       rest = outer.compose(rest);
     }
     Notation inverse = new Notation.Power(shiftInvariant.letter(glyph, dual), Notation.of(-order));
-    return ShiftInvariantNotation.product(inverse, of(rest));
+    boolean scalar =
+        rest.boundaries().isEmpty()
+            && rest.symbol().duals().isEmpty()
+            && acting(operator.symbol()).stream().noneMatch(rest.symbol()::dependsOn);
+    return scalar
+        ? beside(FormNotation.in(main).of(rest.symbol()), inverse)
+        : ShiftInvariantNotation.product(inverse, of(rest));
   }
 
   /// The operator with the symbol, nothing read off at 0.
@@ -122,6 +153,9 @@ final class OperatorNotation {
   }
 
   private List<Notation> part(SymbolParts.Part part, SortedSet<Variable> acting) {
+    if (part.right().duals().isEmpty() && !part.right().isOne()) {
+      return part(new SymbolParts.Part(part.left().times(part.right()), Form.ONE), acting);
+    }
     boolean constant = acting.stream().noneMatch(part.left()::dependsOn);
     if (constant) {
       return termsOf(shiftInvariant.of(part.left().times(part.right())));
@@ -130,8 +164,7 @@ final class OperatorNotation {
       return part(new SymbolParts.Part(part.left().times(part.right()), Form.ONE), acting);
     }
     boolean identity = part.right().isOne();
-    boolean polynomial = isPolynomial(part.left(), acting);
-    if (identity && polynomial) {
+    if (identity && isSpelledInX(part.left(), acting)) {
       return termsOf(withX(part.left(), acting));
     }
     Notation right =
@@ -139,6 +172,26 @@ final class OperatorNotation {
             ? new Notation.Power(Notation.name("E"), Notation.of(0))
             : shiftInvariant.of(part.right());
     return List.of(beside(left(part.left(), acting), right));
+  }
+
+  /// ε(a) Σ has the indicator (e^(at) − 1)/(e^t − 1), ε(a) ∫ has (e^(at) − 1)/t.
+  private Optional<Notation> endingInASum(Form indicator) {
+    Form t = Form.of(new Dual(main));
+    Form shift = Form.of(new Exponential(Base.NATURAL, t));
+    if (indicator.isPolynomial()) {
+      return Optional.empty();
+    }
+    for (Glyph glyph : List.of(Glyph.SIGMA, Glyph.INTEGRAL)) {
+      Form divisor = glyph == Glyph.SIGMA ? shift.minus(Form.ONE) : t;
+      Form image = indicator.times(divisor).plus(Form.ONE);
+      boolean evaluation =
+          image.derivative(new Dual(main)).dividedBy(image).duals().isEmpty()
+              && image.substitute(new Dual(main), Form.ZERO).isOne();
+      if (evaluation) {
+        return Optional.of(applied(reading(image), new Notation.Name(glyph)));
+      }
+    }
+    return Optional.empty();
   }
 
   /// A multiplication, to be followed by an operator.
@@ -154,6 +207,22 @@ final class OperatorNotation {
 
   private static boolean isPolynomial(Form left, SortedSet<Variable> acting) {
     return acting.stream().allMatch(v -> Structure.asPolynomial(left, v).isPresent());
+  }
+
+  /// Whether polynomials and powers with constant bases are all that the function is made of; with
+  /// X for x it is an operator as it stands.
+  private static boolean isSpelledInX(Form left, SortedSet<Variable> acting) {
+    if (!left.isPolynomial()) {
+      return false;
+    }
+    return left.generators().stream()
+        .allMatch(
+            g ->
+                g instanceof Variable
+                    || acting.stream().noneMatch(g::dependsOn)
+                    || g instanceof Exponential(Base base, Form unit)
+                        && !(base instanceof Base.Of)
+                        && isPolynomial(unit, acting));
   }
 
   private Notation withX(Form polynomial, SortedSet<Variable> acting) {
@@ -229,6 +298,10 @@ final class OperatorNotation {
     Notation zero = ShiftInvariantNotation.evaluation(Notation.of(0));
     if (indicator.duals().isEmpty()) {
       return beside(FormNotation.in(main).of(indicator), zero);
+    }
+    Optional<Notation> summed = endingInASum(indicator);
+    if (summed.isPresent()) {
+      return summed.get();
     }
     Notation operator = of(indicator);
     return switch (operator) {

@@ -18,6 +18,8 @@ import java.util.TreeSet;
 ///
 /// Each spelling is exact by construction: the rest is the operator less the products written.
 final class PoleNotation {
+  private static final int SHORT = 8;
+
   private final OperatorNotation operators;
   private final ShiftInvariantNotation shiftInvariant;
 
@@ -47,6 +49,9 @@ final class PoleNotation {
             new Letter(Glyph.INTEGRAL, Operator.integral(variable), t))) {
       for (boolean first : new boolean[] {true, false}) {
         spelling(operator, poles, letter, dual, first).ifPresent(found::add);
+        if (found.size() == 1 && ShiftInvariantNotation.length(found.getFirst()) < SHORT) {
+          return found;
+        }
       }
     }
     return found;

@@ -12,7 +12,8 @@ import java.util.Optional;
 /// Shift-invariant operators, given by their symbols in the duals, as notation: of the spellings in
 /// D, E, Δ, ∇, δ and μ that mean the symbol the shortest is taken.
 final class ShiftInvariantNotation {
-  private static final int HIGHEST_POLE = 64;
+  private static final int HIGHEST_POLE = 300;
+  private static final int HIGHEST_POLE_OF_INVERSES = 4;
 
   private final Variable main;
 
@@ -66,8 +67,10 @@ final class ShiftInvariantNotation {
 
   private static Optional<Integer> zero(Form form, Dual dual) {
     Form derivative = form;
+    boolean standing = form.generators().stream().anyMatch(g -> g instanceof InverseSeries);
+    int limit = standing ? HIGHEST_POLE_OF_INVERSES : HIGHEST_POLE;
     try {
-      for (int order = 0; order < HIGHEST_POLE; order++) {
+      for (int order = 0; order < limit; order++) {
         if (!derivative.substitute(dual, Form.ZERO).isZero()) {
           return Optional.of(order);
         }

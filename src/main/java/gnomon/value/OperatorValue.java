@@ -18,8 +18,8 @@ public record OperatorValue(MappedOperator operator) implements Value {
       case FormValue that ->
           !that.function()
               && operator.equals(MappedOperator.of(Operator.identity().times(that.form())));
-      case FunctionalValue _,
-          SeriesValue _,
+      case FunctionalValue that -> that.sameAs(this);
+      case SeriesValue _,
           ListValue _,
           TableValue _,
           VerdictValue _,

@@ -30,7 +30,7 @@ class FormNotationTest {
     assertEquals(
         "1/2 x^2 - 1/2 x + a",
         shown(x.power(2).times(Form.HALF).minus(x.times(Form.HALF)).plus(a)));
-    assertEquals("-x^2 + 1", shown(one.minus(x.power(2))));
+    assertEquals("1 - x^2", shown(one.minus(x.power(2))));
     assertEquals(
         "x^2 + C2 x + C1",
         shown(x.power(2).plus(Form.variable("C1")).plus(Form.variable("C2").times(x))));
@@ -57,6 +57,7 @@ class FormNotationTest {
     assertEquals("1/((x + 1) (x + 2) (x + 3))", shown(Combinatorial.falling(x, Form.of(-3))));
     assertEquals("1/(n - k)", shown(one.dividedBy(n.minus(k))));
     assertEquals("-1/x", shown(x.inverse().negated()));
+    assertEquals("1/(1 - x)", shown(one.dividedBy(one.minus(x))));
   }
 
   @Test
@@ -77,10 +78,13 @@ class FormNotationTest {
     assertEquals("1/3 cos(2 x)", shown(Elementary.cos(x.times(Form.TWO)).times(number(1, 3))));
     assertEquals("tan(x)", shown(Elementary.tan(x)));
     assertEquals("-sin(x)", shown(Elementary.sin(x.negated())));
-    assertEquals("-1/2 cos(2 x) + 1/2", shown(Elementary.sin(x).power(2)));
+    assertEquals("1/2 - 1/2 cos(2 x)", shown(Elementary.sin(x).power(2)));
     Form turned = Elementary.power(one.plus(Form.I), x);
     Form back = Elementary.power(one.minus(Form.I), x);
     assertEquals("2^(x/2) sin(π x/4)", shown(turned.minus(back).dividedBy(Form.I.times(Form.TWO))));
+    assertEquals(
+        "(-1)^(x/2) 5^x (2 + i)^(-x)",
+        shown(Elementary.power(one.plus(Form.I.times(Form.TWO)), x)));
     assertEquals("e^(i x)", shown(Elementary.exp(x.times(Form.I))));
     assertEquals("i sin(x)", shown(Elementary.sin(x).times(Form.I)));
   }

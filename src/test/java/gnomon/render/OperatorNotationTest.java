@@ -55,6 +55,8 @@ class OperatorNotationTest {
             Elementary.exp(t.times(Form.variable("h"))).minus(one).dividedBy(Form.variable("h"))));
     assertEquals("E^2 - 5 E + 6", operator(SHIFT.minus(Form.TWO).times(SHIFT.minus(Form.of(3)))));
     assertEquals("D/Δ", operator(t.dividedBy(SHIFT.minus(one))));
+    assertEquals("n D", operator(t.times(Spelt.n)));
+    assertEquals("1/a^2 X", operator(x.dividedBy(Spelt.a.power(2))));
   }
 
   @Test
@@ -91,6 +93,7 @@ class OperatorNotationTest {
     assertEquals("D^-1", shown(D.inverse()));
     assertEquals("D^-2", shown(D.power(2).inverse()));
     assertEquals("Δ^-1", shown(DELTA.inverse()));
+    assertEquals("1/3 Δ^-3", shown(DELTA.power(3).inverse().times(Spelt.number(1, 3))));
   }
 
   @Test
