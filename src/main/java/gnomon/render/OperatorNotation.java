@@ -212,7 +212,7 @@ final class OperatorNotation {
   /// Whether polynomials and powers with constant bases are all that the function is made of; with
   /// X for x it is an operator as it stands.
   private static boolean isSpelledInX(Form left, SortedSet<Variable> acting) {
-    if (!left.isPolynomial()) {
+    if (acting.stream().anyMatch(Form.of(left.denominator())::dependsOn)) {
       return false;
     }
     return left.generators().stream()

@@ -2,6 +2,7 @@ package gnomon.render;
 
 import gnomon.form.Dual;
 import gnomon.form.Form;
+import gnomon.form.InverseSeries;
 import gnomon.form.Variable;
 import java.util.ArrayList;
 import java.util.Comparator;

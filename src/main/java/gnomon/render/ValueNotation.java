@@ -196,6 +196,10 @@ final class ValueNotation {
     if (map.isUmbral()) {
       return new Notation.Call(new Notation.Name(Glyph.upright("umbral")), List.of(q));
     }
+    if (map.g().duals().isEmpty()) {
+      Notation umbral = direct(map.umbralPart());
+      return OperatorNotation.beside(forms.of(map.g().inverse()), umbral);
+    }
     Notation s = operators.of(map.g());
     return new Notation.Call(new Notation.Name(Glyph.upright("sheffer")), List.of(q, s));
   }

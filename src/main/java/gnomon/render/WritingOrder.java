@@ -27,6 +27,9 @@ final class WritingOrder {
   /// The terms as they are written.
   List<Term> terms(Polynomial polynomial) {
     Generator main = main(polynomial);
+    if (main == Constant.I && polynomial.indeterminates().size() == 1) {
+      return polynomial.terms().stream().sorted(byDegree(main).reversed()).toList();
+    }
     return polynomial.terms().stream().sorted(byDegree(main)).toList();
   }
 

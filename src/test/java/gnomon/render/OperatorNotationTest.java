@@ -56,7 +56,7 @@ class OperatorNotationTest {
     assertEquals("E^2 - 5 E + 6", operator(SHIFT.minus(Form.TWO).times(SHIFT.minus(Form.of(3)))));
     assertEquals("D/Δ", operator(t.dividedBy(SHIFT.minus(one))));
     assertEquals("n D", operator(t.times(Spelt.n)));
-    assertEquals("1/a^2 X", operator(x.dividedBy(Spelt.a.power(2))));
+    assertEquals("X/a^2", operator(x.dividedBy(Spelt.a.power(2))));
   }
 
   @Test

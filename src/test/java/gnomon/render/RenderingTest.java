@@ -66,8 +66,7 @@ class RenderingTest {
         "3 ε(0)",
         UNICODE.text(new FunctionalValue(Functional.evaluation(X, Form.ZERO).times(Form.of(3)))));
     assertEquals(
-        "ε(0) (Δ/D)",
-        UNICODE.text(new FunctionalValue(Functional.integral(X, Form.ZERO, Form.ONE))));
+        "ε(1) ∫", UNICODE.text(new FunctionalValue(Functional.integral(X, Form.ZERO, Form.ONE))));
   }
 
   @Test
