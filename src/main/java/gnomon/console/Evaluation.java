@@ -4,9 +4,11 @@ import gnomon.session.Reply;
 import gnomon.session.Session;
 import java.time.Duration;
 import java.util.List;
+import java.util.Optional;
 import java.util.concurrent.BlockingQueue;
 import java.util.concurrent.LinkedBlockingQueue;
 import java.util.concurrent.TimeUnit;
+import org.jline.terminal.Attributes;
 import org.jline.terminal.Terminal;
 import org.jline.utils.AttributedString;
 import org.jspecify.annotations.Nullable;
@@ -60,6 +62,7 @@ final class Evaluation {
     BlockingQueue<Event> events = new LinkedBlockingQueue<>();
     var before = terminal.handle(Terminal.Signal.INT, _ -> events.add(new Event.StopWanted()));
     Progress progress = new Progress(terminal, look, statement);
+    Optional<Attributes> echoing = silence();
     Thread thread =
         Thread.ofPlatform()
             .daemon()
@@ -70,8 +73,22 @@ final class Evaluation {
       return await(thread, events, progress);
     } finally {
       progress.clear();
+      echoing.ifPresent(terminal::setAttributes);
       terminal.handle(Terminal.Signal.INT, before);
     }
+  }
+
+  /// What is typed ahead shall not be shown in the middle of the progress line; the line editor
+  /// shows it at the next prompt. Answers with the attributes to go back to.
+  private Optional<Attributes> silence() {
+    if (look.plain()) {
+      return Optional.empty();
+    }
+    Attributes echoing = terminal.getAttributes();
+    Attributes silent = new Attributes(echoing);
+    silent.setLocalFlag(Attributes.LocalFlag.ECHO, false);
+    terminal.setAttributes(silent);
+    return Optional.of(echoing);
   }
 
   private Outcome reply(String statement) {

@@ -160,9 +160,6 @@ final class OperatorNotation {
     if (constant) {
       return termsOf(shiftInvariant.of(part.left().times(part.right())));
     }
-    if (part.right().duals().isEmpty() && !part.right().isOne()) {
-      return part(new SymbolParts.Part(part.left().times(part.right()), Form.ONE), acting);
-    }
     boolean identity = part.right().isOne();
     if (identity && isSpelledInX(part.left(), acting)) {
       return termsOf(withX(part.left(), acting));

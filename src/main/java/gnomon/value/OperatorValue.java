@@ -19,8 +19,8 @@ public record OperatorValue(MappedOperator operator) implements Value {
           !that.function()
               && operator.equals(MappedOperator.of(Operator.identity().times(that.form())));
       case FunctionalValue that -> that.sameAs(this);
-      case SeriesValue _,
-          ListValue _,
+      case SeriesValue that -> that.isExact() && that.sameAs(this);
+      case ListValue _,
           TableValue _,
           VerdictValue _,
           DecimalValue _,

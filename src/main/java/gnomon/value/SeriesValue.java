@@ -1,6 +1,8 @@
 package gnomon.value;
 
+import gnomon.basis.MappedOperator;
 import gnomon.form.Form;
+import gnomon.operator.Operator;
 import java.util.List;
 
 /// A truncated series Σ coefficients\[j\] · element(first + j), with everything from element(order)
@@ -39,5 +41,25 @@ public record SeriesValue(Family family, int first, List<Form> coefficients, int
   @Override
   public Sort sort() {
     return Sort.SERIES;
+  }
+
+  /// A finite sum of powers of an operator is also the same as that operator.
+  @Override
+  public boolean sameAs(Value other) {
+    if (equals(other)) {
+      return true;
+    }
+    return isExact()
+        && family instanceof Family.OperatorPowers(Operator of)
+        && other instanceof OperatorValue(MappedOperator operator)
+        && operator.equals(MappedOperator.of(total(of)));
+  }
+
+  private Operator total(Operator of) {
+    Operator sum = Operator.zero();
+    for (int at = 0; at < coefficients.size(); at++) {
+      sum = sum.plus(of.power(first + at).times(coefficients.get(at)));
+    }
+    return sum;
   }
 }

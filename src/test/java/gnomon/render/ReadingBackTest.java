@@ -7,6 +7,8 @@ import gnomon.diagnostic.Source;
 import gnomon.evaluate.Interpreter;
 import gnomon.evaluate.LocatedRefusal;
 import gnomon.evaluate.Scope;
+import gnomon.evaluate.Writing;
+import gnomon.form.Variable;
 import gnomon.summation.SummationEngine;
 import gnomon.syntax.Statement;
 import gnomon.syntax.StatementReader;
@@ -24,11 +26,20 @@ class ReadingBackTest {
   private static final long SEED = 42;
 
   private final Interpreter interpreter =
-      new Interpreter(
-          100,
-          10_000,
-          SummationEngine.standard(),
-          (value, running) -> Rendering.latex().withRunning(running).line(value));
+      new Interpreter(100, 10_000, SummationEngine.standard(), new Written());
+
+  /// Writes values for the evaluator.
+  private record Written() implements Writing {
+    @Override
+    public String line(Value value, Variable running) {
+      return Rendering.ascii().withRunning(running).line(value);
+    }
+
+    @Override
+    public String tex(Value value, Variable running) {
+      return Rendering.latex().withRunning(running).line(value);
+    }
+  }
 
   private final Scope scope =
       interpreter.arbitrary((Statement.Arbitrary) statement("arbitrary f, g"), Scope.empty());
@@ -116,6 +127,7 @@ class ReadingBackTest {
         "umbral(D exp(D))^-1 D umbral(D exp(D))",
         "Delta^-1 x^2",
         "(D - D^2)^-1",
+        "E^2 in Delta",
         "Delta_k k^2"
       })
   void valuesOfEverySortReadBack(String text) {
