@@ -26,7 +26,8 @@ final class Editors {
     editor.option(Option.HISTORY_REDUCE_BLANKS, false);
     editor.option(Option.HISTORY_IGNORE_SPACE, false);
     editor.option(Option.CASE_INSENSITIVE_SEARCH, true);
-    editor.option(Option.AUTO_FRESH_LINE, true);
+    // answers end with their line, and the mark that this would write has a colour
+    editor.option(Option.AUTO_FRESH_LINE, false);
     editor.setVariable(LineReader.SECONDARY_PROMPT_PATTERN, look.continuation());
     history.ifPresent(file -> editor.setVariable(LineReader.HISTORY_FILE, file));
     editor.setVariable(LineReader.HISTORY_SIZE, HISTORY_SIZE);
