@@ -175,7 +175,7 @@ final class Calls {
     return switch (name) {
       case "binom" -> Combinatorial.binomial(first, second);
       case "falling" -> Combinatorial.falling(first, second);
-      case String _ -> Combinatorial.rising(first, second);
+      default -> Combinatorial.rising(first, second);
     };
   }
 

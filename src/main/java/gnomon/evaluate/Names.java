@@ -155,7 +155,7 @@ final class Names {
       case "pi" -> Optional.of(Form.PI);
       case "e" -> Optional.of(Form.E);
       case "i" -> Optional.of(Form.I);
-      case String _ -> Optional.empty();
+      default -> Optional.empty();
     };
   }
 
@@ -177,7 +177,7 @@ final class Names {
           case "mu" -> Optional.of(Operator.centralMean(x, step));
           case "Integral" -> Optional.of(Operator.integral(x));
           case "Sigma" -> Optional.of(Operator.sum(x));
-          case String _ -> Optional.empty();
+          default -> Optional.empty();
         };
     if (stepped && operator.isPresent() && !Vocabulary.takesStep(name.text())) {
       throw Problems.of("kind-step", name.text() + " takes no step", name.span());

@@ -42,4 +42,16 @@ public record Harmonic(Form argument, int order) implements Generator {
   public void atoms(Consumer<Generator> consumer) {
     argument.atoms(consumer);
   }
+
+  // Written out: the generated methods cost tens of milliseconds when they are first called.
+
+  @Override
+  public boolean equals(Object other) {
+    return other instanceof Harmonic that && order == that.order && argument.equals(that.argument);
+  }
+
+  @Override
+  public int hashCode() {
+    return 31 * argument.hashCode() + order;
+  }
 }

@@ -41,9 +41,12 @@ public sealed interface Command {
       case "recheck" -> recheck(rest);
       case "help", "--help", "-h" -> alone(rest, new ShowUsage());
       case "version", "--version" -> alone(rest, new ShowVersion());
-      case String other when other.startsWith("-") -> new Misused("unknown option: " + other);
-      case String other -> new Misused("unknown command: " + other);
+      default -> unknown(arguments.getFirst());
     };
+  }
+
+  private static Command unknown(String word) {
+    return new Misused((word.startsWith("-") ? "unknown option: " : "unknown command: ") + word);
   }
 
   private static Command alone(List<String> rest, Command command) {

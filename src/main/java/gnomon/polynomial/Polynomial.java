@@ -33,8 +33,7 @@ public final class Polynomial implements Ring<Polynomial> {
   /// The polynomial 1.
   public static final Polynomial ONE = of(Rational.ONE);
 
-  private static final Comparator<Term> DESCENDING =
-      Comparator.comparing(Term::monomial, Comparator.reverseOrder());
+  private static final Comparator<Term> DESCENDING = (a, b) -> b.monomial().compareTo(a.monomial());
 
   private final List<Term> terms;
   private int hash;

@@ -51,11 +51,14 @@ final class WritingOrder {
   }
 
   private Comparator<Term> byDegree(Generator main) {
-    Comparator<Term> byMain = Comparator.comparing(term -> term.monomial().exponent(main));
-    return byMain
-        .thenComparing(term -> variableDegree(term.monomial()))
-        .reversed()
-        .thenComparing(Term::monomial, this::compareMonomials);
+    return (a, b) -> {
+      int byMain = b.monomial().exponent(main).compareTo(a.monomial().exponent(main));
+      if (byMain != 0) {
+        return byMain;
+      }
+      int byDegree = variableDegree(b.monomial()).compareTo(variableDegree(a.monomial()));
+      return byDegree != 0 ? byDegree : compareMonomials(a.monomial(), b.monomial());
+    };
   }
 
   private static Rational variableDegree(Monomial monomial) {
