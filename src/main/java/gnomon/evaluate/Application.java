@@ -1,5 +1,6 @@
 package gnomon.evaluate;
 
+import gnomon.algebra.Reason;
 import gnomon.algebra.Refusal;
 import gnomon.basis.MappedOperator;
 import gnomon.diagnostic.Span;
@@ -66,12 +67,30 @@ final class Application {
       return sum(f, scope);
     }
     MappedOperator operator = Sorts.asOperator(a).orElseThrow();
+    if (evaluation.truncation().isPresent() && plain.isPresent()) {
+      return Sorts.of(truncated(plain.get(), f), scope);
+    }
     Form image = operator.applyTo(f, evaluation.sums());
     if (plain.filter(Application::sums).isPresent()) {
       evaluation.status(Status.of(Status.Kind.CLOSED_FORM));
     }
     evaluation.grounds().applied(a, f, image, x);
     return Sorts.of(image, scope);
+  }
+
+  /// The image, cut off where it would be an infinite series.
+  private Form truncated(Operator operator, Form f) {
+    try {
+      return operator.applyTo(f, evaluation.sums());
+    } catch (Refusal refused) {
+      if (refused.reason() != Reason.INFINITE_SERIES) {
+        throw refused;
+      }
+      int order = evaluation.truncation().orElseThrow();
+      Form image = operator.applyTo(f, order, evaluation.sums());
+      evaluation.status(Status.NONE.withDetail("cut off after D^" + order));
+      return image;
+    }
   }
 
   /// Σ f: in closed form, or else the sum over 0..x-1 as it stands.

@@ -1,6 +1,7 @@
 package gnomon.evaluate;
 
 import gnomon.algebra.Budget;
+import gnomon.algebra.Reason;
 import gnomon.basis.Basis;
 import gnomon.basis.MappedOperator;
 import gnomon.diagnostic.Span;
@@ -45,8 +46,20 @@ final class ClauseReader {
       return tables.value(before(clausal), table, scope);
     }
     List<Condition> earlier = evaluation.conditions();
-    Value value = evaluator.value(clausal.subject(), scope);
+    Value value;
     int at = 0;
+    try {
+      value = evaluator.value(clausal.subject(), scope);
+    } catch (LocatedRefusal refused) {
+      if (refused.refusal().reason() != Reason.INFINITE_SERIES
+          || !(clauses.getFirst() instanceof Clause.To(Expression order, Span _))) {
+        throw refused;
+      }
+      value =
+          evaluation.truncating(
+              evaluator.whole(order, scope), () -> evaluator.value(clausal.subject(), scope));
+      at = 1;
+    }
     while (at < clauses.size()) {
       Clause clause = clauses.get(at);
       if (clause instanceof Clause.At values

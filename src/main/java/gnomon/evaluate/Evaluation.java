@@ -9,6 +9,7 @@ import gnomon.syntax.Condition.Relation;
 import gnomon.value.Status;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.OptionalInt;
 import java.util.function.Supplier;
 
 /// What is gathered and counted while one statement is evaluated: calls of defined functions, the
@@ -21,6 +22,7 @@ final class Evaluation {
   private final Grounds grounds;
   private final List<Condition> conditions = new ArrayList<>();
   private Status status = Status.NONE;
+  private OptionalInt truncation = OptionalInt.empty();
   private Assumptions implied = Assumptions.NONE;
   private int calls;
   private int depth;
@@ -70,6 +72,22 @@ final class Evaluation {
   /// The explanation of the answer, where one was asked for.
   Grounds grounds() {
     return grounds;
+  }
+
+  /// What `work` gives while images that are infinite series are cut off after D^order.
+  <T> T truncating(int order, Supplier<T> work) {
+    OptionalInt before = truncation;
+    truncation = OptionalInt.of(order);
+    try {
+      return work.get();
+    } finally {
+      truncation = before;
+    }
+  }
+
+  /// The order after which infinite images are cut off, where they are.
+  OptionalInt truncation() {
+    return truncation;
   }
 
   Status status() {

@@ -99,7 +99,8 @@ public final class Interpreter {
     return switch (met.kind()) {
       case CLOSED_FORM -> standing ? own : met;
       case NO_CLOSED_FORM, LEFT_AS_SUM, RECURRENCE -> standing ? met : Status.NONE;
-      case NONE, PROVED, REFUTED, OPEN -> own;
+      case NONE -> met.detail().isEmpty() ? own : met;
+      case PROVED, REFUTED, OPEN -> own;
     };
   }
 

@@ -78,7 +78,7 @@ final class RefusalWords {
               domain(
                   "the image is an infinite series without closed form",
                   "{1} applied to {2} does not end.",
-                  "exp(x) to 6")),
+                  "exp(D^2/2)(1/x) to 4")),
           Map.entry(
               "KERNEL_LOST",
               domain(

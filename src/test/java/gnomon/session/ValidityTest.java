@@ -59,4 +59,13 @@ class ValidityTest {
     List<String> lines = answers("Sigma(k: 0..n) k^a + Sigma(k: 0..n) k");
     assertTrue(lines.getFirst().endsWith("left as a sum"), lines.getFirst());
   }
+
+  @Test
+  void anInfiniteImageIsCutOffWhereAskedAndSaysSo() {
+    List<String> lines =
+        answers("exp(D^2/2)(1/x)", "exp(D^2/2)(1/x) to 4", "claim @1 = 1/x + 1/x^3 + 3/x^5");
+    assertTrue(lines.getFirst().startsWith("error domain-infinite-series"), lines.getFirst());
+    assertTrue(lines.get(1).endsWith("@1 cut off after D^4"), lines.get(1));
+    assertTrue(lines.get(2).startsWith("proved"), lines.get(2));
+  }
 }
