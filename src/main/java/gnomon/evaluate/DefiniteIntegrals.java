@@ -1,5 +1,7 @@
 package gnomon.evaluate;
 
+import gnomon.algebra.Refusal;
+import gnomon.decimal.Digits;
 import gnomon.evaluate.Binders.Limits;
 import gnomon.form.Factored;
 import gnomon.form.Form;
@@ -38,22 +40,16 @@ final class DefiniteIntegrals {
         .minus(antiderivative.substitute(t, limits.lower()));
   }
 
+  /// Symbolic limits and parameters are taken to stay clear of poles; between constants a pole must
+  /// be ruled out.
   private static void refusePoles(Form integrand, Limits limits) {
     Form denominator = Form.of(integrand.denominator());
     Variable t = limits.variable();
-    if (!denominator.dependsOn(t)) {
-      return;
-    }
-    Optional<Rational> from = limits.lower().asRational();
-    Optional<Rational> to = limits.upper().flatMap(Form::asRational);
-    if (from.isEmpty() || to.isEmpty()) {
-      if (limits.all().stream().allMatch(Form::isConstant)) {
-        throw notExcluded(limits);
-      }
+    if (!denominator.dependsOn(t) || !limits.all().stream().allMatch(Form::isConstant)) {
       return;
     }
     for (Factored.Factor factor : Structure.factored(denominator).factors()) {
-      if (factor.base().dependsOn(t) && mayVanish(factor.base(), limits, from.get(), to.get())) {
+      if (factor.base().dependsOn(t) && mayVanish(factor.base(), limits)) {
         throw Problems.of("domain-pole", "there is a pole inside the range", limits.span());
       }
     }
@@ -63,32 +59,46 @@ final class DefiniteIntegrals {
     return Problems.of("domain-pole", "a pole inside the range cannot be ruled out", limits.span());
   }
 
-  /// Whether the irreducible factor vanishes between the limits, which is decided for degrees up to
-  /// 2 with rational coefficients; symbolic ones are taken to stay clear of it.
-  private static boolean mayVanish(Form base, Limits limits, Rational from, Rational to) {
+  /// Whether the irreducible factor vanishes between the limits, for polynomials of degree up to 2.
+  private static boolean mayVanish(Form base, Limits limits) {
     Variable t = limits.variable();
-    Optional<Rational> first = base.substitute(t, Form.of(from)).asRational();
-    Optional<Rational> last = base.substitute(t, Form.of(to)).asRational();
-    if (first.isEmpty() || last.isEmpty()) {
+    List<Form> coefficients =
+        Structure.asPolynomial(base, t).orElseThrow(() -> notExcluded(limits));
+    if (coefficients.stream().anyMatch(c -> !c.variables().isEmpty())) {
       return false;
     }
-    if (first.get().sign() * last.get().sign() <= 0) {
+    Form upper = limits.upper().orElseThrow();
+    int first = sign(base.substitute(t, limits.lower()), limits);
+    int last = sign(base.substitute(t, upper), limits);
+    if (first * last <= 0) {
       return true;
     }
-    Optional<List<Form>> quadratic = Structure.asPolynomial(base, t);
-    if (quadratic.filter(coefficients -> coefficients.size() <= 2).isPresent()) {
-      return false;
+    return switch (coefficients.size()) {
+      case 2 -> false;
+      case 3 -> {
+        Form vertex = coefficients.get(1).dividedBy(coefficients.get(2).times(Form.of(-2)));
+        int before = sign(vertex.minus(limits.lower()), limits);
+        int after = sign(upper.minus(vertex), limits);
+        yield before * after > 0 && sign(base.substitute(t, vertex), limits) != first;
+      }
+      default -> throw notExcluded(limits);
+    };
+  }
+
+  /// The sign of a real constant.
+  private static int sign(Form constant, Limits limits) {
+    Optional<Rational> rational = constant.asRational();
+    if (rational.isPresent()) {
+      return rational.get().sign();
     }
-    if (quadratic.isEmpty() || quadratic.get().size() != 3) {
+    try {
+      Digits digits = Digits.of(constant, 3);
+      if (digits.isReal() && digits.real().signum() != 0) {
+        return digits.real().signum();
+      }
+    } catch (Refusal undecided) {
       throw notExcluded(limits);
     }
-    Form vertex =
-        quadratic.get().get(1).dividedBy(quadratic.get().get(2).times(Form.TWO)).negated();
-    Optional<Rational> place = vertex.asRational();
-    Optional<Rational> extreme = base.substitute(t, vertex).asRational();
-    Rational low = from.compareTo(to) <= 0 ? from : to;
-    Rational high = from.compareTo(to) <= 0 ? to : from;
-    return place.filter(p -> p.compareTo(low) > 0 && p.compareTo(high) < 0).isPresent()
-        && extreme.filter(e -> e.sign() * first.get().sign() < 0).isPresent();
+    throw notExcluded(limits);
   }
 }

@@ -27,7 +27,7 @@ public final class Recheck {
     List<Callable<RecheckReport>> tasks = new ArrayList<>();
     for (Input input : inputs) {
       Path folder = input.file().getParent() == null ? Path.of("") : input.file().getParent();
-      tasks.add(() -> check(input.file(), input.text(), settings.withFolder(folder)));
+      tasks.add(() -> checkHere(input.file(), input.text(), settings.withFolder(folder)));
     }
     try (var pool = Executors.newFixedThreadPool(Math.max(1, workers), BigStack.threads())) {
       List<RecheckReport> reports = new ArrayList<>();
@@ -45,6 +45,11 @@ public final class Recheck {
 
   /// Rechecks the text of one file.
   public static RecheckReport check(Path file, String text, Settings settings) {
+    return BigStack.call(() -> checkHere(file, text, settings));
+  }
+
+  /// As [#check], in the thread of the caller.
+  static RecheckReport checkHere(Path file, String text, Settings settings) {
     long start = System.nanoTime();
     Session session = Session.of(settings);
     List<RecheckReport.Item> items = new ArrayList<>();
@@ -73,7 +78,7 @@ public final class Recheck {
 
   /// The text of a session file with the answers that a fresh session gives.
   public static String rerecorded(String text, Settings settings) {
-    return renewed(SessionFile.parse(text), settings).text();
+    return BigStack.call(() -> renewed(SessionFile.parse(text), settings).text());
   }
 
   private static RecheckReport.Item item(SessionFile.Exchange exchange, Session session) {

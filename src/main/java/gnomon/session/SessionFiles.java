@@ -33,7 +33,7 @@ final class SessionFiles {
   RecheckReport recheck(Statement.Recheck recheck) {
     Path path = path(recheck.file(), recheck.span());
     String text = text(path, recheck.span());
-    return Recheck.check(Path.of(recheck.file()), text, apart(path));
+    return Recheck.checkHere(Path.of(recheck.file()), text, apart(path));
   }
 
   List<String> rerecord(Statement.Rerecord rerecord) {
