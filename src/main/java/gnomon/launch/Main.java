@@ -27,6 +27,8 @@ import java.util.Optional;
 import org.jline.terminal.Size;
 import org.jline.terminal.Terminal;
 import org.jline.terminal.TerminalBuilder;
+import org.jline.utils.InfoCmp;
+import org.jspecify.annotations.Nullable;
 
 /// Where the program starts.
 public final class Main {
@@ -81,6 +83,7 @@ public final class Main {
 
   private static ExitStatus converse(boolean ascii) throws IOException {
     boolean narrow = ascii || !"UTF-8".equals(System.getProperty("native.encoding"));
+    knowTerminal(System.getenv("TERM"));
     try (Terminal terminal =
         TerminalBuilder.builder()
             .name("gnomon")
@@ -97,6 +100,15 @@ public final class Main {
       Console.open(terminal, System.getenv(), narrow, Path.of("")).converse(greeting);
     }
     return ExitStatus.FINE;
+  }
+
+  /// Uses the description of the terminal that JLine carries, where it has one: asking the system
+  /// for it starts another program, the slowest part of opening the console.
+  private static void knowTerminal(@Nullable String type) {
+    String description = type == null ? null : InfoCmp.getDefaultInfoCmp(type);
+    if (description != null) {
+      InfoCmp.setLoadedInfoCmp(type, description);
+    }
   }
 
   private static ExitStatus run(String file, boolean json) throws IOException {
