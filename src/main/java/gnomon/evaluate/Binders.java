@@ -26,7 +26,12 @@ final class Binders {
   }
 
   /// A range with its limits evaluated; without upper limit it is infinite.
-  record Limits(Variable variable, Form lower, Optional<Form> upper, Span span) {
+  record Limits(String name, Variable variable, Form lower, Optional<Form> upper, Span span) {
+
+    /// The scope in which what is summed stands.
+    Scope inside(Scope scope) {
+      return scope.binding(name, variable);
+    }
 
     Optional<BigInteger> first() {
       return lower.asInteger();
@@ -57,8 +62,7 @@ final class Binders {
         yield sums.value(limits, binder.body(), false, scope);
       }
       case INTEGRAL -> {
-        Scope inside = scope.with(limits.variable().name(), new Binding.Bound(limits.variable()));
-        Value body = evaluator.value(binder.body(), inside);
+        Value body = evaluator.value(binder.body(), limits.inside(scope));
         Form form = Sorts.form(body, binder.body().span(), "what is integrated");
         yield Places.at(binder.span(), () -> Sorts.of(integrals.value(limits, form, scope), scope));
       }
@@ -71,12 +75,13 @@ final class Binders {
         isInfinity(range.upper(), scope)
             ? Optional.empty()
             : Optional.of(limit(range.upper(), scope));
-    Variable variable = new Variable(range.variable().text());
+    String name = range.variable().text();
+    Variable variable = scope.fresh(name);
     if (lower.dependsOn(variable) || upper.filter(u -> u.dependsOn(variable)).isPresent()) {
       throw Problems.of(
           "kind-range", "a limit contains the bound variable " + variable.name(), range.span());
     }
-    return new Limits(variable, lower, upper, range.span());
+    return new Limits(name, variable, lower, upper, range.span());
   }
 
   static boolean isInfinity(Expression expression, Scope scope) {

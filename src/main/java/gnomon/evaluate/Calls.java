@@ -10,6 +10,7 @@ import gnomon.form.Unknown;
 import gnomon.form.Variable;
 import gnomon.operator.Functional;
 import gnomon.operator.Operator;
+import gnomon.summation.Condition;
 import gnomon.syntax.Expression;
 import gnomon.syntax.Spelling;
 import gnomon.syntax.StatementText;
@@ -22,6 +23,7 @@ import gnomon.value.MapValue;
 import gnomon.value.SeriesValue;
 import gnomon.value.Value;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 
@@ -111,13 +113,53 @@ final class Calls {
     expect(rule.name(), rule.parameters().size(), arguments.size(), span);
     Scope inside =
         rule.scope().with(rule.name(), rule).running(scope.running()).assuming(scope.assumptions());
+    Optional<Value> point = Optional.empty();
     for (int i = 0; i < arguments.size(); i++) {
+      String parameter = rule.parameters().get(i);
       Value value = evaluator.value(arguments.get(i), scope);
-      inside = inside.with(rule.parameters().get(i), new Binding.Held(value));
+      inside = inside.with(parameter, new Binding.Held(value));
+      if (parameter.equals(scope.running().name()) && value instanceof FormValue) {
+        point = Optional.of(value);
+      }
     }
     Scope body = inside;
+    Optional<Form> at = point.map(value -> ((FormValue) value).form());
     return evaluation.calling(
-        rule.name(), span, () -> Places.calledFrom(span, () -> evaluator.value(rule.body(), body)));
+        rule.name(),
+        span,
+        () ->
+            Places.calledFrom(
+                span,
+                () ->
+                    at.isPresent()
+                        ? atPoint(rule, at.get(), body)
+                        : evaluator.value(rule.body(), body)));
+  }
+
+  /// A rule whose parameter is the running variable: operators in it act on that variable, so the
+  /// argument is put in after they have been applied. Where that is outside the validity of a
+  /// closed form, or the result is no function, the argument stands for the parameter from the
+  /// start.
+  private Value atPoint(Binding.Rule rule, Form point, Scope body) {
+    String name = body.running().name();
+    Variable variable = body.fresh(name + "'");
+    List<Condition> earlier = evaluation.conditions();
+    evaluation.conditions(List.of());
+    Value value = evaluator.value(rule.body(), body.binding(name, variable));
+    List<Condition> met = evaluation.conditions();
+    evaluation.conditions(earlier);
+    if (value instanceof FormValue form && !Validity.fails(met, Map.of(variable, point))) {
+      met.forEach(condition -> require(condition, variable, point));
+      return Sorts.of(Substitutions.addedUp(form.form().substitute(variable, point)), body);
+    }
+    return evaluator.value(rule.body(), body);
+  }
+
+  private void require(Condition condition, Variable variable, Form point) {
+    Form subject = condition.subject().substitute(variable, point);
+    if (!subject.isConstant()) {
+      evaluation.require(List.of(new Condition(subject, condition.relation())));
+    }
   }
 
   private Value arbitrary(
@@ -147,7 +189,8 @@ final class Calls {
       case "umbral" -> {
         expect(name, 1, arguments.size(), span);
         yield new MapValue(
-            ShefferMap.umbral(symbol(arguments.getFirst(), span), new Dual(scope.running())));
+            ShefferMap.umbral(
+                symbol(arguments.getFirst(), span), dual(arguments.getFirst(), span, scope)));
       }
       case "sheffer" -> {
         expect(name, 2, arguments.size(), span);
@@ -155,7 +198,7 @@ final class Calls {
             ShefferMap.sheffer(
                 symbol(arguments.getFirst(), span),
                 symbol(arguments.getLast(), span),
-                new Dual(scope.running())));
+                dual(arguments.getFirst(), span, scope)));
       }
       case "H" -> harmonic(arguments, span, scope);
       case "binom", "falling", "rising" -> {
@@ -216,6 +259,14 @@ final class Calls {
     return Elementary.apply(function, argument)
         .orElseThrow(
             () -> Problems.of("kind-arguments", function + " cannot be applied here", span));
+  }
+
+  /// The symbol variable of the operator, which may act on another variable than the running one.
+  private static Dual dual(Value value, Span span, Scope scope) {
+    return Arithmetic.plain(value, span).variables().stream()
+        .findFirst()
+        .map(Dual::new)
+        .orElse(new Dual(scope.running()));
   }
 
   /// The symbol of a shift-invariant operator from which a map is made.

@@ -9,7 +9,6 @@ import gnomon.value.FormValue;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
-import java.util.stream.Collectors;
 
 /// The side conditions of an answer in the words of the status line.
 final class Conditions {
@@ -23,9 +22,12 @@ final class Conditions {
   }
 
   String words(List<Condition> conditions) {
-    return conditions.isEmpty()
-        ? ""
-        : "for " + conditions.stream().map(this::words).collect(Collectors.joining(", "));
+    List<String> said =
+        conditions.stream()
+            .filter(condition -> condition.relation() != Condition.Relation.RANGE_LENGTH)
+            .map(this::words)
+            .toList();
+    return said.isEmpty() ? "" : "for " + String.join(", ", said);
   }
 
   private String words(Condition condition) {
@@ -33,7 +35,7 @@ final class Conditions {
     return switch (condition.relation()) {
       case NOT_ZERO -> compared(condition.subject(), " != ");
       case INTEGER -> "integer " + subject;
-      case NATURAL -> compared(condition.subject(), " >= ");
+      case NATURAL, RANGE_LENGTH -> compared(condition.subject(), " >= ");
       case NOT_IN_RANGE -> subject + " outside the range";
     };
   }

@@ -46,11 +46,10 @@ final class RangeSums {
 
   /// The body as a function of the bound variable; between numbers it need not be one.
   private Optional<Form> symbolic(Limits limits, Expression body, Scope scope) {
-    Scope inside = scope.with(limits.variable().name(), new Binding.Bound(limits.variable()));
     List<Condition> earlier = evaluation.conditions();
     try {
       evaluation.conditions(List.of());
-      Value value = evaluator.value(body, inside);
+      Value value = evaluator.value(body, limits.inside(scope));
       List<Condition> met = evaluation.conditions();
       evaluation.conditions(earlier);
       if (Validity.fails(met, Map.of(limits.variable(), limits.lower()))) {
@@ -72,7 +71,7 @@ final class RangeSums {
       return Optional.empty();
     } catch (LocatedRefusal | DiagnosedException needsNumbers) {
       evaluation.conditions(earlier);
-      if (limits.isNumeric()) {
+      if (limits.isNumeric() && !scope.running().name().equals(limits.name())) {
         return Optional.empty();
       }
       throw needsNumbers;
@@ -118,9 +117,19 @@ final class RangeSums {
     }
     evaluation.met(status(sum, evaluation.writing(), scope.running()));
     evaluation.require(sum.conditions());
+    notEmpty(limits).ifPresent(taken -> evaluation.require(List.of(taken)));
     sum.antidifference().ifPresent(found -> record(found, body, sum.value(), limits));
     sum.recurrence().ifPresent(found -> new RecurrenceSteps(evaluation, k).record(found));
     return Sorts.of(sum.value(), scope);
+  }
+
+  /// What is taken for granted of a symbolic range: that it is at the shortest empty.
+  private static Optional<Condition> notEmpty(Limits limits) {
+    return limits
+        .upper()
+        .map(upper -> upper.minus(limits.lower()).plus(Form.ONE))
+        .filter(count -> !count.isConstant())
+        .map(count -> new Condition(count, Condition.Relation.RANGE_LENGTH));
   }
 
   static Status status(DefiniteSum sum, Writing writing, Variable running) {
@@ -164,8 +173,7 @@ final class RangeSums {
       Halt halt = new Halt(Halt.Cause.SIZE, count.min(BigInteger.TWO.pow(62)).longValue());
       throw new LocatedHalt(halt, limits.span());
     }
-    List<Value> values =
-        new RangeValues(evaluator).values(limits.variable(), first, last, body, scope);
+    List<Value> values = new RangeValues(evaluator).values(limits.name(), first, last, body, scope);
     if (values.isEmpty()) {
       return Sorts.of(adding ? Form.ZERO : Form.ONE, scope);
     }

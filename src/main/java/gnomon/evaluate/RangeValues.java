@@ -29,18 +29,18 @@ final class RangeValues {
     this.evaluation = evaluator.evaluation();
   }
 
-  List<Value> values(
-      Variable variable, BigInteger first, BigInteger last, Expression body, Scope scope) {
+  List<Value> values(String name, BigInteger first, BigInteger last, Expression body, Scope scope) {
+    Variable variable = scope.fresh(name);
     List<Condition> earlier = evaluation.conditions();
     evaluation.conditions(List.of());
-    Optional<FormValue> symbolic = symbolic(variable, body, scope);
+    Optional<FormValue> symbolic = symbolic(name, variable, body, scope);
     List<Condition> conditions = evaluation.conditions();
     evaluation.conditions(earlier);
     List<Value> values = new ArrayList<>();
     for (BigInteger k = first; k.compareTo(last) <= 0; k = k.add(BigInteger.ONE)) {
       Budget.checkpoint();
       boolean valid = !Validity.fails(conditions, Map.of(variable, Form.of(k)));
-      values.add(valueAt(variable, k, symbolic.filter(_ -> valid), body, scope));
+      values.add(valueAt(name, variable, k, symbolic.filter(_ -> valid), body, scope));
     }
     evaluation.require(
         conditions.stream()
@@ -50,20 +50,25 @@ final class RangeValues {
   }
 
   private Value valueAt(
-      Variable variable, BigInteger k, Optional<FormValue> symbolic, Expression body, Scope scope) {
+      String name,
+      Variable variable,
+      BigInteger k,
+      Optional<FormValue> symbolic,
+      Expression body,
+      Scope scope) {
     Form at = Form.of(k);
     if (symbolic.isPresent()) {
       try {
-        return Sorts.of(symbolic.get().form().substitute(variable, at), scope);
+        Form value = symbolic.get().form().substitute(variable, at);
+        return Sorts.of(Substitutions.addedUp(value), scope);
       } catch (Refusal pole) {
-        if (scope.running().equals(variable)) {
+        if (scope.running().name().equals(name)) {
           throw pole(variable, k, body.span());
         }
       }
     }
     try {
-      return evaluator.value(
-          body, scope.with(variable.name(), new Binding.Held(Sorts.of(at, scope))));
+      return evaluator.value(body, scope.with(name, new Binding.Held(Sorts.of(at, scope))));
     } catch (LocatedRefusal refused) {
       if (symbolic.isPresent()) {
         throw pole(variable, k, body.span());
@@ -72,13 +77,20 @@ final class RangeValues {
     }
   }
 
-  private Optional<FormValue> symbolic(Variable variable, Expression body, Scope scope) {
+  /// The value with the variable left free. Where it is the running variable there must be one, for
+  /// operators act on it.
+  private Optional<FormValue> symbolic(
+      String name, Variable variable, Expression body, Scope scope) {
+    boolean running = scope.running().name().equals(name);
     try {
-      Scope inside = scope.with(variable.name(), new Binding.Bound(variable));
-      return evaluator.value(body, inside) instanceof FormValue value && !hasStandingSums(value)
+      return evaluator.value(body, scope.binding(name, variable)) instanceof FormValue value
+              && (running || !hasStandingSums(value))
           ? Optional.of(value)
           : Optional.empty();
     } catch (LocatedRefusal | DiagnosedException needsNumbers) {
+      if (running) {
+        throw needsNumbers;
+      }
       return Optional.empty();
     }
   }

@@ -1,6 +1,7 @@
 package gnomon.evaluate;
 
 import gnomon.form.Variable;
+import gnomon.value.FormValue;
 import java.util.Map;
 import java.util.Optional;
 import java.util.SortedMap;
@@ -60,6 +61,31 @@ public final class Scope {
   /// The names with a meaning, in alphabetical order.
   public SortedMap<String, Binding> names() {
     return new TreeMap<>(names);
+  }
+
+  /// The variable for a name that is bound here: the name itself, unless the argument of a call
+  /// contains a variable of that name, which must not be mistaken for the bound one.
+  Variable fresh(String name) {
+    Variable variable = new Variable(name);
+    while (isHeld(variable)) {
+      variable = new Variable(variable.name() + "'");
+    }
+    return variable;
+  }
+
+  private boolean isHeld(Variable variable) {
+    return names.values().stream()
+        .anyMatch(
+            binding ->
+                binding instanceof Binding.Held(FormValue(var form, _, _))
+                    && form.dependsOn(variable));
+  }
+
+  /// The scope in which a name stands for a bound variable. Where it is the name of the running
+  /// variable, operators act on the bound one.
+  Scope binding(String name, Variable variable) {
+    Scope inside = with(name, new Binding.Bound(variable));
+    return running.name().equals(name) ? inside.running(variable) : inside;
   }
 
   /// The scope with one more name.

@@ -34,7 +34,8 @@ final class Tables {
       throw new LocatedHalt(new Halt(Halt.Cause.SIZE, rows), span);
     }
     Budget.charge(last.subtract(first).longValue());
-    List<Value> values = new RangeValues(evaluator).values(variable, first, last, subject, scope);
+    List<Value> values =
+        new RangeValues(evaluator).values(variable.name(), first, last, subject, scope);
     List<List<Value>> rows = new ArrayList<>();
     BigInteger at = first;
     for (Value value : values) {
@@ -47,8 +48,7 @@ final class Tables {
   /// The variable and what is tabulated, where that has a value with the variable left free.
   private List<Value> header(Variable variable, Expression subject, Scope scope) {
     try {
-      Scope inside = scope.with(variable.name(), new Binding.Bound(variable));
-      Value shown = evaluator.value(subject, inside);
+      Value shown = evaluator.value(subject, scope.binding(variable.name(), variable));
       return shown instanceof FormValue
           ? List.of(FormValue.of(Form.of(variable), scope.running()), shown)
           : List.of();

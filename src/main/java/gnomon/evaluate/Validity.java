@@ -36,7 +36,8 @@ final class Validity {
         switch (condition.relation()) {
           case NOT_ZERO -> form -> !form.isZero();
           case INTEGER -> form -> form.asInteger().isPresent();
-          case NATURAL -> form -> form.asInteger().filter(n -> n.signum() >= 0).isPresent();
+          case NATURAL, RANGE_LENGTH ->
+              form -> form.asInteger().filter(n -> n.signum() >= 0).isPresent();
           case NOT_IN_RANGE -> _ -> false;
         };
     return Optional.of(value).filter(test).isPresent();

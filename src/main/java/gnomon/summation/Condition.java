@@ -17,7 +17,10 @@ public record Condition(Form subject, Relation relation) {
     /// The subject is an integer and at least zero.
     NATURAL,
     /// The subject, a pole, is none of the points summed over.
-    NOT_IN_RANGE
+    NOT_IN_RANGE,
+    /// The subject is the number of terms of a sum, an integer and at least zero; that is taken for
+    /// granted of symbolic ends.
+    RANGE_LENGTH
   }
 
   public Condition {
