@@ -355,7 +355,7 @@ public final class Operator {
     }
     Form image = function.apply(symbol);
     for (Dual t : symbol.duals()) {
-      if (Expansion.of(image, t, 0).valuation() < 0) {
+      if (Expansion.tryOf(image, t, 0).filter(series -> series.valuation() >= 0).isEmpty()) {
         throw new Refusal(Reason.NO_SERIES, image);
       }
       Inversion.requireSameBranch(function, symbol, image, t);
