@@ -1,5 +1,6 @@
 package gnomon.render;
 
+import gnomon.algebra.Refusal;
 import gnomon.form.Form;
 import gnomon.form.Generator;
 import gnomon.form.Variable;
@@ -38,7 +39,42 @@ public final class FormNotation {
 
   /// The form as a sum of terms.
   public Notation of(Form form) {
-    return sum(form, false);
+    List<Variable> constants =
+        form.variables().stream().filter(FormNotation::isUndetermined).toList();
+    return constants.isEmpty() ? sum(form, false) : withConstants(form, constants);
+  }
+
+  /// Whether the variable is a constant that an inverse leaves open: C1, C2, ….
+  private static boolean isUndetermined(Variable variable) {
+    return variable.name().matches("C[0-9]+");
+  }
+
+  /// The form with its undetermined constants set apart, as an antiderivative is written.
+  private Notation withConstants(Form form, List<Variable> constants) {
+    Map<Generator, Form> none = new LinkedHashMap<>();
+    constants.forEach(constant -> none.put(constant, Form.ZERO));
+    List<Form> parts = new ArrayList<>();
+    try {
+      parts.add(form.substitute(none));
+      for (Variable constant : constants.reversed()) {
+        Form coefficient = form.derivative(constant);
+        if (constants.stream().anyMatch(coefficient::dependsOn)) {
+          return sum(form, false);
+        }
+        parts.add(coefficient.times(Form.of(constant)));
+      }
+    } catch (Refusal notLinear) {
+      return sum(form, false);
+    }
+    List<Notation> terms = new ArrayList<>();
+    for (Form part : parts) {
+      if (!part.isZero()) {
+        Notation notation = sum(part, false);
+        terms.addAll(
+            notation instanceof Notation.Sum(List<Notation> inner) ? inner : List.of(notation));
+      }
+    }
+    return Notation.sum(terms);
   }
 
   /// The form as it stands in exponents and arguments, with `x/2` for half of x.
