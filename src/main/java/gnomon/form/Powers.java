@@ -152,8 +152,17 @@ final class Powers {
             : kernel(base, exponent);
       }
       case Base.Zero _ -> zero(exponent);
-      case Base.Prime _, Base.Of _ -> kernel(base, exponent);
+      case Base.Prime _, Base.Of _ ->
+          hasLogarithm(exponent.unit())
+              ? raise(
+                  Base.NATURAL, base.logarithm().times(exponent.unit()).times(exponent.factor()))
+              : kernel(base, exponent);
     };
+  }
+
+  /// Whether a logarithm stands among the factors, so that b^u and c^v may be the same power.
+  private static boolean hasLogarithm(Form unit) {
+    return unit.generators().stream().anyMatch(Logarithm.class::isInstance);
   }
 
   private static Form kernel(Base base, Scaled exponent) {
@@ -189,8 +198,10 @@ final class Powers {
       }
       for (Monomial.Power power : monomial.factors()) {
         if (power.indeterminate() instanceof Logarithm log && power.exponent().isOne()) {
-          Form rest = unit.dividedBy(Form.of(log)).times(exponent.factor());
-          return power(log.argument(), rest);
+          Form rest = unit.dividedBy(Form.of(log));
+          if (!hasLogarithm(rest)) {
+            return power(log.argument(), rest.times(exponent.factor()));
+          }
         }
       }
     }

@@ -132,4 +132,15 @@ class PowersTest {
     Form mixed = x.inverse().plus(zero.times(x.plus(Form.of(5))));
     assertEquals(mixed, mixed.plus(zero).minus(zero));
   }
+
+  @Test
+  void powersOfLogarithmsAreOneNumberHoweverTheyAreWritten() {
+    Form two = Elementary.ln(Form.TWO);
+    Form three = Elementary.ln(Form.of(3));
+    assertEquals(Elementary.exp(two.times(two)), Elementary.power(Form.TWO, two));
+    assertEquals(Elementary.power(Form.of(3), two), Elementary.power(Form.TWO, three));
+    Form mixed = Elementary.power(x, Elementary.ln(x.plus(Form.ONE)));
+    assertEquals(mixed, Elementary.power(x.plus(Form.ONE), Elementary.ln(x)));
+    assertEquals(x.power(2), Elementary.exp(Elementary.ln(x).times(Form.TWO)));
+  }
 }
