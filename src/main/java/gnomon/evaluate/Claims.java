@@ -198,6 +198,11 @@ final class Claims {
           new Open(
               "the sides differ on " + x.name() + "^" + power + " by constants left open",
               "an inverse modulo a kernel is determined only up to C1, C2, ...");
+      case Comparison.Different(int power, Form first, Form second)
+          when !certainlyDiffer(first, second, scope) ->
+          new Open(
+              "the images of " + x.name() + "^" + power + " are written differently",
+              "no point was found at which they certainly differ");
       case Comparison.Different(int power, Form first, Form second) ->
           new Refuted(
               new Witness.OnFunction(
@@ -209,6 +214,14 @@ final class Claims {
               x.name() + "^0, ..., " + x.name() + "^" + checkedTo,
               "the normal form does not decide operators of this kind");
     };
+  }
+
+  /// Whether two forms have certainly different values at some point. Forms that only look
+  /// different, such as logarithms whose sum is 0, do not count.
+  private boolean certainlyDiffer(Form left, Form right, Scope scope) {
+    Assumptions assumptions = scope.assumptions().and(evaluation.implied());
+    return UnknownFunctions.witness(left, right, assumptions, scope).isPresent()
+        || Witnesses.search(left, right, assumptions, scope).witness().isPresent();
   }
 
   private static MappedOperator asOperator(Value value, Span span) {
@@ -246,8 +259,13 @@ final class Claims {
     SeriesArithmetic arithmetic = new SeriesArithmetic(scope);
     Value minus = new Arithmetic(evaluation).negated(right, span, scope);
     SeriesValue difference = (SeriesValue) arithmetic.plus(left, minus, span);
-    if (!difference.coefficients().isEmpty()) {
+    if (difference.coefficients().stream().anyMatch(c -> certainlyDiffer(c, Form.ZERO, scope))) {
       return new Refuted(new Witness.Sides(left, right));
+    }
+    if (!difference.coefficients().isEmpty()) {
+      return new Open(
+          "the coefficients are written differently",
+          "no point was found at which they certainly differ");
     }
     return new Proved(new Ground.Words("both sides agree up to", Optional.of(difference)));
   }

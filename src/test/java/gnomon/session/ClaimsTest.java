@@ -114,4 +114,29 @@ final class ClaimsTest {
     assertEquals(
         true, answer.shown().lines(Spelling.ASCII).getFirst().contains("by checking each point"));
   }
+
+  /// Both sides are equal, but ln(1 + √2) + ln(√2 − 1) is not seen to be 0 by the normal form.
+  @ParameterizedTest
+  @ValueSource(
+      strings = {
+        "E^(ln(1+sqrt(2))) E^(ln(sqrt(2)-1)) = 1",
+        "eps(ln(1+sqrt(2)) + ln(sqrt(2)-1)) = eps(0)",
+        "(ln(1+sqrt(2)) + ln(sqrt(2)-1)) x + O(x^3) = O(x^3)",
+      })
+  void aTrueClaimIsNotRefutedBecauseItsSidesLookDifferent(String claim) {
+    assertEquals("open", verdict(claim));
+  }
+
+  @ParameterizedTest
+  @ValueSource(
+      strings = {
+        "E^(ln(1+sqrt(2))) = 1",
+        "eps(ln(2)) = eps(0)",
+        "ln(2) x + O(x^3) = O(x^3)",
+        "a D = D",
+        "E^a = E",
+      })
+  void operatorsAndSeriesThatCertainlyDifferAreRefuted(String claim) {
+    assertEquals("refuted", verdict(claim));
+  }
 }
