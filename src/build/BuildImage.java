@@ -1,5 +1,7 @@
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.FileSystem;
+import java.nio.file.FileSystems;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
@@ -42,6 +44,7 @@ public final class BuildImage {
     Files.createDirectories(image.resolve("lib"));
     Files.createDirectories(image.resolve("bin"));
     List<String> names = copyJars();
+    unpackTerminalLibraries();
     writeLauncher(names);
     for (String text : List.of("LICENSE", "THIRD-PARTY.md")) {
       copy(project.resolve(text), image.resolve(text));
@@ -95,6 +98,33 @@ public final class BuildImage {
     return names;
   }
 
+  /// Lays JLine's terminal libraries out beside the jars, where its loader looks first; without
+  /// that it would unpack one into the temporary folder at every start.
+  private void unpackTerminalLibraries() throws IOException {
+    for (Path jar : jarsNamed("jline-native-")) {
+      try (FileSystem contents = FileSystems.newFileSystem(jar)) {
+        Path root = contents.getPath("org/jline/nativ");
+        try (var files = Files.walk(root)) {
+          for (Path file : files.filter(BuildImage::isTerminalLibrary).toList()) {
+            Path copy = image.resolve("lib/native").resolve(root.relativize(file).toString());
+            Files.createDirectories(copy.getParent());
+            copy(file, copy);
+          }
+        }
+      }
+    }
+  }
+
+  private List<Path> jarsNamed(String start) throws IOException {
+    try (var files = Files.list(jars)) {
+      return files.filter(file -> file.getFileName().toString().startsWith(start)).toList();
+    }
+  }
+
+  private static boolean isTerminalLibrary(Path file) {
+    return Files.isRegularFile(file) && file.getFileName().toString().contains("jlinenative.");
+  }
+
   private void writeLauncher(List<String> names) throws IOException {
     Path launcher = image.resolve("bin").resolve("gnomon");
     String text = Files.readString(project.resolve("src/launcher/gnomon"));
@@ -118,6 +148,7 @@ public final class BuildImage {
     command.addAll(tuning);
     command.addAll(List.of("-XX:+UseSerialGC", "-XX:AOTCacheOutput=" + file, "-Xlog:disable"));
     command.addAll(List.of("-Xss4m", "--enable-native-access=ALL-UNNAMED"));
+    command.add("-Dlibrary.jline.path=" + image.resolve("lib/native"));
     command.add("--sun-misc-unsafe-memory-access=allow");
     command.addAll(List.of("-cp", classPath(image.toString(), names), "gnomon.launch.Main"));
     command.addAll(arguments);

@@ -88,7 +88,7 @@ public final class Main {
         TerminalBuilder.builder()
             .name("gnomon")
             .system(true)
-            .provider("ffm")
+            .provider("jni")
             .dumb(true)
             .nativeSignals(true)
             .encoding(StandardCharsets.UTF_8)
