@@ -51,6 +51,7 @@ public final class BuildImage {
     }
     rehearse("batch", List.of("-XX:TieredStopAtLevel=1"), names, List.of("run", REHEARSAL));
     rehearse("console", List.of(), names, List.of());
+    recheckExamples();
   }
 
   private void linkRuntime() throws IOException, InterruptedException {
@@ -95,6 +96,7 @@ public final class BuildImage {
       copy(jar, image.resolve("lib").resolve(name));
       names.add(name);
     }
+    PlainSwitches.rewrite(image.resolve("lib/gnomon.jar"));
     return names;
   }
 
@@ -156,6 +158,21 @@ public final class BuildImage {
     if (!Files.exists(file)) {
       System.err.println(output);
       System.err.println("No " + cache + " cache was made; gnomon will start more slowly.");
+    }
+  }
+
+  /// An image whose classes or caches change an answer must not be kept.
+  private void recheckExamples() throws IOException, InterruptedException {
+    List<String> command = new ArrayList<>();
+    command.add(image.resolve("bin/gnomon").toString());
+    command.add("recheck");
+    try (var files = Files.list(project.resolve("session-examples"))) {
+      files.map(Path::toString).filter(f -> f.endsWith(".gnomon")).sorted().forEach(command::add);
+    }
+    Ended recheck = run(command);
+    if (recheck.status() != 0) {
+      System.err.println(recheck.output());
+      System.exit(1);
     }
   }
 
