@@ -25,6 +25,8 @@ public enum Reason {
   INFINITE_COMPOSITION,
   /// An image with infinitely many terms. Data: the symbol, the form.
   INFINITE_SERIES,
+  /// An infinite sum that no method at hand finds. Data: the summand.
+  INFINITE_SUM_UNDECIDED,
   /// Undetermined constants that the result could not express. Data: the symbol applied to them,
   /// the variable, the order of the kernel.
   KERNEL_LOST,

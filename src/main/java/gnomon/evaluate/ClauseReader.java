@@ -69,6 +69,11 @@ final class ClauseReader {
         at++;
         continue;
       }
+      if (clause instanceof Clause.At values && values.substitutions().size() > 1) {
+        value = putIn(value, values, upTo(clausal, at), clausal.subject().span(), scope);
+        at++;
+        continue;
+      }
       Value before = value;
       Optional<Clause.To> order =
           at + 1 < clauses.size() && clauses.get(at + 1) instanceof Clause.To to
@@ -86,6 +91,23 @@ final class ClauseReader {
       at += joined ? 2 : 1;
     }
     return value;
+  }
+
+  /// Several values put in at once. Where the form has no limit there, as binom(n, k) at n = −2, k
+  /// = 3, the expression may still have its meaning for numbers, in which it is evaluated anew.
+  private Value putIn(Value value, Clause.At clause, Expression subject, Span start, Scope scope) {
+    try {
+      return Places.at(start.to(clause.span()), () -> applied(value, clause, scope));
+    } catch (LocatedRefusal refused) {
+      if (refused.refusal().reason() != Reason.LIMIT_UNDECIDED) {
+        throw refused;
+      }
+      try {
+        return evaluator.value(subject, substitutions.holding(clause, scope));
+      } catch (LocatedRefusal _) {
+        throw refused;
+      }
+    }
   }
 
   /// The expression without its last clause.

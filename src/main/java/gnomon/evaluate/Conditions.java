@@ -6,6 +6,7 @@ import gnomon.number.Rational;
 import gnomon.summation.Condition;
 import gnomon.summation.FunctionClass;
 import gnomon.value.FormValue;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
@@ -22,11 +23,18 @@ final class Conditions {
   }
 
   String words(List<Condition> conditions) {
-    List<String> said =
-        conditions.stream()
-            .filter(condition -> condition.relation() != Condition.Relation.RANGE_LENGTH)
-            .map(this::words)
-            .toList();
+    List<String> said = new ArrayList<>();
+    List<String> outside = new ArrayList<>();
+    for (Condition condition : conditions) {
+      switch (condition.relation()) {
+        case NOT_ZERO, INTEGER, NATURAL -> said.add(words(condition));
+        case NOT_IN_RANGE -> outside.add(text(condition.subject()));
+        case RANGE_LENGTH -> {}
+      }
+    }
+    if (!outside.isEmpty()) {
+      said.add(String.join(" and ", outside) + " outside the range");
+    }
     return said.isEmpty() ? "" : "for " + String.join(", ", said);
   }
 

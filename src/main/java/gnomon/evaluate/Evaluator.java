@@ -120,7 +120,8 @@ final class Evaluator {
       throw Problems.of(
           "kind-mixed-bracket",
           "a bracket with operators and other things is neither list nor commutator",
-          bracket.span());
+          bracket.span(),
+          "[D, X]");
     }
     MappedOperator a = Sorts.asOperator(items.getFirst()).orElseThrow();
     MappedOperator b = Sorts.asOperator(items.getLast()).orElseThrow();

@@ -95,10 +95,11 @@ public final class Interpreter {
     if (!(value instanceof FormValue)) {
       return own;
     }
-    boolean standing = own.kind() == Status.Kind.LEFT_AS_SUM;
+    boolean standing = own.isLeft();
     return switch (met.kind()) {
       case CLOSED_FORM -> standing ? own : met;
-      case NO_CLOSED_FORM, LEFT_AS_SUM, RECURRENCE -> standing ? met : Status.NONE;
+      case LEFT_AS_SUM, LEFT_AS_PRODUCT, LEFT_AS_INTEGRAL -> standing ? own : Status.NONE;
+      case NO_CLOSED_FORM, RECURRENCE -> standing ? met : Status.NONE;
       case NONE -> met.detail().isEmpty() ? own : met;
       case PROVED, REFUTED, OPEN -> own;
     };

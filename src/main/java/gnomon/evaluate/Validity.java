@@ -21,8 +21,9 @@ final class Validity {
   }
 
   static boolean concerns(Condition condition, Map<? extends Generator, Form> images) {
-    return condition.relation() == Condition.Relation.NOT_IN_RANGE
-        || images.keySet().stream().anyMatch(condition.subject()::dependsOn);
+    boolean always =
+        condition.relation() == Condition.Relation.NOT_IN_RANGE && condition.subject().isConstant();
+    return always || images.keySet().stream().anyMatch(condition.subject()::dependsOn);
   }
 
   private static boolean holds(Condition condition, Map<? extends Generator, Form> images) {

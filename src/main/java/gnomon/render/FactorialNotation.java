@@ -17,6 +17,8 @@ final class FactorialNotation {
   /// A coefficient and a product of kernels, with the same product as before.
   record Rewritten(Form coefficient, Monomial kernel) {}
 
+  private static final int MOST_ABSORBED = 20;
+
   private final Lexicon lexicon;
   private final KernelNotation kernels;
   private final Map<Form, Integer> exponents = new TreeMap<>();
@@ -44,6 +46,7 @@ final class FactorialNotation {
       search.binomials();
       search.powers();
     }
+    search.exponents.keySet().stream().toList().forEach(search::absorb);
     return new Rewritten(search.coefficient, search.kernel);
   }
 
@@ -121,6 +124,35 @@ final class FactorialNotation {
     Notation notation =
         new Notation.FactorialPower(kernels.inner(base), kernels.inner(index), falling);
     put((falling ? "falling(" : "rising(") + base.key() + "," + index.key() + ")", notation);
+  }
+
+  /// Writes (n + 1) n! as (n + 1)! and n!/n as (n − 1)!, for a factorial or its reciprocal.
+  private void absorb(Form argument) {
+    int exponent = exponents.get(argument);
+    if (Math.abs(exponent) != 1) {
+      return;
+    }
+    Form last = argument;
+    for (int steps = 0; steps < MOST_ABSORBED; steps++) {
+      Form next = last.plus(Form.ONE);
+      Form outer = exponent > 0 ? coefficient : coefficient.inverse();
+      if (isDivisible(outer.numerator(), next)) {
+        coefficient = exponent > 0 ? coefficient.dividedBy(next) : coefficient.times(next);
+        last = next;
+      } else if (isDivisible(outer.denominator(), last)) {
+        coefficient = exponent > 0 ? coefficient.times(last) : coefficient.dividedBy(last);
+        last = last.minus(Form.ONE);
+      } else {
+        break;
+      }
+    }
+    if (!last.equals(argument)) {
+      take(argument, exponent);
+      Notation factorial = new Notation.Factorial(kernels.inner(last));
+      Form standIn = lexicon.standIn("(" + last.key() + ")!", factorial, Lexicon.Role.KERNEL);
+      kernel =
+          kernel.times(Monomial.of(standIn.asGenerator().orElseThrow(), Rational.of(exponent)));
+    }
   }
 
   private static boolean isDivisible(gnomon.polynomial.Polynomial polynomial, Form by) {

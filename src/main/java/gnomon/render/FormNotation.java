@@ -103,7 +103,8 @@ public final class FormNotation {
   }
 
   private Form rewritten(Form form) {
-    return RealForm.of(lexicon.rewritten(form), lexicon, this);
+    Form moved = HarmonicNotation.moved(lexicon.rewritten(form), lexicon, kernels);
+    return RealForm.of(moved, lexicon, this);
   }
 
   private Notation sum(Form form, boolean compact) {

@@ -37,6 +37,12 @@ final class RefusalWords {
                   "The form is {1}.",
                   "(x^2 - 1)/(x - 1) at x = 1")),
           Map.entry(
+              "INFINITE_SUM_UNDECIDED",
+              domain(
+                  "no method at hand finds the value of this infinite sum",
+                  "The summand is {1}.",
+                  "Sigma(k: 0..inf) 1/2^k")),
+          Map.entry(
               "NOT_AN_INTEGER", domain("a whole number is needed", "It is {1}.", "binom(5, 2)")),
           Map.entry(
               "NOT_NATURAL",

@@ -58,6 +58,7 @@ public final class DefiniteProducts {
     return closed(factor, k, a, b, conditions)
         .map(form -> form.takingIntegers(DefiniteSums.integersIn(span)))
         .map(form -> DefiniteSum.closed(form, conditions))
+        .map(found -> found.under(GenericPoles.outside(factor, k, DefiniteSums.variables(a, b))))
         .orElseGet(() -> DefiniteSum.standing(standing));
   }
 
@@ -108,7 +109,10 @@ public final class DefiniteProducts {
       if (multiplicity < 0) {
         throw new Refusal(Reason.POLE_IN_RANGE, offset.negated(), startsAtOrBelowZero ? a : b);
       }
-      return Optional.empty();
+      // the factor vanishes at a point of every range that reaches it
+      conditions.add(
+          new Condition(startsAtOrBelowZero ? last : first.negated(), Condition.Relation.NATURAL));
+      return Optional.of(Form.ZERO);
     }
     return last.asInteger().isPresent()
         ? Optional.of(power.times(Combinatorial.falling(last, count)))

@@ -1,6 +1,7 @@
 package gnomon.summation;
 
 import gnomon.form.Form;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 
@@ -37,6 +38,13 @@ public record DefiniteSum(
 
   public DefiniteSum {
     conditions = List.copyOf(conditions);
+  }
+
+  /// The same under further conditions.
+  DefiniteSum under(List<Condition> further) {
+    List<Condition> all = new ArrayList<>(conditions);
+    all.addAll(further);
+    return new DefiniteSum(value, status, all, antidifference, absentWithin, recurrence);
   }
 
   static DefiniteSum termByTerm(Form value) {

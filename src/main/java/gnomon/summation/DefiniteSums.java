@@ -8,6 +8,7 @@ import gnomon.form.Variable;
 import gnomon.number.Rational;
 import java.math.BigInteger;
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
@@ -35,6 +36,19 @@ public final class DefiniteSums {
   ///   with [Reason#NOT_AN_INTEGER] when numeric ends do not differ by an integer
   public DefiniteSum sum(Form f, Variable k, Form a, Form b) {
     Form summand = f.takingIntegers(Set.of(k));
+    DefiniteSum sum = found(summand, k, a, b);
+    return sum.status() == DefiniteSum.Status.CLOSED_FORM
+        ? sum.under(GenericPoles.outside(summand, k, variables(a, b)))
+        : sum;
+  }
+
+  static Set<Variable> variables(Form a, Form b) {
+    Set<Variable> ends = new HashSet<>(a.variables());
+    ends.addAll(b.variables());
+    return ends;
+  }
+
+  private DefiniteSum found(Form summand, Variable k, Form a, Form b) {
     Form span = b.minus(a);
     Optional<Rational> length = span.asRational();
     if (length.isPresent()) {
@@ -43,7 +57,7 @@ public final class DefiniteSums {
     if (span.variables().stream().anyMatch(summand::dependsOn)) {
       Form reversed = summand.substitute(k, a.plus(b).minus(Form.of(k)));
       boolean free = span.variables().stream().noneMatch(reversed::dependsOn);
-      return free ? sum(reversed, k, a, b) : new EntangledSums(engine).sum(summand, k, a, b);
+      return free ? found(reversed, k, a, b) : new EntangledSums(engine).sum(summand, k, a, b);
     }
     if (a.asRational().isPresent()) {
       Form fromZero = summand.substitute(k, Form.of(k).plus(a));

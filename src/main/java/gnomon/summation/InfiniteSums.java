@@ -27,8 +27,8 @@ public final class InfiniteSums {
 
   /// Σ(k: a..∞) f(k).
   ///
-  /// @throws Refusal with [Reason#DIVERGENT], [Reason#POLE_IN_RANGE], or [Reason#LIMIT_UNDECIDED]
-  ///   when the limit is outside the reach of this class
+  /// @throws Refusal with [Reason#DIVERGENT], [Reason#POLE_IN_RANGE], or
+  ///   [Reason#INFINITE_SUM_UNDECIDED] when the limit is outside the reach of this class
   public DefiniteSum sum(Form f, Variable k, Form a) {
     if (f.isZero()) {
       return DefiniteSum.termByTerm(Form.ZERO);
@@ -51,7 +51,7 @@ public final class InfiniteSums {
       Form value = limit.minus(found.value().substitute(k, Form.ZERO));
       return DefiniteSum.closed(value, found.conditions(), found.value());
     }
-    throw new Refusal(Reason.LIMIT_UNDECIDED, f);
+    throw new Refusal(Reason.INFINITE_SUM_UNDECIDED, f);
   }
 
   /// The degree of the numerator less that of the denominator.
@@ -70,13 +70,13 @@ public final class InfiniteSums {
   private static void requireDecay(Form shifted, Form f, Variable k) {
     var parts = Structure.exponentialParts(shifted, k);
     if (parts.isEmpty()) {
-      throw new Refusal(Reason.LIMIT_UNDECIDED, f);
+      throw new Refusal(Reason.INFINITE_SUM_UNDECIDED, f);
     }
     for (var part : parts.get()) {
       Form factor = part.kernel().substitute(k, Form.of(k).plus(Form.ONE)).dividedBy(part.kernel());
       Optional<Rational> base = factor.asRational();
       if (base.isEmpty()) {
-        throw new Refusal(Reason.LIMIT_UNDECIDED, f);
+        throw new Refusal(Reason.INFINITE_SUM_UNDECIDED, f);
       }
       if (base.get().abs().compareTo(Rational.ONE) >= 0) {
         throw new Refusal(Reason.DIVERGENT, f);

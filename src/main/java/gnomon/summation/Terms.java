@@ -1,6 +1,8 @@
 package gnomon.summation;
 
 import gnomon.algebra.Budget;
+import gnomon.algebra.Reason;
+import gnomon.algebra.Refusal;
 import gnomon.form.Form;
 import gnomon.form.Variable;
 import java.util.function.BinaryOperator;
@@ -31,11 +33,22 @@ final class Terms {
     return range(f, k, a, 0, count, both);
   }
 
+  private static Form term(Form f, Variable k, Form a, long distance) {
+    try {
+      return f.substitute(k, a.plus(Form.of(distance)));
+    } catch (Refusal refused) {
+      if (refused.reason() == Reason.POLE) {
+        throw new Refusal(Reason.POLE_IN_RANGE, distance, a);
+      }
+      throw refused;
+    }
+  }
+
   private static Form range(
       Form f, Variable k, Form a, long from, long to, BinaryOperator<Form> both) {
     Budget.checkpoint();
     if (to - from == 1) {
-      return f.substitute(k, a.plus(Form.of(from)));
+      return term(f, k, a, from);
     }
     long middle = (from + to) >>> 1;
     return both.apply(range(f, k, a, from, middle, both), range(f, k, a, middle, to, both));

@@ -29,11 +29,23 @@ public record FormValue(Form form, Shape shape, boolean function) implements Val
     return function ? Sort.FUNCTION : Sort.SCALAR;
   }
 
-  /// `left as a sum` where the form contains a sum, product or integral as it stands.
+  /// `left as a sum`, a product or an integral where the form contains one as it stands.
   @Override
   public Status status() {
-    boolean standing = form.generators().stream().anyMatch(g -> g instanceof Accumulation);
-    return standing ? Status.of(Status.Kind.LEFT_AS_SUM) : Status.NONE;
+    return form.generators().stream()
+        .filter(Accumulation.class::isInstance)
+        .map(Accumulation.class::cast)
+        .map(standing -> Status.of(kind(standing.kind())))
+        .findFirst()
+        .orElse(Status.NONE);
+  }
+
+  private static Status.Kind kind(Accumulation.Kind kind) {
+    return switch (kind) {
+      case SUM -> Status.Kind.LEFT_AS_SUM;
+      case PRODUCT -> Status.Kind.LEFT_AS_PRODUCT;
+      case INTEGRAL -> Status.Kind.LEFT_AS_INTEGRAL;
+    };
   }
 
   @Override

@@ -11,6 +11,8 @@ public record Status(Kind kind, String detail) {
     RECURRENCE("recurrence"),
     NO_CLOSED_FORM("no closed form"),
     LEFT_AS_SUM("left as a sum"),
+    LEFT_AS_PRODUCT("left as a product"),
+    LEFT_AS_INTEGRAL("left as an integral"),
     PROVED("proved"),
     REFUTED("refuted"),
     OPEN("open");
@@ -38,6 +40,14 @@ public record Status(Kind kind, String detail) {
   /// The same kind with the detail.
   public Status withDetail(String words) {
     return new Status(kind, words);
+  }
+
+  /// Whether a sum, a product or an integral was left as it stands.
+  public boolean isLeft() {
+    return switch (kind) {
+      case LEFT_AS_SUM, LEFT_AS_PRODUCT, LEFT_AS_INTEGRAL -> true;
+      case NONE, CLOSED_FORM, RECURRENCE, NO_CLOSED_FORM, PROVED, REFUTED, OPEN -> false;
+    };
   }
 
   /// The word without the detail.

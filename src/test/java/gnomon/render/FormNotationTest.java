@@ -104,7 +104,9 @@ class FormNotationTest {
     assertEquals(
         "(x^2 + 1) 2^x + x",
         shown(Elementary.power(Form.TWO, x).times(x.power(2).plus(one)).plus(x)));
-    assertEquals("H(x) + 1/(x + 1)", shown(Combinatorial.harmonic(x.plus(one))));
+    assertEquals("H(x + 1)", shown(Combinatorial.harmonic(x.plus(one))));
+    assertEquals("H(x - 4)", shown(Combinatorial.harmonic(x.minus(Form.of(4)))));
+    assertEquals("H(x) + 1/x", shown(Combinatorial.harmonic(x).plus(x.inverse())));
     assertEquals("x H(x, 2)", shown(Combinatorial.harmonic(x, 2).times(x)));
     assertEquals(
         "f'(x) + f(x + 1) - 2 f(x) + f(x - 1)",
@@ -114,6 +116,15 @@ class FormNotationTest {
                 .plus(f(0, x.minus(one)))
                 .plus(f(1, x))));
     assertEquals("1/(2^x + 1)", shown(Elementary.power(Form.TWO, x).plus(one).inverse()));
+  }
+
+  @Test
+  void factorsBesideAFactorialAreTakenIn() {
+    Form factorial = Combinatorial.factorial(n);
+    assertEquals("(n + 1)!", shown(factorial.times(n.plus(Form.ONE))));
+    assertEquals("(n - 1)!", shown(factorial.dividedBy(n)));
+    assertEquals("1/(n + 1)!", shown(factorial.times(n.plus(Form.ONE)).inverse()));
+    assertEquals("(n + 3) n!", shown(factorial.times(n.plus(Form.of(3)))));
   }
 
   @Test
