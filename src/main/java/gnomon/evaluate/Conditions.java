@@ -27,7 +27,7 @@ final class Conditions {
     List<String> outside = new ArrayList<>();
     for (Condition condition : conditions) {
       switch (condition.relation()) {
-        case NOT_ZERO, INTEGER, NATURAL -> said.add(words(condition));
+        case NOT_ZERO, INTEGER, NATURAL, POSITIVE, INSIDE_UNIT -> said.add(words(condition));
         case NOT_IN_RANGE -> outside.add(text(condition.subject()));
         case RANGE_LENGTH -> {}
       }
@@ -44,6 +44,8 @@ final class Conditions {
       case NOT_ZERO -> compared(condition.subject(), " != ");
       case INTEGER -> "integer " + subject;
       case NATURAL, RANGE_LENGTH -> compared(condition.subject(), " >= ");
+      case POSITIVE -> compared(condition.subject(), " > ");
+      case INSIDE_UNIT -> "|" + subject + "| < 1";
       case NOT_IN_RANGE -> subject + " outside the range";
     };
   }

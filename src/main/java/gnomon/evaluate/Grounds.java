@@ -58,6 +58,13 @@ final class Grounds {
     }
   }
 
+  /// A theorem that is cited, not derived here.
+  void cited(String theorem, String source) {
+    if (wanted) {
+      steps.add(new Step("by a theorem: " + theorem, List.of(), false, source));
+    }
+  }
+
   /// Two forms that were both computed and found equal.
   void equal(String rule, Form left, Form right, Variable running) {
     if (wanted && left.equals(right)) {

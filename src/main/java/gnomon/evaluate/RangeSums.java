@@ -119,6 +119,7 @@ final class RangeSums {
     evaluation.require(sum.conditions());
     notEmpty(limits).ifPresent(taken -> evaluation.require(List.of(taken)));
     sum.antidifference().ifPresent(found -> record(found, body, sum.value(), limits));
+    sum.theorems().forEach(theorem -> Theorems.cite(theorem, evaluation.grounds()));
     sum.recurrence().ifPresent(found -> new RecurrenceSteps(evaluation, k).record(found));
     return Sorts.of(sum.value(), scope);
   }

@@ -3,6 +3,7 @@ package gnomon.evaluate;
 import gnomon.algebra.Refusal;
 import gnomon.form.Form;
 import gnomon.form.Generator;
+import gnomon.number.Rational;
 import gnomon.summation.Condition;
 import java.util.List;
 import java.util.Map;
@@ -39,6 +40,10 @@ final class Validity {
           case INTEGER -> form -> form.asInteger().isPresent();
           case NATURAL, RANGE_LENGTH ->
               form -> form.asInteger().filter(n -> n.signum() >= 0).isPresent();
+          case POSITIVE -> form -> form.asRational().filter(v -> v.sign() > 0).isPresent();
+          case INSIDE_UNIT ->
+              form ->
+                  form.asRational().filter(v -> v.abs().compareTo(Rational.ONE) < 0).isPresent();
           case NOT_IN_RANGE -> _ -> false;
         };
     return Optional.of(value).filter(test).isPresent();

@@ -16,6 +16,10 @@ public record Condition(Form subject, Relation relation) {
     INTEGER,
     /// The subject is an integer and at least zero.
     NATURAL,
+    /// The subject is greater than zero.
+    POSITIVE,
+    /// The modulus of the subject is less than one.
+    INSIDE_UNIT,
     /// The subject, a pole, is none of the points summed over.
     NOT_IN_RANGE,
     /// The subject is the number of terms of a sum, an integer and at least zero; that is taken for

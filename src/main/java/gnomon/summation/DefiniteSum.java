@@ -4,6 +4,7 @@ import gnomon.form.Form;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 
 /// A definite sum or product and what is known about it.
 ///
@@ -13,6 +14,7 @@ import java.util.Optional;
 /// @param antidifference the verified antidifference in the variable of summation behind a closed
 ///   form, where one was used
 /// @param absentWithin the class in which a closed form is proved not to exist, where it is
+/// @param theorems the theorems behind the value of an infinite sum
 /// @param recurrence a recurrence of the sum in a variable of its ends, where one was found
 public record DefiniteSum(
     Form value,
@@ -20,6 +22,7 @@ public record DefiniteSum(
     List<Condition> conditions,
     Optional<Form> antidifference,
     Optional<FunctionClass> absentWithin,
+    Set<Theorem> theorems,
     Optional<SumRecurrence> recurrence) {
 
   /// How the value is known.
@@ -38,13 +41,14 @@ public record DefiniteSum(
 
   public DefiniteSum {
     conditions = List.copyOf(conditions);
+    theorems = Set.copyOf(theorems);
   }
 
   /// The same under further conditions.
   DefiniteSum under(List<Condition> further) {
     List<Condition> all = new ArrayList<>(conditions);
     all.addAll(further);
-    return new DefiniteSum(value, status, all, antidifference, absentWithin, recurrence);
+    return new DefiniteSum(value, status, all, antidifference, absentWithin, theorems, recurrence);
   }
 
   static DefiniteSum termByTerm(Form value) {
@@ -54,6 +58,7 @@ public record DefiniteSum(
         List.of(),
         Optional.empty(),
         Optional.empty(),
+        Set.of(),
         Optional.empty());
   }
 
@@ -64,6 +69,7 @@ public record DefiniteSum(
         conditions,
         Optional.of(antidifference),
         Optional.empty(),
+        Set.of(),
         Optional.empty());
   }
 
@@ -74,6 +80,18 @@ public record DefiniteSum(
         conditions,
         Optional.empty(),
         Optional.empty(),
+        Set.of(),
+        Optional.empty());
+  }
+
+  static DefiniteSum known(Form value, List<Condition> conditions, Set<Theorem> theorems) {
+    return new DefiniteSum(
+        value,
+        Status.CLOSED_FORM,
+        conditions,
+        Optional.empty(),
+        Optional.empty(),
+        theorems,
         Optional.empty());
   }
 
@@ -84,6 +102,7 @@ public record DefiniteSum(
         List.of(),
         Optional.empty(),
         Optional.empty(),
+        Set.of(),
         Optional.empty());
   }
 
@@ -94,6 +113,7 @@ public record DefiniteSum(
         List.of(),
         Optional.empty(),
         Optional.of(within),
+        Set.of(),
         Optional.empty());
   }
 
@@ -104,6 +124,7 @@ public record DefiniteSum(
         List.of(),
         Optional.empty(),
         Optional.empty(),
+        Set.of(),
         Optional.of(recurrence));
   }
 
@@ -114,6 +135,7 @@ public record DefiniteSum(
         conditions,
         Optional.empty(),
         Optional.empty(),
+        Set.of(),
         Optional.of(recurrence));
   }
 }
