@@ -1,6 +1,7 @@
 // The language of gnomon. LANGUAGE.md beside this file gives the meaning.
 //
-// Every decision needs one token of lookahead, save the comma inside a parenthesis after `at`.
+// Every decision needs one token of lookahead, save the comma inside a parenthesis after `at` or
+// `with`.
 // Whitespace matters in three places; the token stream marks them before the parser sees them:
 //   STEP    is a "[" written directly against a name, with one entry (`Delta[h]`);
 //   BINDER  is Σ, ∫ or ∏ before "(name:";
@@ -28,8 +29,10 @@ file      : ( KEEP | REPLAY | RECHECK | RERECORD ) STRING ;
 help      : HELP ( ~EOF )* ;
 leave     : LEAVE ;
 
-value        : ( matrix | sum ) clause* ;
+value        : ( matrix | solve | sum ) clause* ;
 matrix       : MATRIX sum TO sum ;
+solve        : SOLVE equation ( WITH equation ( COMMA equation )* )? ;
+equation     : sum EQUALS sum ;
 clause
     : IN ( PARTIAL FRACTIONS | PRESENTATION | sum )    # in
     | TO sum DIGITS?                                   # to
@@ -68,6 +71,8 @@ RERECORD : 'rerecord' ;
 HELP : 'help' ;
 LEAVE : 'leave' ;
 MATRIX : 'matrix' ;
+SOLVE : 'solve' ;
+WITH : 'with' ;
 IN : 'in' ;
 TO : 'to' ;
 AT : 'at' ;

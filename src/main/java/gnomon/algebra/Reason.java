@@ -9,6 +9,9 @@ public enum Reason {
   ANTIDIFFERENCE_NOT_FOUND,
   /// An arc sine of a number beyond 1 in size. Data: the argument.
   ARCSINE_DOMAIN,
+  /// Conditions that contradict the equation or one another. Data: none, or the argument at which
+  /// the equation itself forbids them.
+  CONDITIONS_CONTRADICT,
   /// A kernel whose derivative is no form. Data: the kernel, the variable.
   DERIVATIVE_UNKNOWN,
   /// Decimal digits that more precision did not settle. Data: the form, the digits tried.
@@ -17,6 +20,15 @@ public enum Reason {
   DIVERGENT,
   /// A quotient by zero, or a negative power of zero. Data: the dividend where there is one.
   DIVISION_BY_ZERO,
+  /// Arguments of the unknown function that are not one variable plus numbers that differ by
+  /// integers. Data: two of the arguments.
+  EQUATION_ARGUMENTS,
+  /// An equation with both shifts and derivatives. Data: the equation as a form that is to vanish.
+  EQUATION_MIXED,
+  /// An equation that is not linear in the unknown function. Data: the form that is to vanish.
+  EQUATION_NOT_LINEAR,
+  /// An equation in which the unknown function does not occur. Data: its name.
+  EQUATION_WITHOUT_UNKNOWN,
   /// An exponent beyond the range that monomials hold. Data: none.
   EXPONENT_TOO_LARGE,
   /// An integer whose prime factors were not all found within the limit. Data: the unfactored part.
@@ -61,6 +73,8 @@ public enum Reason {
   NO_DIGITS,
   /// An operator without inverse, or without a known one. Data: the symbol.
   NO_INVERSE,
+  /// An equation without a solution in a class of functions, which is proved. Data: the class.
+  NO_SOLUTION,
   /// No power series at 0, or none that is known. Data: the form or the function concerned.
   NO_SERIES,
   /// An integer does not fit into the range a count or an index may have. Data: the value met.
@@ -74,6 +88,8 @@ public enum Reason {
   ROOT_OUT_OF_FIELD,
   /// A shift whose length depends on the variable shifted. Data: the length, the variable.
   SHIFT_BY_VARIABLE,
+  /// An equation of which no solution was found, though there may be one. Data: the class searched.
+  SOLUTION_NOT_FOUND,
   /// A symbol with a pole at the rate of an exponential. Data: the symbol, the rate.
   SYMBOL_POLE,
   /// Text is not a number. Data: the text.

@@ -21,6 +21,7 @@ final class Evaluation {
   private final Writing writing;
   private final Grounds grounds;
   private final List<Condition> conditions = new ArrayList<>();
+  private final List<String> remarks = new ArrayList<>();
   private Status status = Status.NONE;
   private OptionalInt truncation = OptionalInt.empty();
   private Assumptions implied = Assumptions.NONE;
@@ -101,6 +102,16 @@ final class Evaluation {
   /// The status of one more sum: of several sums the least that is known.
   void met(Status other) {
     status = other.kind().compareTo(status.kind()) >= 0 ? other : status;
+  }
+
+  /// Notes what the status line has to say besides the side conditions.
+  void remark(String words) {
+    remarks.add(words);
+  }
+
+  /// What the status line has to say besides the side conditions.
+  List<String> remarks() {
+    return List.copyOf(remarks);
   }
 
   /// The side conditions of the closed forms met so far.

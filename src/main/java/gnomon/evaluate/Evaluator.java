@@ -65,6 +65,7 @@ final class Evaluator {
       case Expression.Matrix matrix ->
           matrices.matrix(
               value(matrix.operator(), scope), whole(matrix.order(), scope), matrix.span(), scope);
+      case Expression.Solve solve -> new Solving(this, evaluation).value(solve, scope);
       case Expression.Clauses clausal -> clauses.value(clausal, scope);
     };
   }

@@ -84,7 +84,10 @@ public final class Interpreter {
     Status status = status(value, evaluation.status());
     if (status.kind() == Status.Kind.CLOSED_FORM) {
       Conditions conditions = new Conditions(evaluation.writing(), running);
-      status = status.withDetail(conditions.words(evaluation.conditions()));
+      String words = conditions.words(evaluation.conditions());
+      List<String> remarks = evaluation.remarks();
+      String more = remarks.isEmpty() ? "" : "(" + String.join("; ", remarks) + ")";
+      status = status.withDetail((words + " " + more).strip());
     }
     return new Answer(value, status, Derivation.NONE, evaluation.conditions());
   }

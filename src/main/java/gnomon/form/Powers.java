@@ -208,12 +208,21 @@ final class Powers {
     return kernel(Base.NATURAL, exponent);
   }
 
+  /// e to an imaginary exponent; the angle arctan u, whole times, is on the ray of 1 + iu.
   private static Form imaginary(Scaled exponent, Monomial monomial) {
     for (Monomial.Power power : monomial.factors()) {
       if (power.indeterminate() instanceof AngleConstant angle && power.exponent().isOne()) {
         Form rest = exponent.unit().dividedBy(Form.I.times(Form.of(angle)));
         Base ray = new Base.GaussianAngle(angle.re(), angle.im());
         return raise(ray, rest.times(exponent.factor()));
+      }
+      if (power.indeterminate() instanceof Arc(Arc.Kind kind, Form tangent)
+          && kind == Arc.Kind.ARCTAN
+          && exponent.factor().isInteger()
+          && exponent.unit().equals(Form.I.times(Form.of((Generator) power.indeterminate())))) {
+        Form point = Form.ONE.plus(Form.I.times(tangent));
+        Form length = Elementary.sqrt(Form.ONE.plus(tangent.times(tangent)));
+        return power(point.dividedBy(length), Form.of(exponent.factor()));
       }
     }
     return kernel(Base.NATURAL, exponent);

@@ -1,6 +1,8 @@
 package gnomon.render;
 
 import java.util.Map;
+import java.util.Objects;
+import java.util.stream.Stream;
 
 /// The catalogue of words for the reasons of refusals, by the name of the reason.
 final class RefusalWords {
@@ -193,12 +195,60 @@ final class RefusalWords {
               "NO_CLOSED_FORM",
               domain("there is no closed form here", "It is asked of {1}.", "exp(x) to 6")));
 
+  private static final Map<String, Words> EQUATIONS =
+      Map.ofEntries(
+          Map.entry(
+              "CONDITIONS_CONTRADICT",
+              domain(
+                  "no solution meets all the conditions",
+                  "The equation itself forbids them where the argument is {1}.",
+                  "solve E f = 2 f with f(0) = 1")),
+          Map.entry(
+              "EQUATION_ARGUMENTS",
+              domain(
+                  "the arguments of the unknown must be a variable plus numbers",
+                  "They are {1} and {2}.",
+                  "solve f(n + 2) = f(n + 1) + f(n)")),
+          Map.entry(
+              "EQUATION_MIXED",
+              domain(
+                  "equations with both shifts and derivatives are not solved",
+                  "What is to vanish is {1}.",
+                  "solve D^2 f + f = 0")),
+          Map.entry(
+              "EQUATION_NOT_LINEAR",
+              domain(
+                  "only equations linear in the unknown function are solved",
+                  "What is to vanish is {1}.",
+                  "solve E f = 2 f + 1")),
+          Map.entry(
+              "EQUATION_WITHOUT_UNKNOWN",
+              domain(
+                  "the unknown function does not occur in the equation",
+                  "It is {1}.",
+                  "solve E f = 2 f + 1")),
+          Map.entry(
+              "NO_SOLUTION",
+              domain(
+                  "it is proved that there is no solution of this kind",
+                  "The kind is {1}.",
+                  "solve E f = 2 f + 1")),
+          Map.entry(
+              "SOLUTION_NOT_FOUND",
+              domain(
+                  "no solution was found, though there may be one",
+                  "It was looked for among {1}.",
+                  "solve E f = 2 f + 1")));
+
   private RefusalWords() {}
 
   /// The words for the reason with this name.
   static Words of(String reason) {
-    Words words = ARITHMETIC.getOrDefault(reason, OPERATORS.get(reason));
-    return words == null ? CALCULUS.getOrDefault(reason, UNKNOWN) : words;
+    return Stream.of(ARITHMETIC, OPERATORS, CALCULUS, EQUATIONS)
+        .map(part -> part.get(reason))
+        .filter(Objects::nonNull)
+        .findFirst()
+        .orElse(UNKNOWN);
   }
 
   /// Whether the reason with this name has words of its own.

@@ -82,7 +82,7 @@ final class Explanation {
           Diagnostic.of("syntax-unexpected", "`=` cannot stand here", span);
       default ->
           Diagnostic.of("syntax-equation", "an equation is not an expression", span)
-              .withEvidence("An equation stands after claim, let, at or given.");
+              .withEvidence("An equation stands after claim, let, solve, with, at or given.");
     };
   }
 

@@ -6,9 +6,9 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalInt;
 
-/// An expression as it was written. From the outside in: [Clauses] and [Matrix] hold any expression
-/// below them, then [Sum], then [Sign], then [Term] and [Binder], then [Suffixed], then the atoms.
-/// Anything else stands inside a [Parenthesis] or [Bracket], which the tree keeps.
+/// An expression as it was written. From the outside in: [Clauses], [Matrix] and [Solve] hold any
+/// expression below them, then [Sum], then [Sign], then [Term] and [Binder], then [Suffixed], then
+/// the atoms. Anything else stands inside a [Parenthesis] or [Bracket], which the tree keeps.
 public sealed interface Expression {
   /// Where it was written.
   Span span();
@@ -147,6 +147,14 @@ public sealed interface Expression {
   /// `matrix A to N`.
   record Matrix(Expression operator, Expression order, Span span) implements Expression {}
 
+  /// `solve L f = g with f(0) = 1, f(1) = 1`.
+  record Solve(Equation equation, List<Equation> conditions, Span span) implements Expression {
+    /// Copies the conditions.
+    public Solve {
+      conditions = List.copyOf(conditions);
+    }
+  }
+
   /// An expression and the clauses that follow it, first to last.
   record Clauses(Expression subject, List<Clause> clauses, Span span) implements Expression {
     /// @throws IllegalArgumentException if there is no clause, or the subject has clauses itself
@@ -155,6 +163,14 @@ public sealed interface Expression {
       if (clauses.isEmpty() || subject instanceof Clauses) {
         throw new IllegalArgumentException("clauses " + clauses + " after " + subject);
       }
+    }
+  }
+
+  /// `left = right`, to be solved or to be met by the solution.
+  record Equation(Expression left, Expression right) {
+    /// Where it was written.
+    public Span span() {
+      return left.span().to(right.span());
     }
   }
 

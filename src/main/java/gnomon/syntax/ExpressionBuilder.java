@@ -3,12 +3,14 @@ package gnomon.syntax;
 import gnomon.diagnostic.Span;
 import gnomon.syntax.Expression.Bracket;
 import gnomon.syntax.Expression.Clauses;
+import gnomon.syntax.Expression.Equation;
 import gnomon.syntax.Expression.Handle;
 import gnomon.syntax.Expression.Matrix;
 import gnomon.syntax.Expression.Name;
 import gnomon.syntax.Expression.Numeral;
 import gnomon.syntax.Expression.Parenthesis;
 import gnomon.syntax.Expression.Sign;
+import gnomon.syntax.Expression.Solve;
 import gnomon.syntax.Expression.Suffixed;
 import gnomon.syntax.Expression.Sum;
 import gnomon.syntax.Expression.Summand;
@@ -38,7 +40,7 @@ final class ExpressionBuilder {
   }
 
   Expression value(GnomonParser.ValueContext context) {
-    Expression subject = context.sum() != null ? sum(context.sum()) : matrix(context.matrix());
+    Expression subject = subject(context);
     if (context.clause().isEmpty()) {
       return subject;
     }
@@ -47,6 +49,21 @@ final class ExpressionBuilder {
       clauses.add(clause(clause));
     }
     return new Clauses(subject, clauses, span(context));
+  }
+
+  private Expression subject(GnomonParser.ValueContext context) {
+    if (context.sum() != null) {
+      return sum(context.sum());
+    }
+    return context.matrix() != null ? matrix(context.matrix()) : solve(context.solve());
+  }
+
+  private Solve solve(GnomonParser.SolveContext context) {
+    List<Equation> equations = new ArrayList<>();
+    for (GnomonParser.EquationContext equation : context.equation()) {
+      equations.add(new Equation(sum(equation.sum(0)), sum(equation.sum(1))));
+    }
+    return new Solve(equations.getFirst(), equations.subList(1, equations.size()), span(context));
   }
 
   private Matrix matrix(GnomonParser.MatrixContext context) {

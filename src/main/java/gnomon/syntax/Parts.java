@@ -10,6 +10,7 @@ import gnomon.syntax.Expression.Numeral;
 import gnomon.syntax.Expression.OrderTerm;
 import gnomon.syntax.Expression.Parenthesis;
 import gnomon.syntax.Expression.Sign;
+import gnomon.syntax.Expression.Solve;
 import gnomon.syntax.Expression.Suffixed;
 import gnomon.syntax.Expression.Sum;
 import gnomon.syntax.Expression.Term;
@@ -38,6 +39,10 @@ public final class Parts {
       case Sum(var summands, _) -> summands.stream().map(Expression.Summand::value).toList();
       case Binder(_, var range, var body, _) -> List.of(range.lower(), range.upper(), body);
       case Matrix(var operator, var order, _) -> List.of(operator, order);
+      case Solve(var equation, var conditions, _) ->
+          Stream.concat(Stream.of(equation), conditions.stream())
+              .flatMap(each -> Stream.of(each.left(), each.right()))
+              .toList();
       case Clauses(var subject, var clauses, _) ->
           Stream.concat(Stream.of(subject), clauses.stream().flatMap(Parts::ofClause)).toList();
     };

@@ -4,6 +4,7 @@ import gnomon.syntax.Expression.Binder;
 import gnomon.syntax.Expression.Binding;
 import gnomon.syntax.Expression.Bracket;
 import gnomon.syntax.Expression.Clauses;
+import gnomon.syntax.Expression.Equation;
 import gnomon.syntax.Expression.Handle;
 import gnomon.syntax.Expression.Matrix;
 import gnomon.syntax.Expression.Name;
@@ -11,6 +12,7 @@ import gnomon.syntax.Expression.Numeral;
 import gnomon.syntax.Expression.OrderTerm;
 import gnomon.syntax.Expression.Parenthesis;
 import gnomon.syntax.Expression.Sign;
+import gnomon.syntax.Expression.Solve;
 import gnomon.syntax.Expression.Suffixed;
 import gnomon.syntax.Expression.Sum;
 import gnomon.syntax.Expression.Summand;
@@ -64,6 +66,14 @@ final class TreeText {
           word(wordOf(binding)).add("(").range(range).add(") ").add(body);
       case Matrix(var operator, var order, _) ->
           add("matrix ").add(operator).add(" to ").add(order);
+      case Solve(var equation, var conditions, _) -> {
+        add("solve ").equation(equation);
+        String before = " with ";
+        for (Equation condition : conditions) {
+          add(before).equation(condition);
+          before = ", ";
+        }
+      }
       case Clauses(var subject, var clauses, _) -> {
         add(subject);
         clauses.forEach(this::clause);
@@ -74,6 +84,10 @@ final class TreeText {
 
   TreeText range(Range range) {
     return word(range.variable().text()).add(": ").add(range.lower()).add("..").add(range.upper());
+  }
+
+  private TreeText equation(Equation equation) {
+    return add(equation.left()).add(" = ").add(equation.right());
   }
 
   private static String wordOf(Binding binding) {

@@ -74,7 +74,8 @@ final class WordTable {
           word("rerecord", STATEMENT, "writes the answers of a session file anew"),
           word("help", STATEMENT, "shows the page of a word"),
           word("leave", STATEMENT, "ends the session"),
-          word("matrix", STATEMENT, "matrix A to N is the matrix of A on x^0 to x^N"));
+          word("matrix", STATEMENT, "matrix A to N is the matrix of A on x^0 to x^N"),
+          word("solve", STATEMENT, "solves a linear difference or differential equation"));
 
   static final List<Word> CLAUSES =
       List.of(
@@ -89,6 +90,7 @@ final class WordTable {
           word("fractions", CLAUSE, "in partial fractions"),
           word("expanded", CLAUSE, "in expanded form, multiplied out"),
           word("tex", CLAUSE, "in tex, as a formula to set in print"),
+          word("with", CLAUSE, "the values that the solution of an equation takes"),
           word("integer", CLAUSE, "given n integer assumes that n is one"));
 
   static final List<Word> SIGNS =
@@ -106,7 +108,7 @@ final class WordTable {
           word("[", SIGN, "[A, B] is a list, or the commutator of two operators; Delta[h] a step"),
           word("@", SIGN, "the latest result; @7 is result 7"),
           word("..", SIGN, "from one limit to the other"),
-          word("=", SIGN, "equation, after claim, let, at and given"),
+          word("=", SIGN, "equation, after claim, let, solve, with, at and given"),
           word("!=", "≠", SIGN, "not equal, after given"),
           word("<", SIGN, "less, after given"),
           word("<=", "≤", SIGN, "at most, after given"),

@@ -42,7 +42,7 @@ final class RoomsTest {
       below.add(room);
     }
     arrows.put("decimal", Set.copyOf(below));
-    for (String room : List.of("series", "operator", "basis", "summation")) {
+    for (String room : List.of("series", "operator", "basis", "recurrence", "summation")) {
       arrows.put(room, Set.copyOf(below));
       below.add(room);
     }

@@ -33,6 +33,8 @@ final class FuzzTest {
           "help",
           "leave",
           "matrix",
+          "solve",
+          "with",
           "in",
           "to",
           "at",

@@ -66,12 +66,21 @@ final class Outline {
           "{" + binding + " over " + of(range) + " of " + of(body) + "}";
       case Expression.Matrix(var operator, var order, _) ->
           "{matrix " + of(operator) + " to " + of(order) + "}";
+      case Expression.Solve(var equation, var conditions, _) ->
+          "{solve "
+              + of(equation)
+              + conditions.stream().map(c -> "; " + of(c)).collect(Collectors.joining())
+              + "}";
       case Expression.Clauses(var subject, var clauses, _) ->
           "{"
               + of(subject)
               + clauses.stream().map(c -> "; " + of(c)).collect(Collectors.joining())
               + "}";
     };
+  }
+
+  private static String of(Expression.Equation equation) {
+    return of(equation.left()) + " = " + of(equation.right());
   }
 
   private static String of(Factor factor) {

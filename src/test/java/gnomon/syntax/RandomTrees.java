@@ -42,12 +42,24 @@ final class RandomTrees {
 
   private Expression value(int depth) {
     Expression subject =
-        random.nextInt(8) == 0
-            ? new Expression.Matrix(sum(depth - 1), sum(0), Span.NONE)
-            : sum(depth);
+        switch (random.nextInt(12)) {
+          case 0 -> new Expression.Matrix(sum(depth - 1), sum(0), Span.NONE);
+          case 1 ->
+              new Expression.Solve(
+                  equation(depth - 1), maybe(() -> equation(depth - 2)), Span.NONE);
+          default -> sum(depth);
+        };
     return random.nextInt(3) > 0
         ? subject
         : new Expression.Clauses(subject, some(3, () -> clause(depth - 1)), Span.NONE);
+  }
+
+  private Expression.Equation equation(int depth) {
+    return new Expression.Equation(sum(depth), sum(depth));
+  }
+
+  private <T> List<T> maybe(Supplier<T> item) {
+    return random.nextBoolean() ? List.of() : some(2, item);
   }
 
   private Expression sum(int depth) {

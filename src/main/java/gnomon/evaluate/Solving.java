@@ -1,0 +1,235 @@
+package gnomon.evaluate;
+
+import gnomon.algebra.Reason;
+import gnomon.algebra.Refusal;
+import gnomon.form.Form;
+import gnomon.form.Unknown;
+import gnomon.form.Variable;
+import gnomon.recurrence.ConstantsFromConditions;
+import gnomon.recurrence.DifferentialSolver;
+import gnomon.recurrence.LinearEquation;
+import gnomon.recurrence.RecurrenceSolver;
+import gnomon.recurrence.SolutionSpace;
+import gnomon.recurrence.UnknownFunction;
+import gnomon.summation.Condition;
+import gnomon.syntax.Expression;
+import gnomon.value.Status;
+import gnomon.value.Value;
+import java.math.BigInteger;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.SortedSet;
+import java.util.TreeSet;
+
+/// `solve L f = g with f(0) = 1`: reads the equation and the conditions with the unknown function
+/// free, has the equation solved, and puts what comes back into what was written.
+final class Solving {
+  private final Evaluator evaluator;
+  private final Evaluation evaluation;
+
+  Solving(Evaluator evaluator, Evaluation evaluation) {
+    this.evaluator = evaluator;
+    this.evaluation = evaluation;
+  }
+
+  Value value(Expression.Solve solve, Scope scope) {
+    String name = new UnknownName(scope).of(solve);
+    UnknownFunction unknown = new UnknownFunction(name);
+    Scope inside = scope.with(name, new Binding.Arbitrary(name));
+    Form equation = vanishing(solve.equation(), inside);
+    List<Form> conditions = new ArrayList<>();
+    for (Expression.Equation condition : solve.conditions()) {
+      conditions.add(vanishing(condition, inside));
+    }
+    Form solution =
+        Places.at(
+            solve.equation().span(),
+            () -> new Problem(unknown, equation, conditions, scope.running()).solution());
+    evaluation.status(Status.of(Status.Kind.CLOSED_FORM));
+    return Sorts.of(solution, scope);
+  }
+
+  /// The left side less the right side.
+  private Form vanishing(Expression.Equation equation, Scope scope) {
+    Value left = evaluator.value(equation.left(), scope);
+    Value right = evaluator.value(equation.right(), scope);
+    return Sorts.form(left, equation.left().span(), "the left side")
+        .minus(Sorts.form(right, equation.right().span(), "the right side"));
+  }
+
+  /// An equation and its conditions as forms that are to vanish.
+  private final class Problem {
+    private final UnknownFunction unknown;
+    private final Form equation;
+    private final List<Form> conditions;
+    private final Variable variable;
+    private final Variable running;
+
+    Problem(UnknownFunction unknown, Form equation, List<Form> conditions, Variable running) {
+      this.unknown = unknown;
+      this.equation = equation;
+      this.conditions = conditions;
+      this.running = running;
+      this.variable = unknown.variable(equation);
+    }
+
+    Form solution() {
+      LinearEquation linear = unknown.equation(equation, variable);
+      SolutionSpace space =
+          switch (linear.action()) {
+            case SHIFT -> new RecurrenceSolver(evaluation.sums(), start()).solve(linear);
+            case DERIVATIVE -> DifferentialSolver.solve(linear);
+          };
+      if (space.isEmpty()) {
+        throw absent(space);
+      }
+      List<Variable> constants = constants(space.basis().size());
+      Form general = space.combination(constants);
+      if (!unknown.replaced(equation, variable, general).isZero()) {
+        throw new Refusal(Reason.SOLUTION_NOT_FOUND, space.within().words());
+      }
+      evaluation.require(space.nonzero().stream().map(Solving::notZero).toList());
+      explain(space, general);
+      Form solution = met(space, general, constants);
+      evaluation
+          .grounds()
+          .equal(
+              "put into the equation, left side less right side",
+              unknown.replaced(equation, variable, solution),
+              Form.ZERO,
+              running);
+      remarks(space, solution);
+      return solution;
+    }
+
+    /// The least integer at which a condition is given.
+    private Optional<BigInteger> start() {
+      return conditions.stream()
+          .flatMap(condition -> unknown.occurrences(condition).stream())
+          .flatMap(occurrence -> occurrence.argument().asInteger().stream())
+          .min(BigInteger::compareTo);
+    }
+
+    private Form met(SolutionSpace space, Form general, List<Variable> constants) {
+      if (conditions.isEmpty()) {
+        return general;
+      }
+      List<Form> tied = conditions.stream().filter(c -> isTied(c, space)).toList();
+      List<Form> met = tied.stream().map(c -> unknown.replaced(c, variable, general)).toList();
+      Optional<List<Form>> values = ConstantsFromConditions.of(met, constants);
+      if (values.isEmpty()) {
+        throw space.isGeneral() ? new Refusal(Reason.CONDITIONS_CONTRADICT) : absent(space);
+      }
+      Form solution = general;
+      for (int i = 0; i < constants.size(); i++) {
+        evaluation
+            .grounds()
+            .found(
+                "the conditions give",
+                Form.of(constants.get(i)),
+                values.get().get(i),
+                running,
+                "from the linear equations for the constants");
+      }
+      solution = space.particular().orElseThrow();
+      for (int i = 0; i < constants.size(); i++) {
+        solution = solution.plus(values.get().get(i).times(space.basis().get(i)));
+      }
+      for (Form condition : tied) {
+        if (!unknown.replaced(condition, variable, solution).isZero()) {
+          throw new Refusal(Reason.SOLUTION_NOT_FOUND, space.within().words());
+        }
+      }
+      return solution;
+    }
+
+    /// The first argument that the equation ties to the later ones, where that is not the least.
+    private Optional<BigInteger> first(SolutionSpace space) {
+      return start()
+          .filter(_ -> space.skipped() > 0)
+          .map(start -> start.add(BigInteger.valueOf(space.skipped())));
+    }
+
+    /// Whether the condition is about arguments that the equation ties to the later ones.
+    private boolean isTied(Form condition, SolutionSpace space) {
+      Optional<BigInteger> first = first(space);
+      return first.isEmpty()
+          || unknown.occurrences(condition).stream()
+              .flatMap(value -> value.argument().asInteger().stream())
+              .anyMatch(point -> point.compareTo(first.get()) >= 0);
+    }
+
+    private Refusal absent(SolutionSpace space) {
+      Reason reason = space.exhaustive() ? Reason.NO_SOLUTION : Reason.SOLUTION_NOT_FOUND;
+      return new Refusal(reason, space.within().words());
+    }
+
+    /// C1, C2, … other than those that occur.
+    private List<Variable> constants(int count) {
+      SortedSet<Variable> taken = new TreeSet<>(equation.variables());
+      conditions.stream().map(Form::variables).forEach(taken::addAll);
+      List<Variable> constants = new ArrayList<>();
+      for (int i = 1; constants.size() < count; i++) {
+        Variable constant = new Variable("C" + i);
+        if (!taken.contains(constant)) {
+          constants.add(constant);
+        }
+      }
+      return constants;
+    }
+
+    private void explain(SolutionSpace space, Form general) {
+      Form f = Form.of(new Unknown(unknown.name(), 0, Form.of(variable)));
+      for (Form y : space.basis()) {
+        evaluation
+            .grounds()
+            .found(
+                "a solution where the right side is 0", f, y, running, "checked by substitution");
+      }
+      Form particular = space.particular().orElseThrow();
+      if (!particular.isZero()) {
+        evaluation
+            .grounds()
+            .found("one solution of the whole", f, particular, running, "checked by substitution");
+      }
+      evaluation
+          .grounds()
+          .found("together", f, general, running, "put into the equation and found to solve it");
+    }
+
+    private void remarks(SolutionSpace space, Form solution) {
+      boolean open =
+          constants(space.basis().size()).stream().anyMatch(solution::dependsOn)
+              || conditions.isEmpty();
+      if (open && !space.isGeneral()) {
+        evaluation.remark(
+            space.exhaustive()
+                ? "not all solutions, but all " + space.within().words()
+                : "not all solutions");
+      }
+      first(space)
+          .ifPresent(
+              first ->
+                  evaluation.require(
+                      List.of(
+                          new Condition(
+                              Form.of(variable).minus(Form.of(first)),
+                              Condition.Relation.NATURAL))));
+      if (linearShift(space) && start().isPresent()) {
+        for (BigInteger point : space.undetermined(start().get())) {
+          evaluation.remark(unknown.name() + "(" + point + ") is not determined by the equation");
+        }
+      }
+    }
+
+    private static boolean linearShift(SolutionSpace space) {
+      return space.equation().action() == LinearEquation.Action.SHIFT
+          && space.equation().hasRationalCoefficients();
+    }
+  }
+
+  private static Condition notZero(Form form) {
+    return new Condition(form, Condition.Relation.NOT_ZERO);
+  }
+}

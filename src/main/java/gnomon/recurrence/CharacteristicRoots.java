@@ -1,0 +1,205 @@
+package gnomon.recurrence;
+
+import gnomon.algebra.Reason;
+import gnomon.algebra.Refusal;
+import gnomon.form.Constant;
+import gnomon.form.Elementary;
+import gnomon.form.Form;
+import gnomon.form.Structure;
+import gnomon.form.Variable;
+import gnomon.number.Rational;
+import gnomon.polynomial.Factor;
+import gnomon.polynomial.Polynomial;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.function.Function;
+
+/// The roots of a polynomial over the field of forms, in exact form.
+///
+/// Factors of degree one and two give their roots by radicals; so does a factor g(z^m) with g of
+/// degree at most two, through the m-th roots of unity that forms know. Any other irreducible
+/// factor is left out, and the roots are then not complete.
+///
+/// @param roots pairwise different as forms, none of them zero
+/// @param complete whether with multiplicities they are all roots other than zero
+/// @param distinct forms that must not vanish for the roots to be different
+record CharacteristicRoots(List<Root> roots, boolean complete, List<Form> distinct) {
+
+  /// A root and its multiplicity.
+  record Root(Form value, int multiplicity) {}
+
+  private static final Form TWICE_I = Form.I.times(Form.TWO);
+  private static final Variable Z = new Variable("z'");
+
+  /// Real and imaginary part of a constant.
+  record Parts(Form real, Form imaginary) {
+    static Parts of(Form constant) {
+      var parts = constant.numerator().coefficients(Constant.I);
+      Form below = Form.of(constant.denominator());
+      return new Parts(
+          Form.of(parts.getOrDefault(Rational.ZERO, Polynomial.ZERO)).dividedBy(below),
+          Form.of(parts.getOrDefault(Rational.ONE, Polynomial.ZERO)).dividedBy(below));
+    }
+
+    Form conjugate() {
+      return real.minus(Form.I.times(imaginary));
+    }
+  }
+
+  /// The solutions that belong to the roots, by the solution of each root: two conjugate ones,
+  /// which are y and ȳ, are replaced by (y + ȳ)/2 and (y − ȳ)/(2i).
+  List<Form> inRealForm(Function<Form, Form> solution, Form variable) {
+    List<Form> functions = new ArrayList<>();
+    for (int i = 0; i < roots.size(); i++) {
+      Form conjugate = Parts.of(roots.get(i).value()).conjugate();
+      boolean isReal = conjugate.equals(roots.get(i).value());
+      int partner = isReal ? -1 : indexOf(conjugate);
+      Form y = solution.apply(roots.get(i).value());
+      if (partner >= 0) {
+        Form other = solution.apply(conjugate);
+        y = partner > i ? y.plus(other).times(Rational.HALF) : other.minus(y).dividedBy(TWICE_I);
+      }
+      for (int j = 0; j < roots.get(i).multiplicity(); j++) {
+        functions.add(y.times(variable.power(j)));
+      }
+    }
+    return functions;
+  }
+
+  private int indexOf(Form value) {
+    for (int i = 0; i < roots.size(); i++) {
+      if (roots.get(i).value().equals(value)) {
+        return i;
+      }
+    }
+    return -1;
+  }
+
+  /// root^v; off the axes by its length and its angle, so that it can be shown in real form.
+  static Form power(Form root, Form v) {
+    Parts parts = Parts.of(root);
+    boolean gaussian =
+        parts.real().asRational().isPresent() && parts.imaginary().asRational().isPresent();
+    if (!root.isConstant() || gaussian || parts.real().isZero() || parts.imaginary().isZero()) {
+      return Elementary.power(root, v);
+    }
+    Form square = parts.real().power(2).plus(parts.imaginary().power(2));
+    Form length = Elementary.power(square, v.times(Rational.HALF));
+    Form angle = Elementary.arctan(parts.imaginary().dividedBy(parts.real()));
+    Form turn = Elementary.exp(Form.I.times(angle).times(v));
+    Form power = length.times(turn);
+    boolean above = parts.imaginary().numerator().content().sign() > 0;
+    Form half = Elementary.power(Form.MINUS_ONE, above ? v : v.negated());
+    Form left = power.times(half);
+    Variable n = v.variables().first();
+    return power.substitute(n, Form.ONE).equals(root)
+        ? power
+        : left.substitute(n, Form.ONE).equals(root) ? left : Elementary.power(root, v);
+  }
+
+  /// The roots other than zero of Σ_i coefficients_i z^i.
+  static CharacteristicRoots of(List<Form> coefficients) {
+    Form polynomial = Structure.polynomial(coefficients, Z);
+    List<Root> roots = new ArrayList<>();
+    List<Form> distinct = new ArrayList<>();
+    List<Polynomial> bases = new ArrayList<>();
+    boolean complete = true;
+    for (Factor factor : polynomial.numerator().factor().factors()) {
+      Form base = Form.of(factor.base());
+      if (!base.dependsOn(Z)) {
+        continue;
+      }
+      List<Form> list = Structure.asPolynomial(base, Z).orElseThrow();
+      if (list.getFirst().isZero()) {
+        continue;
+      }
+      Optional<List<Form>> found = split(list);
+      bases.add(factor.base());
+      complete &= found.isPresent();
+      for (Form root : found.orElse(List.of())) {
+        add(roots, root, factor.multiplicity());
+      }
+    }
+    for (int i = 0; i < bases.size(); i++) {
+      distinct.add(Form.of(Polynomial.resultant(bases.get(i), bases.get(i).derivative(Z), Z)));
+      for (int j = 0; j < i; j++) {
+        distinct.add(Form.of(Polynomial.resultant(bases.get(i), bases.get(j), Z)));
+      }
+    }
+    return new CharacteristicRoots(List.copyOf(roots), complete, List.copyOf(distinct));
+  }
+
+  private static void add(List<Root> roots, Form value, int multiplicity) {
+    for (int i = 0; i < roots.size(); i++) {
+      if (roots.get(i).value().equals(value)) {
+        roots.set(i, new Root(value, roots.get(i).multiplicity() + multiplicity));
+        return;
+      }
+    }
+    roots.add(new Root(value, multiplicity));
+  }
+
+  private static Optional<List<Form>> split(List<Form> list) {
+    int degree = list.size() - 1;
+    if (degree == 1) {
+      return Optional.of(List.of(list.getFirst().dividedBy(list.getLast()).negated()));
+    }
+    int step = 1;
+    for (int m = degree; m > 1 && step == 1; m--) {
+      step = degree % m == 0 && isIn(list, m) ? m : 1;
+    }
+    if (degree / step > 2) {
+      return Optional.empty();
+    }
+    try {
+      List<Form> roots = new ArrayList<>();
+      for (Form square : upToTwo(list, step)) {
+        roots.addAll(rootsOf(square, step));
+      }
+      return Optional.of(roots);
+    } catch (Refusal _) {
+      return Optional.empty();
+    }
+  }
+
+  /// Whether only powers of z^m occur.
+  private static boolean isIn(List<Form> list, int m) {
+    for (int i = 0; i < list.size(); i++) {
+      if (i % m != 0 && !list.get(i).isZero()) {
+        return false;
+      }
+    }
+    return true;
+  }
+
+  /// The roots of the polynomial in z^step, of degree one or two in it.
+  private static List<Form> upToTwo(List<Form> list, int step) {
+    Form c = list.getFirst();
+    if (list.size() == step + 1) {
+      return List.of(c.dividedBy(list.getLast()).negated());
+    }
+    Form b = list.get(step).dividedBy(list.getLast()).times(Rational.of(-1, 2));
+    Form square = b.times(b).minus(c.dividedBy(list.getLast()));
+    Form root = Elementary.sqrt(square);
+    return List.of(b.plus(root), b.minus(root));
+  }
+
+  /// All m-th roots of the value.
+  private static List<Form> rootsOf(Form value, int m) {
+    if (m == 1) {
+      return List.of(value);
+    }
+    Form principal = Elementary.power(value, Form.of(Rational.of(1, m)));
+    List<Form> roots = new ArrayList<>();
+    for (int k = 0; k < m; k++) {
+      Form turn = Elementary.power(Form.MINUS_ONE, Form.of(Rational.of(2L * k, m)));
+      Form root = principal.times(turn);
+      if (!root.power(m).equals(value)) {
+        throw new Refusal(Reason.ROOT_OUT_OF_FIELD, value, Form.of(m));
+      }
+      roots.add(root);
+    }
+    return roots;
+  }
+}
