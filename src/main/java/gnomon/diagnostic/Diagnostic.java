@@ -5,9 +5,14 @@ import java.util.Optional;
 
 /// One mistake, told to a person: what is wrong (`message`, a fact), where (`span`), the actual
 /// values that show it (`evidence`, one line each) and one line to try instead (`hint`, the line
-/// alone, without the word "Try").
+/// alone, without the word "Try"; `inPlace` when it is meant instead of the span alone).
 public record Diagnostic(
-    Problem problem, String message, Span span, List<String> evidence, Optional<String> hint) {
+    Problem problem,
+    String message,
+    Span span,
+    List<String> evidence,
+    Optional<String> hint,
+    boolean inPlace) {
   /// The number of characters a message may have; longer ones are cut with an ellipsis.
   public static final int MESSAGE_LIMIT = 72;
 
@@ -21,7 +26,7 @@ public record Diagnostic(
 
   /// A diagnostic without evidence or hint.
   public static Diagnostic of(String code, String message, Span span) {
-    return new Diagnostic(new Problem(code), message, span, List.of(), Optional.empty());
+    return new Diagnostic(new Problem(code), message, span, List.of(), Optional.empty(), false);
   }
 
   /// The stable code of the problem.
@@ -31,16 +36,21 @@ public record Diagnostic(
 
   /// The same with the given lines of evidence.
   public Diagnostic withEvidence(String... lines) {
-    return new Diagnostic(problem, message, span, List.of(lines), hint);
+    return new Diagnostic(problem, message, span, List.of(lines), hint, inPlace);
   }
 
   /// The same with a line to try.
   public Diagnostic withHint(String line) {
-    return new Diagnostic(problem, message, span, evidence, Optional.of(line));
+    return new Diagnostic(problem, message, span, evidence, Optional.of(line), false);
+  }
+
+  /// The same with a text to try in the place of the span.
+  public Diagnostic withReplacement(String text) {
+    return new Diagnostic(problem, message, span, evidence, Optional.of(text), true);
   }
 
   /// The same at another place.
   public Diagnostic withSpan(Span place) {
-    return new Diagnostic(problem, message, place, evidence, hint);
+    return new Diagnostic(problem, message, place, evidence, hint, inPlace);
   }
 }

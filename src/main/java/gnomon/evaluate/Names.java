@@ -204,15 +204,22 @@ final class Names {
   private static RuntimeException unknown(Expression.Name name, Scope scope) {
     List<String> near = Vocabulary.nearMisses(name.text(), scope.names().keySet());
     String text = name.text();
+    Optional<String> meant = Vocabulary.meant(text);
+    if (meant.isPresent()) {
+      return new DiagnosedException(
+          Diagnostic.of("name-unknown", text + " has no meaning", name.span())
+              .withEvidence("Here it is written " + meant.get() + ".")
+              .withHint("help " + meant.get().replace("n!", "!")));
+    }
     if (near.isEmpty()) {
       String apart = String.join(" ", text.split("(?<=.)(?=.)"));
       return text.chars().allMatch(Character::isLetter) && text.length() <= 3
-          ? Problems.of("name-unknown", text + " has no meaning", name.span(), apart)
+          ? Problems.mended("name-unknown", text + " has no meaning", name.span(), apart)
           : Problems.of("name-unknown", text + " has no meaning", name.span());
     }
     return new DiagnosedException(
         Diagnostic.of("name-unknown", text + " has no meaning", name.span())
             .withEvidence("Names like it: " + String.join(", ", near) + ".")
-            .withHint(near.getFirst()));
+            .withReplacement(near.getFirst()));
   }
 }

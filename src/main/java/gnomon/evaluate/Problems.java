@@ -18,6 +18,11 @@ final class Problems {
     return new DiagnosedException(Diagnostic.of(code, message, span).withHint(hint));
   }
 
+  /// A mistake that another text in its place would mend.
+  static DiagnosedException mended(String code, String message, Span span, String replacement) {
+    return new DiagnosedException(Diagnostic.of(code, message, span).withReplacement(replacement));
+  }
+
   /// An operator beside a function where both must be operators.
   static DiagnosedException pointingToX(String message, Span span, Scope scope) {
     return new DiagnosedException(
@@ -32,6 +37,6 @@ final class Problems {
     return new DiagnosedException(
         Diagnostic.of("kind-doubtful", message, span)
             .withEvidence("It may mean " + first, "or " + second)
-            .withHint(first));
+            .withReplacement(first));
   }
 }

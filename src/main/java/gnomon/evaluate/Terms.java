@@ -1,5 +1,7 @@
 package gnomon.evaluate;
 
+import gnomon.diagnostic.DiagnosedException;
+import gnomon.diagnostic.Diagnostic;
 import gnomon.diagnostic.Span;
 import gnomon.syntax.Connective;
 import gnomon.syntax.Expression;
@@ -11,11 +13,14 @@ import gnomon.value.FormValue;
 import gnomon.value.Value;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Set;
 import java.util.stream.Collectors;
 
 /// Reads a row of factors by sort: arguments are joined to what they are written against, quotients
 /// are taken, and the row is folded from the right.
 final class Terms {
+  private static final Set<String> LETTERS_OF_FUNCTIONS = Set.of("f", "g", "F", "G");
+
   private final Evaluator evaluator;
   private final Calls calls;
   private final Arithmetic arithmetic;
@@ -107,7 +112,25 @@ final class Terms {
           name + " at " + scope.running().name() + " = " + bare,
           name + " * " + inside);
     }
+    refuseUndeclaredFunction(head, argument, scope);
     return false;
+  }
+
+  /// Refuses `f(x + 1)` while f is nothing yet: whoever writes it hardly means a product.
+  private static void refuseUndeclaredFunction(Factor head, Factor argument, Scope scope) {
+    if (head.value() instanceof Expression.Name name
+        && LETTERS_OF_FUNCTIONS.contains(name.text())
+        && scope.binding(name.text()).isEmpty()
+        && !scope.running().name().equals(name.text())) {
+      String inside = StatementText.of(argument.atom(), Spelling.ASCII);
+      throw new DiagnosedException(
+          Diagnostic.of(
+                  "kind-doubtful",
+                  name.text() + " is not declared as a function",
+                  head.value().span().to(argument.value().span()))
+              .withEvidence("A product is written " + name.text() + " * " + inside + ".")
+              .withHint("arbitrary " + name.text()));
+    }
   }
 
   private static boolean isNamedValue(Expression head, Scope scope) {
@@ -134,7 +157,7 @@ final class Terms {
             .noneMatch(variable -> variable.name().equals(name.subscript().get()))) {
       String subscript = name.subscript().get();
       String shown = StatementText.of(name, Spelling.ASCII);
-      throw Problems.of(
+      throw Problems.mended(
           "kind-subscript",
           shown + " acts on " + subscript + ", which does not occur in the function",
           name.span(),

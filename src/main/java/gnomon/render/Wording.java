@@ -39,7 +39,8 @@ public final class Wording {
         words.fact(),
         span,
         words.evidenceWith(data),
-        words.hintWith(data));
+        words.hintWith(data),
+        false);
   }
 
   /// What to say about work that was stopped at a place.
@@ -52,14 +53,16 @@ public final class Wording {
               "this takes longer than the time allowed",
               span,
               List.of("The limit is " + halt.detail() + " milliseconds for a statement."),
-              Optional.empty());
+              Optional.empty(),
+              false);
       case SIZE ->
           new Diagnostic(
               new Problem("limit-size"),
               "the result would be too large",
               span,
               List.of("It would need about " + halt.detail() + " numbers or digits of numbers."),
-              Optional.empty());
+              Optional.empty(),
+              false);
     };
   }
 

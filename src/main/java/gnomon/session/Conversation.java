@@ -29,6 +29,8 @@ import java.util.Optional;
 /// What a statement does to a state and what is replied: a function of both, but for the files that
 /// some statements read and write.
 final class Conversation {
+  private static final int LONGEST_HINT = 200;
+
   private final Settings settings;
   private final HelpPages help;
   private final Interpreter interpreter;
@@ -92,7 +94,26 @@ final class Conversation {
   }
 
   private static Outcome failure(State state, Diagnostic diagnostic, Source source) {
-    return new Outcome(state, new Reply.Failure(diagnostic, source));
+    return new Outcome(state, new Reply.Failure(wholeLine(diagnostic, source), source));
+  }
+
+  /// A hint for the place of the mistake as the whole statement with it, where that can be read.
+  private static Diagnostic wholeLine(Diagnostic diagnostic, Source source) {
+    if (!diagnostic.inPlace() || diagnostic.hint().isEmpty()) {
+      return diagnostic;
+    }
+    String text = source.text();
+    Span span = diagnostic.span();
+    if (span.end() > text.length() || text.length() > LONGEST_HINT) {
+      return diagnostic;
+    }
+    String line =
+        text.substring(0, span.start()) + diagnostic.hint().get() + text.substring(span.end());
+    String single = line.strip();
+    boolean readable =
+        single.lines().count() == 1
+            && StatementReader.read(new Source("hint", single)) instanceof Reading.Understood;
+    return readable ? diagnostic.withHint(single) : diagnostic;
   }
 
   private Wording wording(State state) {

@@ -4,6 +4,7 @@ import gnomon.diagnostic.Diagnostic;
 import gnomon.diagnostic.Span;
 import java.util.List;
 import java.util.Map;
+import java.util.regex.Pattern;
 import java.util.stream.Stream;
 import org.antlr.v4.runtime.CommonToken;
 
@@ -78,6 +79,7 @@ final class Repairs {
           default ->
               switch (at) {
                 case "-" -> Stream.of(head + "(" + at + tail + ")");
+                case ":" -> Stream.of(inOurWords(text));
                 case ".." -> Stream.of("n for n: " + text.strip());
                 default -> Stream.empty();
               };
@@ -86,6 +88,13 @@ final class Repairs {
         Explanation.nearStatement(tokens.getFirst()).stream()
             .map(word -> word + text.strip().substring(tokens.getFirst().getText().length()));
     return Stream.of(spelt, special, general).flatMap(stream -> stream);
+  }
+
+  /// The text with words of the trade replaced by those of the language.
+  private static String inOurWords(String text) {
+    return Pattern.compile("[a-zA-Z]+")
+        .matcher(text)
+        .replaceAll(word -> Vocabulary.meant(word.group()).orElse(word.group()));
   }
 
   /// What may stand after the head of a binder instead of `tail`.

@@ -4,6 +4,7 @@ import java.util.Collection;
 import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
@@ -64,6 +65,26 @@ public final class Vocabulary {
   /// Whether the operator takes a step in brackets, as `Delta[h]`.
   public static boolean takesStep(String name) {
     return STEPPED.contains(name);
+  }
+
+  /// The sign or word of the language for what a word of the trade means, such as `Sigma` for
+  /// `sum`.
+  public static Optional<String> meant(String word) {
+    return Optional.ofNullable(
+        switch (word.toLowerCase(Locale.ROOT)) {
+          case "sum", "summation" -> "Sigma";
+          case "prod", "product" -> "Prod";
+          case "int", "integrate" -> "Integral";
+          case "diff", "derivative" -> "D";
+          case "difference" -> "Delta";
+          case "shift" -> "E";
+          case "binomial", "choose" -> "binom";
+          case "factorial" -> "n!";
+          case "harmonic" -> "H";
+          case "log" -> "ln";
+          case "infinity" -> "inf";
+          default -> null;
+        });
   }
 
   /// The words nearest to a misspelt one, nearest first, at most three, from the language and from

@@ -53,7 +53,7 @@ final class RunTest {
     assertTrue(
         json.endsWith(
             "\"error\":{\"code\":\"name-unknown\",\"message\":\"xD has no meaning\","
-                + "\"line\":3,\"column\":5,\"hint\":\"x D\"}}"),
+                + "\"line\":3,\"column\":5,\"hint\":\"1 + x D\"}}"),
         json);
   }
 
