@@ -33,14 +33,21 @@ final class RangeValues {
     Variable variable = scope.fresh(name);
     List<Condition> earlier = evaluation.conditions();
     evaluation.conditions(List.of());
-    Optional<FormValue> symbolic = symbolic(name, variable, body, scope);
+    Optional<FormValue> free = free(name, variable, body, scope);
+    boolean running = scope.running().name().equals(name);
+    Optional<FormValue> symbolic = free.filter(value -> running || !hasStandingSums(value));
+    StandingSums sums = new StandingSums(evaluation.sums());
     List<Condition> conditions = evaluation.conditions();
     evaluation.conditions(earlier);
     List<Value> values = new ArrayList<>();
     for (BigInteger k = first; k.compareTo(last) <= 0; k = k.add(BigInteger.ONE)) {
       Budget.checkpoint();
       boolean valid = !Validity.fails(conditions, Map.of(variable, Form.of(k)));
-      values.add(valueAt(name, variable, k, symbolic.filter(_ -> valid), body, scope));
+      Optional<Form> known = byRecurrence(free.filter(_ -> valid), sums, variable, k, last);
+      values.add(
+          known.isPresent()
+              ? Sorts.of(known.get(), scope)
+              : valueAt(name, variable, k, symbolic.filter(_ -> valid), body, scope));
     }
     evaluation.require(
         conditions.stream()
@@ -79,12 +86,10 @@ final class RangeValues {
 
   /// The value with the variable left free. Where it is the running variable there must be one, for
   /// operators act on it.
-  private Optional<FormValue> symbolic(
-      String name, Variable variable, Expression body, Scope scope) {
+  private Optional<FormValue> free(String name, Variable variable, Expression body, Scope scope) {
     boolean running = scope.running().name().equals(name);
     try {
       return evaluator.value(body, scope.binding(name, variable)) instanceof FormValue value
-              && (running || !hasStandingSums(value))
           ? Optional.of(value)
           : Optional.empty();
     } catch (LocatedRefusal | DiagnosedException needsNumbers) {
@@ -97,6 +102,20 @@ final class RangeValues {
 
   private static boolean hasStandingSums(FormValue value) {
     return value.form().generators().stream().anyMatch(Accumulation.class::isInstance);
+  }
+
+  /// The value where a recurrence settles every standing sum in it.
+  private static Optional<Form> byRecurrence(
+      Optional<FormValue> value,
+      StandingSums sums,
+      Variable variable,
+      BigInteger k,
+      BigInteger last) {
+    return value
+        .filter(RangeValues::hasStandingSums)
+        .map(form -> sums.at(form.form(), variable, k, last))
+        .filter(form -> form.generators().stream().noneMatch(Accumulation.class::isInstance))
+        .map(form -> form.substitute(variable, Form.of(k)));
   }
 
   static DiagnosedException pole(Variable variable, BigInteger k, Span span) {

@@ -121,7 +121,6 @@ final class Solving {
       if (values.isEmpty()) {
         throw space.isGeneral() ? new Refusal(Reason.CONDITIONS_CONTRADICT) : absent(space);
       }
-      Form solution = general;
       for (int i = 0; i < constants.size(); i++) {
         evaluation
             .grounds()
@@ -132,10 +131,7 @@ final class Solving {
                 running,
                 "from the linear equations for the constants");
       }
-      solution = space.particular().orElseThrow();
-      for (int i = 0; i < constants.size(); i++) {
-        solution = solution.plus(values.get().get(i).times(space.basis().get(i)));
-      }
+      Form solution = space.withConstants(values.get());
       for (Form condition : tied) {
         if (!unknown.replaced(condition, variable, solution).isZero()) {
           throw new Refusal(Reason.SOLUTION_NOT_FOUND, space.within().words());

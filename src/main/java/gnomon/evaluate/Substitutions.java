@@ -58,9 +58,13 @@ final class Substitutions {
     return images;
   }
 
+  private StandingSums sums() {
+    return new StandingSums(evaluator.evaluation().sums());
+  }
+
   private Value put(Value subject, Map<Generator, Form> images, Span span, Scope scope) {
     return switch (subject) {
-      case FormValue form -> Sorts.of(addedUp(form.form().substitute(images)), scope);
+      case FormValue form -> Sorts.of(addedUp(sums().at(form.form(), images)), scope);
       case ListValue list ->
           new ListValue(list.items().stream().map(item -> put(item, images, span, scope)).toList());
       case TableValue table ->

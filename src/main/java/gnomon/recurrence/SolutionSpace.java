@@ -61,10 +61,15 @@ public record SolutionSpace(
 
   /// particular + Σ constants_i basis_i.
   public Form combination(List<Variable> constants) {
+    return withConstants(constants.stream().map(Form::of).toList());
+  }
+
+  /// particular + Σ values_i basis_i.
+  public Form withConstants(List<Form> values) {
     List<Form> parts = new ArrayList<>();
     parts.add(particular.orElseThrow());
     for (int i = 0; i < basis.size(); i++) {
-      parts.add(Form.of(constants.get(i)).times(basis.get(i)));
+      parts.add(values.get(i).times(basis.get(i)));
     }
     return Form.sum(parts);
   }

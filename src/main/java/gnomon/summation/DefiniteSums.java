@@ -6,6 +6,7 @@ import gnomon.form.Accumulation;
 import gnomon.form.Form;
 import gnomon.form.Variable;
 import gnomon.number.Rational;
+import gnomon.recurrence.HypergeometricTotal;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.HashSet;
@@ -91,7 +92,29 @@ public final class DefiniteSums {
     if (count.bitLength() > 40) {
       return DefiniteSum.standing(standing(f, k, a, b));
     }
-    return DefiniteSum.termByTerm(Terms.sum(f, k, a, count.longValueExact()));
+    Form value =
+        count.compareTo(BigInteger.valueOf(TERM_BY_TERM_LIMIT)) > 0
+            ? hypergeometric(f, k, a, count.longValueExact())
+                .orElseGet(() -> Terms.sum(f, k, a, count.longValueExact()))
+            : Terms.sum(f, k, a, count.longValueExact());
+    return DefiniteSum.termByTerm(value);
+  }
+
+  /// The sum of many terms by their ratio, where that is a rational function over ℚ.
+  private static Optional<Form> hypergeometric(Form f, Variable k, Form a, long count) {
+    if (a.asInteger().isEmpty()) {
+      return Optional.empty();
+    }
+    try {
+      Form first = f.substitute(k, a);
+      return HypergeometricTerm.of(f, k, Form.ONE)
+          .filter(_ -> !first.isZero())
+          .flatMap(
+              term -> HypergeometricTotal.of(term.ratio(), k, a.asInteger().orElseThrow(), count))
+          .map(total -> first.times(total));
+    } catch (Refusal _) {
+      return Optional.empty();
+    }
   }
 
   /// Σ(j: 0..span) g(j) with a symbolic span.

@@ -3,7 +3,11 @@ package gnomon.summation;
 import gnomon.algebra.Refusal;
 import gnomon.form.Form;
 import gnomon.form.Variable;
+import gnomon.recurrence.ConstantsFromConditions;
+import gnomon.recurrence.RecurrenceSolver;
+import gnomon.recurrence.SolutionSpace;
 import java.math.BigInteger;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
@@ -64,6 +68,7 @@ final class HypergeometricSums {
     return recurrence
         .filter(found -> found.order() <= 1)
         .flatMap(found -> closed(found, n, values, first))
+        .or(() -> solved(recurrence.get(), n, values, first))
         .orElseGet(() -> new Outcome.Recurrence(n, recurrence.get()));
   }
 
@@ -88,6 +93,35 @@ final class HypergeometricSums {
               : withRightSide(recurrence, n, product.get(), start);
       return value
           .map(form -> form.takingIntegers(Set.of(n)))
+          .filter(form -> satisfies(recurrence, n, form))
+          .flatMap(form -> validated(form, recurrence, n, values, first));
+    } catch (Refusal _) {
+      return Optional.empty();
+    }
+  }
+
+  /// A sum of hypergeometric terms that solves the recurrence and has the first values of the sum.
+  private Optional<Outcome> solved(
+      SumRecurrence recurrence, Variable n, SumValues values, BigInteger first) {
+    try {
+      SolutionSpace space =
+          new RecurrenceSolver(engine, Optional.of(recurrence.from())).solve(recurrence.equation());
+      if (space.isEmpty()) {
+        return Optional.empty();
+      }
+      List<Variable> constants = new ArrayList<>();
+      for (int i = 0; i < space.basis().size(); i++) {
+        constants.add(new Variable("c'" + i));
+      }
+      Form general = space.combination(constants);
+      List<Form> conditions = new ArrayList<>();
+      for (int i = 0; i < recurrence.order(); i++) {
+        BigInteger point = recurrence.from().add(BigInteger.valueOf(i));
+        conditions.add(general.substitute(n, Form.of(point)).minus(values.at(point)));
+      }
+      return ConstantsFromConditions.of(conditions, constants)
+          .map(found -> space.withConstants(found))
+          .filter(form -> constants.stream().noneMatch(form::dependsOn))
           .filter(form -> satisfies(recurrence, n, form))
           .flatMap(form -> validated(form, recurrence, n, values, first));
     } catch (Refusal _) {

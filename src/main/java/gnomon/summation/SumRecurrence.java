@@ -2,6 +2,7 @@ package gnomon.summation;
 
 import gnomon.form.Form;
 import gnomon.form.Variable;
+import gnomon.recurrence.LinearEquation;
 import java.math.BigInteger;
 import java.util.List;
 
@@ -25,6 +26,11 @@ public record SumRecurrence(
   /// Keeps its own copy.
   public SumRecurrence {
     coefficients = List.copyOf(coefficients);
+  }
+
+  /// The recurrence as an equation for the sum.
+  public LinearEquation equation() {
+    return new LinearEquation(LinearEquation.Action.SHIFT, variable, coefficients, rightSide);
   }
 
   /// The order J.
