@@ -6,6 +6,7 @@ import gnomon.algebra.Refusal;
 import gnomon.form.Dual;
 import gnomon.form.Elementary;
 import gnomon.form.Form;
+import gnomon.form.Structure;
 import gnomon.form.Variable;
 import gnomon.number.Rational;
 import gnomon.series.Expansion;
@@ -40,6 +41,7 @@ import java.util.function.UnaryOperator;
 public final class Operator {
 
   private static final Variable X = new Variable("x");
+  private static final int SMALL = 4;
 
   private final Form symbol;
   private final SortedMap<Variable, Form> boundaries;
@@ -279,6 +281,14 @@ public final class Operator {
     long capped = Math.min(square, Integer.MAX_VALUE);
     Budget.charge(boundaries.isEmpty() ? square : Math.multiplyExact(capped, capped));
     Operator result = identity();
+    if (isSmallPolynomial()) {
+      // a factor of low order on the left has few derivatives: cheaper than squaring long symbols
+      for (int i = 0; i < exponent; i++) {
+        Budget.checkpoint();
+        result = compose(result);
+      }
+      return result;
+    }
     for (int bit = 31 - Integer.numberOfLeadingZeros(exponent | 1); bit >= 0; bit--) {
       result = result.compose(result);
       if ((exponent >> bit & 1) == 1) {
@@ -286,6 +296,14 @@ public final class Operator {
       }
     }
     return result;
+  }
+
+  private boolean isSmallPolynomial() {
+    return isPlain()
+        && symbol.isPolynomial()
+        && symbol.numerator().size() <= SMALL
+        && symbol.duals().stream()
+            .allMatch(t -> Structure.degree(symbol, t).orElse(SMALL + 1) <= SMALL);
   }
 
   /// A power with any exponent: of a multiplication, or of a shift-invariant operator whose power

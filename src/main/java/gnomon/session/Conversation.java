@@ -1,5 +1,6 @@
 package gnomon.session;
 
+import gnomon.algebra.Halt;
 import gnomon.diagnostic.DiagnosedException;
 import gnomon.diagnostic.Diagnostic;
 import gnomon.diagnostic.Source;
@@ -67,6 +68,22 @@ final class Conversation {
 
   Outcome outcome(State state, Request request) {
     Source source = new Source("input", request.text(), request.line());
+    Span whole = new Span(0, request.text().length());
+    try {
+      return outcome(state, request, source);
+    } catch (Halt halted) {
+      // while words for a refusal were being found
+      return failure(state, wording(state).of(halted, whole), source);
+    } catch (StackOverflowError tooDeep) {
+      return failure(
+          state, Diagnostic.of("limit-depth", "this is nested too deeply", whole), source);
+    } catch (OutOfMemoryError tooLarge) {
+      return failure(
+          state, Diagnostic.of("limit-size", "this does not fit into memory", whole), source);
+    }
+  }
+
+  private Outcome outcome(State state, Request request, Source source) {
     try {
       return switch (StatementReader.read(source)) {
         case Reading.Rejected(Diagnostic diagnostic) -> failure(state, diagnostic, source);
@@ -80,14 +97,8 @@ final class Conversation {
       return failure(state, wording(state).of(refused.refusal(), refused.span()), source);
     } catch (LocatedHalt halted) {
       return failure(state, wording(state).of(halted.halt(), halted.span()), source);
-    } catch (StackOverflowError tooDeep) {
-      Span whole = new Span(0, request.text().length());
-      return failure(
-          state, Diagnostic.of("limit-depth", "this is nested too deeply", whole), source);
-    } catch (OutOfMemoryError tooLarge) {
-      Span whole = new Span(0, request.text().length());
-      return failure(
-          state, Diagnostic.of("limit-size", "this does not fit into memory", whole), source);
+    } catch (Halt halted) {
+      throw halted;
     } catch (RuntimeException fault) {
       return failure(state, Faults.diagnostic(fault, request.text().length()), source);
     }
@@ -265,7 +276,7 @@ final class Conversation {
               && statement instanceof Statement.ExpressionStatement(Expression expression, Span _)
           ? Optional.of(interpreter.value(expression, state.scope()).value())
           : Optional.empty();
-    } catch (DiagnosedException | LocatedRefusal | LocatedHalt unreadable) {
+    } catch (DiagnosedException | LocatedRefusal | LocatedHalt | Halt unreadable) {
       return Optional.empty();
     }
   }

@@ -97,7 +97,25 @@ final class FuzzTest {
     assertEquals("42", ReplyText.lines(session.submit("6 * 7"), Spelling.ASCII).getFirst());
   }
 
+  /// Time may end anywhere, also while words for a refusal are being found.
+  @Test
+  void statementsWithoutTimeAreAnsweredOrRefused() {
+    Limits none = limits.withTime(Duration.ofNanos(1));
+    for (int i = 0; i < 3000; i++) {
+      session = Session.of(Settings.batch().withLimits(none));
+      answer(random.nextInt(3) == 0 ? tokens() : tree(5));
+    }
+  }
+
   private void answer(String statement) {
+    try {
+      check(statement);
+    } catch (RuntimeException | Error fault) {
+      throw new AssertionError("seed " + seed + ": " + statement, fault);
+    }
+  }
+
+  private void check(String statement) {
     Reply reply = session.submit(statement);
     String text = String.join("\n", ReplyText.lines(reply, Spelling.UNICODE));
     String shown = "seed " + seed + ": " + statement + "\n" + text;
