@@ -51,7 +51,7 @@ final class RecurrenceTablesTest {
   @Test
   void sumsWhoseRecurrenceHasHypergeometricSolutionsClose() {
     Talk talk = new Talk();
-    talk.claim("diagonal", "Sigma(k: 0..n) binom(n-k, k) 2^k", "2/3 2^n + 1/3 (-1)^n");
+    talk.claim("diagonal", "Sigma(k: 0..n) binom(n-k, k) 2^k", "2/3 * 2^n + 1/3 (-1)^n");
     talk.claim("signs", "Sigma(k: 0..n) binom(n-k, k) (-1)^k 4^(-k)", "(n + 1)/2^n");
     talk.claim(
         "fibonacci",
