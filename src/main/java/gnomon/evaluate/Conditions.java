@@ -1,6 +1,10 @@
 package gnomon.evaluate;
 
+import gnomon.form.Base;
+import gnomon.form.Constant;
+import gnomon.form.Exponential;
 import gnomon.form.Form;
+import gnomon.form.Generator;
 import gnomon.form.Variable;
 import gnomon.number.Rational;
 import gnomon.summation.Condition;
@@ -25,7 +29,7 @@ final class Conditions {
   String words(List<Condition> conditions) {
     List<String> said = new ArrayList<>();
     List<String> outside = new ArrayList<>();
-    for (Condition condition : conditions) {
+    for (Condition condition : withoutConjugates(conditions)) {
       switch (condition.relation()) {
         case NOT_ZERO, INTEGER, NATURAL, POSITIVE, INSIDE_UNIT -> said.add(words(condition));
         case NOT_IN_RANGE -> outside.add(text(condition.subject()));
@@ -36,6 +40,33 @@ final class Conditions {
       said.add(String.join(" and ", outside) + " outside the range");
     }
     return said.isEmpty() ? "" : "for " + String.join(", ", said);
+  }
+
+  /// The conditions with complex subjects that must not be zero put together into one, which is
+  /// real where they are conjugate.
+  private static List<Condition> withoutConjugates(List<Condition> conditions) {
+    List<Condition> rest = new ArrayList<>();
+    Form product = Form.ONE;
+    for (Condition condition : conditions) {
+      boolean complex = condition.subject().generators().stream().anyMatch(Conditions::isComplex);
+      if (complex && condition.relation() == Condition.Relation.NOT_ZERO) {
+        product = product.times(condition.subject());
+      } else {
+        rest.add(condition);
+      }
+    }
+    if (!product.isOne()) {
+      rest.add(new Condition(product, Condition.Relation.NOT_ZERO));
+    }
+    return rest;
+  }
+
+  private static boolean isComplex(Generator generator) {
+    return generator.equals(Constant.I)
+        || generator instanceof Exponential power
+            && (power.base() instanceof Base.Turn
+                || power.base() instanceof Base.GaussianAngle
+                || power.unit().generators().contains(Constant.I));
   }
 
   private String words(Condition condition) {

@@ -15,14 +15,14 @@ public final class OperatorExpansion {
   /// series a(q⁻¹(s)). Coefficients of A that are functions stay on the left of the powers.
   ///
   /// @throws Refusal with [Reason#NOT_A_DELTA_OPERATOR] unless Q is shift-invariant with a symbol
-  ///   that vanishes at 0 to the first order; with [Reason#NO_SERIES] when A has a boundary part or
-  ///   an undetermined kernel
+  ///   that vanishes at 0 to the first order; with [Reason#NO_SERIES] when A has a boundary part.
+  ///   An inverse modulo a kernel is expanded in inverses modulo that kernel
   public static PowerSeries of(Operator a, Operator q, Variable x, int order) {
     Dual t = new Dual(x);
     if (!q.isPlain() || !q.isShiftInvariant(x) || Kernels.valuation(q.symbol(), t) != 1) {
       throw new Refusal(Reason.NOT_A_DELTA_OPERATOR, q.symbol());
     }
-    if (!a.isPlain()) {
+    if (!a.boundaries().isEmpty()) {
       throw new Refusal(Reason.NO_SERIES, a.symbol());
     }
     PowerSeries symbol = Expansion.of(a.symbol(), t, order);

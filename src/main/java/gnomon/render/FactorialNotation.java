@@ -2,6 +2,7 @@ package gnomon.render;
 
 import gnomon.form.Factorial;
 import gnomon.form.Form;
+import gnomon.number.Integers;
 import gnomon.number.Rational;
 import gnomon.polynomial.Monomial;
 import java.util.ArrayList;
@@ -46,6 +47,9 @@ final class FactorialNotation {
       search.binomials();
       search.powers();
     }
+    if (search.exponents.size() > 1) {
+      search.binomialsOfNumbers();
+    }
     search.exponents.keySet().stream().toList().forEach(search::absorb);
     return new Rewritten(search.coefficient, search.kernel);
   }
@@ -83,15 +87,85 @@ final class FactorialNotation {
       Form c = a.minus(b);
       int needed = b.equals(c) ? -2 : -1;
       if (exponents.get(b) <= needed && exponents.getOrDefault(c, 0) <= needed) {
-        Notation notation = new Notation.Binomial(kernels.inner(a), kernels.inner(b));
         take(a, 1);
         take(b, -1);
         take(c, -1);
-        put("binom(" + a.key() + "," + b.key() + ")", notation);
+        putBinomial(a, b);
         return true;
       }
     }
     return false;
+  }
+
+  /// 1/(b! c!) with b + c = s for a whole number s ≥ 0 is binom(s, b)/s!, after factors of the
+  /// coefficient are taken into the factorials.
+  private void binomialsOfNumbers() {
+    for (Form b : below().reversed()) {
+      for (Form c : below()) {
+        boolean positive = b.numerator().terms().getFirst().coefficient().sign() > 0;
+        boolean single = exponents.get(b) == -1 && exponents.get(c) == -1;
+        if (positive && single && b.plus(c).asInteger().isPresent() && binomialOfNumber(b, c)) {
+          return;
+        }
+      }
+    }
+  }
+
+  private boolean binomialOfNumber(Form b, Form c) {
+    Form before = coefficient;
+    Form lower = taken(b, -1);
+    Form rest = taken(c, -1);
+    Optional<Integer> sum = lower.plus(rest).asInt().filter(s -> s >= 0 && s <= MOST_ABSORBED);
+    if (sum.isEmpty()) {
+      coefficient = before;
+      return false;
+    }
+    take(b, -1);
+    take(c, -1);
+    coefficient = coefficient.times(Rational.of(Integers.factorial(sum.get())).inverse());
+    put(
+        "binom(" + sum.get() + "," + lower.key() + ")",
+        new Notation.Binomial(kernels.inner(Form.of(sum.get())), kernels.inner(lower)));
+    return true;
+  }
+
+  /// binom(a, b), with a factor (a+1)/(b+1), (a+1)/(a−b+1), b/a or (a−b)/a of the coefficient drawn
+  /// into it.
+  private void putBinomial(Form a, Form b) {
+    Form upper = a;
+    Form lower = b;
+    for (int steps = 0; steps < MOST_ABSORBED; steps++) {
+      Form up = upper.plus(Form.ONE);
+      Form rest = upper.minus(lower);
+      if (hasQuotient(up, lower.plus(Form.ONE))) {
+        coefficient = coefficient.times(lower.plus(Form.ONE)).dividedBy(up);
+        upper = up;
+        lower = lower.plus(Form.ONE);
+      } else if (hasQuotient(up, rest.plus(Form.ONE))) {
+        coefficient = coefficient.times(rest.plus(Form.ONE)).dividedBy(up);
+        upper = up;
+      } else if (hasQuotient(lower, upper)) {
+        coefficient = coefficient.times(upper).dividedBy(lower);
+        upper = upper.minus(Form.ONE);
+        lower = lower.minus(Form.ONE);
+      } else if (hasQuotient(rest, upper)) {
+        coefficient = coefficient.times(upper).dividedBy(rest);
+        upper = upper.minus(Form.ONE);
+      } else {
+        break;
+      }
+    }
+    put(
+        "binom(" + upper.key() + "," + lower.key() + ")",
+        new Notation.Binomial(kernels.inner(upper), kernels.inner(lower)));
+  }
+
+  private boolean hasQuotient(Form above, Form below) {
+    return !above.equals(below)
+        && !above.isConstant()
+        && !below.isConstant()
+        && isDivisible(coefficient.numerator(), above)
+        && isDivisible(coefficient.denominator(), below);
   }
 
   private void powers() {
@@ -132,6 +206,19 @@ final class FactorialNotation {
     if (Math.abs(exponent) != 1) {
       return;
     }
+    Form last = taken(argument, exponent);
+    if (!last.equals(argument)) {
+      take(argument, exponent);
+      Notation factorial = new Notation.Factorial(kernels.inner(last));
+      Form standIn = lexicon.standIn("(" + last.key() + ")!", factorial, Lexicon.Role.KERNEL);
+      kernel =
+          kernel.times(Monomial.of(standIn.asGenerator().orElseThrow(), Rational.of(exponent)));
+    }
+  }
+
+  /// The argument of the factorial, or its reciprocal, that has factors of the coefficient taken
+  /// in; they are taken out of the coefficient.
+  private Form taken(Form argument, int exponent) {
     Form last = argument;
     for (int steps = 0; steps < MOST_ABSORBED; steps++) {
       Form next = last.plus(Form.ONE);
@@ -146,13 +233,7 @@ final class FactorialNotation {
         break;
       }
     }
-    if (!last.equals(argument)) {
-      take(argument, exponent);
-      Notation factorial = new Notation.Factorial(kernels.inner(last));
-      Form standIn = lexicon.standIn("(" + last.key() + ")!", factorial, Lexicon.Role.KERNEL);
-      kernel =
-          kernel.times(Monomial.of(standIn.asGenerator().orElseThrow(), Rational.of(exponent)));
-    }
+    return last;
   }
 
   private static boolean isDivisible(gnomon.polynomial.Polynomial polynomial, Form by) {

@@ -80,6 +80,7 @@ final class Repairs {
               switch (at) {
                 case "-" -> Stream.of(head + "(" + at + tail + ")");
                 case ":" -> Stream.of(inOurWords(text));
+                case "integer" -> Stream.of(text.replaceAll("\\binteger +(\\w+)", "$1 integer"));
                 case ".." -> Stream.of("n for n: " + text.strip());
                 default -> Stream.empty();
               };

@@ -93,7 +93,7 @@ class FormNotationTest {
   void quotientsOfFactorialsAreBinomialsAndFactorialPowers() {
     assertEquals("binom(n, k)", shown(Combinatorial.binomial(n, k)));
     assertEquals("binom(2 n, n)", shown(Combinatorial.binomial(n.times(Form.TWO), n)));
-    assertEquals("(n + 1) binom(n, k)/(n - k + 1)", shown(Combinatorial.binomial(n.plus(one), k)));
+    assertEquals("binom(n + 1, k)", shown(Combinatorial.binomial(n.plus(one), k)));
     assertEquals("x↓n", shown(Combinatorial.falling(x, n)));
     assertEquals("x↑n", shown(Combinatorial.rising(x, n)));
     assertEquals("n!/k!", shown(Combinatorial.factorial(n).dividedBy(Combinatorial.factorial(k))));
@@ -125,6 +125,12 @@ class FormNotationTest {
     assertEquals("(n - 1)!", shown(factorial.dividedBy(n)));
     assertEquals("1/(n + 1)!", shown(factorial.times(n.plus(Form.ONE)).inverse()));
     assertEquals("(n + 3) n!", shown(factorial.times(n.plus(Form.of(3)))));
+    Form next = n.plus(Form.ONE);
+    Form after = k.plus(Form.ONE);
+    assertEquals("binom(n + 1, k + 1)", shown(Combinatorial.binomial(next, after)));
+    assertEquals("n binom(n, k)/k", shown(Combinatorial.binomial(n, k).times(n).dividedBy(k)));
+    Form mirrored = Combinatorial.factorial(Form.of(3).minus(k));
+    assertEquals("1/6 binom(3, k)", shown(mirrored.times(Combinatorial.factorial(k)).inverse()));
   }
 
   @Test
