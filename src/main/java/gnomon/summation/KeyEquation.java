@@ -65,8 +65,8 @@ record KeyEquation(Univariate a, Univariate b, List<Univariate> sides) {
       return Math.max(-1, right - top);
     }
     int bound = right - top + 1;
-    Form second = b.coefficient(top - 1).minus(top == 0 ? Form.ZERO : a.coefficient(top - 1));
     if (top > 0) {
+      Form second = b.coefficient(top - 1).minus(a.coefficient(top - 1));
       Optional<BigInteger> special = second.dividedBy(a.leading()).asInteger();
       if (special.isPresent() && special.get().signum() >= 0) {
         bound = Math.max(bound, special.get().min(BigInteger.valueOf(10_000)).intValueExact());
