@@ -55,6 +55,10 @@ public final class DefiniteSums {
     if (length.isPresent()) {
       return counted(summand, k, a, b, length.get());
     }
+    if (!summand.dependsOn(k)) {
+      Form value = summand.times(span.plus(Form.ONE));
+      return DefiniteSum.closed(value, List.of(), summand.times(Form.of(k)));
+    }
     if (span.variables().stream().anyMatch(summand::dependsOn)) {
       Form reversed = summand.substitute(k, a.plus(b).minus(Form.of(k)));
       boolean free = span.variables().stream().noneMatch(reversed::dependsOn);
