@@ -29,10 +29,11 @@ file      : ( KEEP | REPLAY | RECHECK | RERECORD ) STRING ;
 help      : HELP ( ~EOF )* ;
 leave     : LEAVE ;
 
-value        : ( matrix | solve | sum ) clause* ;
+value        : ( matrix | solve | recurrence | sum ) clause* ;
 matrix       : MATRIX sum TO sum ;
 solve        : SOLVE equation ( WITH equation ( COMMA equation )* )? ;
 equation     : sum EQUALS sum ;
+recurrence   : RECURRENCE EXPONENTIAL? sum ;
 clause
     : IN ( PARTIAL FRACTIONS | PRESENTATION | sum )    # in
     | TO sum DIGITS?                                   # to
@@ -73,6 +74,8 @@ LEAVE : 'leave' ;
 MATRIX : 'matrix' ;
 SOLVE : 'solve' ;
 WITH : 'with' ;
+RECURRENCE : 'recurrence' ;
+EXPONENTIAL : 'exponential' ;
 IN : 'in' ;
 TO : 'to' ;
 AT : 'at' ;

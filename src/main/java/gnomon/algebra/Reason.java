@@ -69,10 +69,15 @@ public enum Reason {
   NO_ANTIDIFFERENCE,
   /// Something has no closed form in this room. Data: the form.
   NO_CLOSED_FORM,
+  /// No linear differential equation with polynomial coefficients was found. Data: the function.
+  NO_DIFFERENTIAL_EQUATION,
   /// A constant without a numerical method. Data: the form.
   NO_DIGITS,
   /// An operator without inverse, or without a known one. Data: the symbol.
   NO_INVERSE,
+  /// No recurrence with polynomial coefficients fits the numbers with some to spare. Data: how many
+  /// numbers there are.
+  NO_LAW,
   /// An equation without a solution in a class of functions, which is proved. Data: the class.
   NO_SOLUTION,
   /// No power series at 0, or none that is known. Data: the form or the function concerned.

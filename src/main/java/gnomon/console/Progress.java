@@ -25,6 +25,7 @@ final class Progress {
     return switch (first) {
       case "claim" -> "deciding the claim";
       case "matrix" -> "filling in the matrix";
+      case "recurrence" -> "looking for the law";
       case "solve" -> "solving the equation";
       case "why" -> "checking the steps";
       case "replay" -> "replaying the file";

@@ -201,6 +201,11 @@ final class Calls {
                 dual(arguments.getFirst(), span, scope)));
       }
       case "H" -> harmonic(arguments, span, scope);
+      case "coefficient" -> {
+        expect(name, 2, arguments.size(), span);
+        yield new Laws(evaluator, evaluation)
+            .coefficient(arguments.getFirst(), arguments.getLast(), span, scope);
+      }
       case "binom", "falling", "rising" -> {
         expect(name, 2, arguments.size(), span);
         Form first = Sorts.form(arguments.getFirst(), span, "the first argument");

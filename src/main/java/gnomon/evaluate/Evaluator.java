@@ -66,6 +66,7 @@ final class Evaluator {
           matrices.matrix(
               value(matrix.operator(), scope), whole(matrix.order(), scope), matrix.span(), scope);
       case Expression.Solve solve -> new Solving(this, evaluation).value(solve, scope);
+      case Expression.Recurrence law -> new Laws(this, evaluation).value(law, scope);
       case Expression.Clauses clausal -> clauses.value(clausal, scope);
     };
   }

@@ -12,6 +12,7 @@ import gnomon.syntax.Vocabulary;
 import gnomon.value.Answer;
 import gnomon.value.Derivation;
 import gnomon.value.FormValue;
+import gnomon.value.OperatorValue;
 import gnomon.value.Status;
 import gnomon.value.Value;
 import gnomon.value.VerdictValue;
@@ -96,7 +97,8 @@ public final class Interpreter {
   private static Status status(Value value, Status met) {
     Status own = value.status();
     if (!(value instanceof FormValue)) {
-      return own;
+      boolean law = met.kind() == Status.Kind.GUESSED || met.kind() == Status.Kind.RECURRENCE;
+      return law && value instanceof OperatorValue ? met : own;
     }
     boolean standing = own.isLeft();
     return switch (met.kind()) {
@@ -104,7 +106,7 @@ public final class Interpreter {
       case LEFT_AS_SUM, LEFT_AS_PRODUCT, LEFT_AS_INTEGRAL -> standing ? own : Status.NONE;
       case NO_CLOSED_FORM, RECURRENCE -> standing ? met : Status.NONE;
       case NONE -> met.detail().isEmpty() ? own : met;
-      case PROVED, REFUTED, OPEN -> own;
+      case GUESSED, PROVED, REFUTED, OPEN -> own;
     };
   }
 

@@ -41,21 +41,20 @@ public final class TermOfRatio {
       }
     }
     Form rational = cancelled(up, down, v);
-    List<Form> parts = new ArrayList<>(List.of(rational, Elementary.power(unit, Form.of(v))));
-    for (Form factor : up) {
-      Optional<Form> root = root(factor, v);
+    List<Form> parts = new ArrayList<>(List.of(rational));
+    for (int i = 0; i < up.size() + down.size(); i++) {
+      boolean above = i < up.size();
+      Optional<Form> root = root(above ? up.get(i) : down.get(i - up.size()), v);
       if (root.isEmpty()) {
         return Optional.empty();
       }
-      parts.add(above(root.get(), v, start));
+      boolean reflected = isAbove(root.get()) || above && isPassed(root.get(), start);
+      Form argument =
+          reflected ? root.get().minus(Form.of(v)) : Form.of(v).minus(root.get()).minus(Form.ONE);
+      unit = reflected ? unit.negated() : unit;
+      parts.add(Combinatorial.factorial(argument).power(above == reflected ? -1 : 1));
     }
-    for (Form factor : down) {
-      Optional<Form> root = root(factor, v);
-      if (root.isEmpty()) {
-        return Optional.empty();
-      }
-      parts.add(Combinatorial.factorial(Form.of(v).minus(root.get()).minus(Form.ONE)).inverse());
-    }
+    parts.add(Elementary.power(unit, Form.of(v)));
     return Optional.of(Form.product(parts));
   }
 
@@ -64,13 +63,14 @@ public final class TermOfRatio {
     return root.dependsOn(v) ? Optional.empty() : Optional.of(root);
   }
 
-  private static Form above(Form root, Variable v, Optional<BigInteger> start) {
+  private static boolean isPassed(Form root, Optional<BigInteger> start) {
     Optional<BigInteger> whole = root.asInteger();
-    if (whole.isPresent() && start.isPresent() && start.get().compareTo(whole.get()) <= 0) {
-      Form sign = Elementary.power(Form.MINUS_ONE, Form.of(v));
-      return sign.dividedBy(Combinatorial.factorial(root.minus(Form.of(v))));
-    }
-    return Combinatorial.factorial(Form.of(v).minus(root).minus(Form.ONE));
+    return whole.isPresent() && start.isPresent() && start.get().compareTo(whole.get()) <= 0;
+  }
+
+  /// Whether the root is a parameter, as in a − v, rather than the negative of one, as in v + a.
+  private static boolean isAbove(Form root) {
+    return !root.isConstant() && root.numerator().leadingCoefficient().sign() > 0;
   }
 
   /// Takes pairs p(v + j) above p(v), or the other way round, out as rational functions.

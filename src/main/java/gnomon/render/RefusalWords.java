@@ -228,6 +228,18 @@ final class RefusalWords {
                   "It is {1}.",
                   "solve E f = 2 f + 1")),
           Map.entry(
+              "NO_DIFFERENTIAL_EQUATION",
+              domain(
+                  "no linear differential equation was found for this function",
+                  "It is {1}.",
+                  "recurrence (1 - sqrt(1 - 4 x))/(2 x)")),
+          Map.entry(
+              "NO_LAW",
+              domain(
+                  "no recurrence fits these numbers with some to spare",
+                  "There are {1} numbers.",
+                  "recurrence [1, 1, 2, 5, 14, 42, 132]")),
+          Map.entry(
               "NO_SOLUTION",
               domain(
                   "it is proved that there is no solution of this kind",

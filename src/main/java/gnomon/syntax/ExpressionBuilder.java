@@ -9,6 +9,7 @@ import gnomon.syntax.Expression.Matrix;
 import gnomon.syntax.Expression.Name;
 import gnomon.syntax.Expression.Numeral;
 import gnomon.syntax.Expression.Parenthesis;
+import gnomon.syntax.Expression.Recurrence;
 import gnomon.syntax.Expression.Sign;
 import gnomon.syntax.Expression.Solve;
 import gnomon.syntax.Expression.Suffixed;
@@ -54,6 +55,11 @@ final class ExpressionBuilder {
   private Expression subject(GnomonParser.ValueContext context) {
     if (context.sum() != null) {
       return sum(context.sum());
+    }
+    if (context.recurrence() != null) {
+      GnomonParser.RecurrenceContext recurrence = context.recurrence();
+      boolean exponential = recurrence.EXPONENTIAL() != null;
+      return new Recurrence(sum(recurrence.sum()), exponential, span(recurrence));
     }
     return context.matrix() != null ? matrix(context.matrix()) : solve(context.solve());
   }

@@ -9,6 +9,7 @@ import gnomon.syntax.Expression.Name;
 import gnomon.syntax.Expression.Numeral;
 import gnomon.syntax.Expression.OrderTerm;
 import gnomon.syntax.Expression.Parenthesis;
+import gnomon.syntax.Expression.Recurrence;
 import gnomon.syntax.Expression.Sign;
 import gnomon.syntax.Expression.Solve;
 import gnomon.syntax.Expression.Suffixed;
@@ -43,6 +44,7 @@ public final class Parts {
           Stream.concat(Stream.of(equation), conditions.stream())
               .flatMap(each -> Stream.of(each.left(), each.right()))
               .toList();
+      case Recurrence(var subject, _, _) -> List.of(subject);
       case Clauses(var subject, var clauses, _) ->
           Stream.concat(Stream.of(subject), clauses.stream().flatMap(Parts::ofClause)).toList();
     };

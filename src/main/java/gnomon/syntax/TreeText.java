@@ -11,6 +11,7 @@ import gnomon.syntax.Expression.Name;
 import gnomon.syntax.Expression.Numeral;
 import gnomon.syntax.Expression.OrderTerm;
 import gnomon.syntax.Expression.Parenthesis;
+import gnomon.syntax.Expression.Recurrence;
 import gnomon.syntax.Expression.Sign;
 import gnomon.syntax.Expression.Solve;
 import gnomon.syntax.Expression.Suffixed;
@@ -74,6 +75,8 @@ final class TreeText {
           before = ", ";
         }
       }
+      case Recurrence(var subject, var exponential, _) ->
+          add(exponential ? "recurrence exponential " : "recurrence ").add(subject);
       case Clauses(var subject, var clauses, _) -> {
         add(subject);
         clauses.forEach(this::clause);

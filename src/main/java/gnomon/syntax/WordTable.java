@@ -48,6 +48,7 @@ final class WordTable {
           word("rising", FUNCTION, "rising(x, n) is the rising power x|^n; also after in"),
           word("binom", FUNCTION, "binom(n, k) is the binomial coefficient"),
           word("H", FUNCTION, "H(n) is the harmonic number, H(n, r) that of order r"),
+          word("coefficient", FUNCTION, "coefficient(f, n) is the coefficient of x^n in f"),
           word("O", FUNCTION, "O(x^n) is what a series leaves out"));
 
   static final List<Word> CONSTANTS =
@@ -75,7 +76,8 @@ final class WordTable {
           word("help", STATEMENT, "shows the page of a word"),
           word("leave", STATEMENT, "ends the session"),
           word("matrix", STATEMENT, "matrix A to N is the matrix of A on x^0 to x^N"),
-          word("solve", STATEMENT, "solves a linear difference or differential equation"));
+          word("solve", STATEMENT, "solves a linear difference or differential equation"),
+          word("recurrence", STATEMENT, "the law of a list, or of the coefficients of a function"));
 
   static final List<Word> CLAUSES =
       List.of(
@@ -90,6 +92,7 @@ final class WordTable {
           word("fractions", CLAUSE, "in partial fractions"),
           word("expanded", CLAUSE, "in expanded form, multiplied out"),
           word("tex", CLAUSE, "in tex, as a formula to set in print"),
+          word("exponential", CLAUSE, "recurrence exponential f is the law of n! times [x^n] f"),
           word("with", CLAUSE, "the values that the solution of an equation takes"),
           word("integer", CLAUSE, "given n integer assumes that n is one"));
 

@@ -35,6 +35,7 @@ final class FuzzTest {
           "matrix",
           "solve",
           "with",
+          "recurrence",
           "in",
           "to",
           "at",

@@ -71,6 +71,8 @@ final class Outline {
               + of(equation)
               + conditions.stream().map(c -> "; " + of(c)).collect(Collectors.joining())
               + "}";
+      case Expression.Recurrence(var subject, var exponential, _) ->
+          "{recurrence " + (exponential ? "exponential " : "") + of(subject) + "}";
       case Expression.Clauses(var subject, var clauses, _) ->
           "{"
               + of(subject)

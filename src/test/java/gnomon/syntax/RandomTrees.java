@@ -47,6 +47,7 @@ final class RandomTrees {
           case 1 ->
               new Expression.Solve(
                   equation(depth - 1), maybe(() -> equation(depth - 2)), Span.NONE);
+          case 2 -> new Expression.Recurrence(sum(depth - 1), random.nextBoolean(), Span.NONE);
           default -> sum(depth);
         };
     return random.nextInt(3) > 0
