@@ -113,6 +113,12 @@ public final class Rational implements Field<Rational>, Comparable<Rational> {
         lowest ? denominator : denominator.divide(common));
   }
 
+  /// The quotient of two integers known to be coprime, the denominator positive: neither is
+  /// checked.
+  public static Rational ofCoprime(BigInteger numerator, BigInteger denominator) {
+    return denominator.equals(BigInteger.ONE) ? of(numerator) : lowest(numerator, denominator);
+  }
+
   /// Reads `p`, `p/q` or a decimal such as `-0.125`, all exact.
   ///
   /// @throws Refusal with [Reason#UNREADABLE_NUMBER] when `text` is none of these

@@ -82,6 +82,11 @@ sealed interface CoefficientField<T> permits RationalCoefficients, FormCoefficie
     return SeriesAlgorithms.exp(this, a, length);
   }
 
+  /// ln a, for a_0 = 1.
+  default List<T> log(List<T> a, int length) {
+    return SeriesAlgorithms.log(this, a, length);
+  }
+
   /// a^e, for a_0 = 1.
   default List<T> power(List<T> a, T exponent, int length) {
     return SeriesAlgorithms.power(this, a, exponent, length);

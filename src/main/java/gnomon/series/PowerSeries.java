@@ -319,8 +319,20 @@ public final class PowerSeries {
     if (isZero() || valuation != 0) {
       throw new Refusal(Reason.NO_SERIES, "ln");
     }
-    Form constant = Elementary.ln(coefficients.getFirst());
-    return derivative().dividedBy(this).integral().plus(constant(constant, order));
+    Form first = coefficients.getFirst();
+    int length = order + 1;
+    PowerSeries unit = first.isOne() ? this : times(first.inverse());
+    PowerSeries rest =
+        unit.fromZero(
+            unit,
+            length,
+            new Binary() {
+              @Override
+              public <T> List<T> apply(CoefficientField<T> field, List<T> a, List<T> b) {
+                return field.log(a, length);
+              }
+            });
+    return first.isOne() ? rest : rest.plus(constant(Elementary.ln(first), order));
   }
 
   /// The derivative by t; the order drops by one.

@@ -3,13 +3,21 @@ package gnomon.series;
 import gnomon.form.Form;
 import gnomon.number.Rational;
 import java.util.List;
+import java.util.Optional;
 
 /// Rational numbers as coefficients; long lists go through fast products.
 enum RationalCoefficients implements CoefficientField<Rational> {
   /// The only instance.
   FIELD;
 
-  private static final int LONG = 32;
+  /// From these lengths on the ways through many primes are shorter.
+  private static final int PRODUCT = 64;
+
+  private static final int SERIES = 24;
+  private static final int COMPOSITION = 32;
+
+  /// From this length on compositions go through common denominators.
+  private static final int SHORT_COMPOSITION = 8;
 
   @Override
   public Rational plus(Rational a, Rational b) {
@@ -48,41 +56,59 @@ enum RationalCoefficients implements CoefficientField<Rational> {
 
   @Override
   public List<Rational> product(List<Rational> a, List<Rational> b, int length) {
-    return Math.min(length, Math.min(a.size(), b.size())) < LONG
+    return Math.min(length, Math.min(a.size(), b.size())) < PRODUCT
         ? CoefficientField.super.product(a, b, length)
-        : ScaledRationals.of(a).times(ScaledRationals.of(b), length);
+        : MultimodularSeries.product(a, b, length)
+            .orElseGet(() -> ScaledRationals.of(a).times(ScaledRationals.of(b), length));
   }
 
   @Override
   public List<Rational> inverse(List<Rational> a, int length) {
-    return length < LONG
+    return length < SERIES
         ? CoefficientField.super.inverse(a, length)
-        : RationalSeries.inverse(a, length);
+        : MultimodularSeries.inverse(a, length).orElseGet(() -> RationalSeries.inverse(a, length));
   }
 
   @Override
   public List<Rational> exp(List<Rational> a, int length) {
-    return length < LONG ? CoefficientField.super.exp(a, length) : RationalSeries.exp(a, length);
+    return length < SERIES
+        ? CoefficientField.super.exp(a, length)
+        : MultimodularSeries.exp(a, length).orElseGet(() -> RationalSeries.exp(a, length));
+  }
+
+  @Override
+  public List<Rational> log(List<Rational> a, int length) {
+    return length < SERIES
+        ? CoefficientField.super.log(a, length)
+        : MultimodularSeries.log(a, length)
+            .orElseGet(() -> RationalSeries.log(ScaledRationals.of(a), length));
   }
 
   @Override
   public List<Rational> power(List<Rational> a, Rational exponent, int length) {
-    return length < LONG
+    return length < SERIES
         ? CoefficientField.super.power(a, exponent, length)
-        : RationalSeries.power(a, exponent, length);
+        : MultimodularSeries.power(a, exponent, length)
+            .orElseGet(() -> RationalSeries.power(a, exponent, length));
   }
 
   @Override
   public List<Rational> compose(List<Rational> outer, List<Rational> inner, int length) {
-    return length < LONG
-        ? CoefficientField.super.compose(outer, inner, length)
-        : RationalSeries.compose(outer, inner, length);
+    if (length < SHORT_COMPOSITION) {
+      return CoefficientField.super.compose(outer, inner, length);
+    }
+    Optional<List<Rational>> fast =
+        length < COMPOSITION ? Optional.empty() : MultimodularSeries.compose(outer, inner, length);
+    return fast.orElseGet(() -> RationalSeries.compose(outer, inner, length));
   }
 
   @Override
   public List<Rational> reversion(List<Rational> a, int length) {
-    return length < LONG
-        ? CoefficientField.super.reversion(a, length)
-        : RationalSeries.reversion(a, length);
+    if (length < SHORT_COMPOSITION) {
+      return CoefficientField.super.reversion(a, length);
+    }
+    Optional<List<Rational>> fast =
+        length < COMPOSITION ? Optional.empty() : MultimodularSeries.reversion(a, length);
+    return fast.orElseGet(() -> RationalSeries.reversion(a, length));
   }
 }

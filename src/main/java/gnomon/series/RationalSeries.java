@@ -41,7 +41,7 @@ final class RationalSeries {
   }
 
   /// ln a for a_0 = 1.
-  private static ScaledRationals log(ScaledRationals a, int length) {
+  static ScaledRationals log(ScaledRationals a, int length) {
     ScaledRationals padded = a.resized(length);
     ScaledRationals slope = padded.derivative();
     return slope.times(inverse(padded, length - 1), length - 1).integral();

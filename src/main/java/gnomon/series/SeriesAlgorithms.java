@@ -50,6 +50,26 @@ final class SeriesAlgorithms {
     return result;
   }
 
+  /// ln a for a_0 = 1: n b_n = n a_n − Σ_(0<k<n) k b_k a_(n−k).
+  static <T> List<T> log(CoefficientField<T> field, List<T> a, int length) {
+    List<T> result = new ArrayList<>(length);
+    List<T> slopes = new ArrayList<>(length);
+    for (int n = 0; n < length; n++) {
+      Budget.checkpoint();
+      List<T> parts = new ArrayList<>();
+      for (int k = Math.max(1, n - a.size() + 1); k < n; k++) {
+        addProduct(field, parts, slopes.get(k), a.get(n - k));
+      }
+      T sum = field.negated(field.sum(parts));
+      if (n > 0 && n < a.size()) {
+        sum = field.plus(sum, field.times(field.of(Rational.of(n)), a.get(n)));
+      }
+      slopes.add(sum);
+      result.add(n == 0 ? field.zero() : field.times(field.of(Rational.of(1, n)), sum));
+    }
+    return result;
+  }
+
   /// a^e for a_0 = 1: n b_n = Σ_(k≥1) (k e − (n − k)) a_k b_(n−k).
   static <T> List<T> power(CoefficientField<T> field, List<T> a, T exponent, int length) {
     List<T> result = new ArrayList<>(length);
