@@ -163,13 +163,11 @@ final class CompositionalInverse {
           arc.kind() == Arc.Kind.ARCTAN
               ? solve(arc.argument(), Elementary.tan(z.power(m)))
               : solve(arc.argument(), Elementary.sin(z.power(m)));
-      case Constant _,
-          AngleConstant _,
-          Factorial _,
-          Harmonic _,
-          Unknown _,
-          Accumulation _,
-          InverseSeries _ ->
+      case InverseSeries series ->
+          series.of().dependsOn(s) && !series.in().equals(s)
+              ? List.of()
+              : solve(series.argument(), series.of().substitute(series.in(), z.power(m)));
+      case Constant _, AngleConstant _, Factorial _, Harmonic _, Unknown _, Accumulation _ ->
           throw new Refusal(Reason.NO_CLOSED_FORM, Form.of(kernel));
     };
   }

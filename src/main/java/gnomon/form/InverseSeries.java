@@ -2,7 +2,9 @@ package gnomon.form;
 
 import gnomon.number.Rational;
 import java.util.HashMap;
+import java.util.LinkedHashSet;
 import java.util.Map;
+import java.util.Set;
 import java.util.function.Consumer;
 
 /// The value at the argument of the compositional inverse g of a series f without closed form for
@@ -37,9 +39,20 @@ public record InverseSeries(Form of, Dual in, Form argument) implements Generato
     return Powers.power(value, Form.of(exponent));
   }
 
-  /// The value of the inverse series of f at an argument: 0 at 0, otherwise the kernel.
+  /// The value of the inverse series of f at an argument: 0 at 0, v at f(v) for a variable or dual
+  /// v, otherwise the kernel.
   public static Form of(Form f, Dual in, Form argument) {
-    return argument.isZero() ? Form.ZERO : Form.of(new InverseSeries(f, in, argument));
+    if (argument.isZero()) {
+      return Form.ZERO;
+    }
+    Set<Generator> atoms = new LinkedHashSet<>();
+    argument.atoms(atoms::add);
+    for (Generator v : atoms) {
+      if (f.substitute(in, Form.of(v)).equals(argument)) {
+        return Form.of(v);
+      }
+    }
+    return Form.of(new InverseSeries(f, in, argument));
   }
 
   @Override
