@@ -29,11 +29,12 @@ file      : ( KEEP | REPLAY | RECHECK | RERECORD ) STRING ;
 help      : HELP ( ~EOF )* ;
 leave     : LEAVE ;
 
-value        : ( matrix | solve | recurrence | sum ) clause* ;
+value        : ( matrix | solve | recurrence | family | sum ) clause* ;
 matrix       : MATRIX sum TO sum ;
 solve        : SOLVE equation ( WITH equation ( COMMA equation )* )? ;
 equation     : sum EQUALS sum ;
 recurrence   : RECURRENCE EXPONENTIAL? sum ;
+family       : FAMILY sum ;
 clause
     : IN ( PARTIAL FRACTIONS | PRESENTATION | sum )    # in
     | TO sum DIGITS?                                   # to
@@ -73,6 +74,7 @@ HELP : 'help' ;
 LEAVE : 'leave' ;
 MATRIX : 'matrix' ;
 SOLVE : 'solve' ;
+FAMILY : 'family' ;
 WITH : 'with' ;
 RECURRENCE : 'recurrence' ;
 EXPONENTIAL : 'exponential' ;

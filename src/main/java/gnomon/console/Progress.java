@@ -27,6 +27,7 @@ final class Progress {
       case "matrix" -> "filling in the matrix";
       case "recurrence" -> "looking for the law";
       case "solve" -> "solving the equation";
+      case "family" -> "searching the catalogue";
       case "why" -> "checking the steps";
       case "replay" -> "replaying the file";
       case "recheck" -> "rechecking the file";

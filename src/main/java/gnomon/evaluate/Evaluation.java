@@ -19,6 +19,7 @@ final class Evaluation {
   private final int depthLimit;
   private final SummationEngine sums;
   private final Writing writing;
+  private final Catalogue catalogue;
   private final Grounds grounds;
   private final List<Condition> conditions = new ArrayList<>();
   private final List<String> remarks = new ArrayList<>();
@@ -29,11 +30,17 @@ final class Evaluation {
   private int depth;
 
   Evaluation(
-      int depthLimit, int callLimit, SummationEngine sums, Writing writing, boolean explaining) {
+      int depthLimit,
+      int callLimit,
+      SummationEngine sums,
+      Writing writing,
+      Catalogue catalogue,
+      boolean explaining) {
     this.depthLimit = depthLimit;
     this.callLimit = callLimit;
     this.sums = sums;
     this.writing = writing;
+    this.catalogue = catalogue;
     this.grounds = new Grounds(explaining, this);
   }
 
@@ -45,6 +52,11 @@ final class Evaluation {
   /// What writes values.
   Writing writing() {
     return writing;
+  }
+
+  /// The families known by name.
+  Catalogue catalogue() {
+    return catalogue;
   }
 
   /// Counts a call of the defined function `name` at `span` while `call` runs.

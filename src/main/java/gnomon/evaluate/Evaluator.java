@@ -67,6 +67,12 @@ final class Evaluator {
               value(matrix.operator(), scope), whole(matrix.order(), scope), matrix.span(), scope);
       case Expression.Solve solve -> new Solving(this, evaluation).value(solve, scope);
       case Expression.Recurrence law -> new Laws(this, evaluation).value(law, scope);
+      case Expression.Family(Expression subject, Span span) -> {
+        Value asked = value(subject, scope);
+        yield Places.at(
+            span,
+            () -> new Families(this, evaluation.catalogue()).value(asked, subject.span(), scope));
+      }
       case Expression.Clauses clausal -> clauses.value(clausal, scope);
     };
   }

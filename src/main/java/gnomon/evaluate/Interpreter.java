@@ -27,6 +27,7 @@ public final class Interpreter {
   private final int calls;
   private final Writing writing;
   private final SummationEngine sums;
+  private final Catalogue catalogue = new Catalogue();
 
   /// An interpreter in which calls of defined functions may be nested `depth` deep and be `calls`
   /// many in one statement.
@@ -57,7 +58,7 @@ public final class Interpreter {
   /// How the answer to a statement in a scope is reached: it is evaluated once more, and each step
   /// is checked as it is recorded.
   public Derivation why(Statement statement, Scope scope) {
-    Evaluation evaluation = new Evaluation(depth, calls, sums, writing, true);
+    Evaluation evaluation = new Evaluation(depth, calls, sums, writing, catalogue, true);
     Evaluator evaluator = new Evaluator(evaluation);
     switch (statement) {
       case Statement.ExpressionStatement(Expression expression, Span _) ->
@@ -78,7 +79,7 @@ public final class Interpreter {
   }
 
   private Evaluation evaluation() {
-    return new Evaluation(depth, calls, sums, writing, false);
+    return new Evaluation(depth, calls, sums, writing, catalogue, false);
   }
 
   private static Answer answer(Value value, Evaluation evaluation, Variable running) {

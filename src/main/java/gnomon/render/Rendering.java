@@ -4,6 +4,7 @@ import gnomon.form.Form;
 import gnomon.form.Variable;
 import gnomon.value.Derivation;
 import gnomon.value.Equation;
+import gnomon.value.FamilyValue;
 import gnomon.value.FormValue;
 import gnomon.value.FormulaValue;
 import gnomon.value.FunctionDefinition;
@@ -54,6 +55,9 @@ public record Rendering(Spelling spelling, int width, Variable running) {
   public String text(Value value) {
     if (value instanceof TableValue table && spelling != Spelling.LATEX) {
       return new TableText(this).of(table);
+    }
+    if (value instanceof FamilyValue family) {
+      return new FamilyText(this).of(family);
     }
     if (value instanceof NoneValue || value instanceof FormulaValue) {
       return line(value);
@@ -109,6 +113,7 @@ public record Rendering(Spelling spelling, int width, Variable running) {
   private String words(Value value) {
     return switch (value) {
       case VerdictValue verdict -> new VerdictText(this).of(verdict);
+      case FamilyValue family -> new FamilyText(this).title(family);
       case FormulaValue formula -> formula.tex();
       case NoneValue none -> none.message();
       case FunctionDefinition definition ->

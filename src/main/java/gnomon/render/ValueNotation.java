@@ -10,6 +10,7 @@ import gnomon.form.Variable;
 import gnomon.operator.Operator;
 import gnomon.value.DecimalValue;
 import gnomon.value.Element;
+import gnomon.value.FamilyValue;
 import gnomon.value.FormValue;
 import gnomon.value.FormulaValue;
 import gnomon.value.FunctionDefinition;
@@ -57,7 +58,8 @@ final class ValueNotation {
       case ListValue list -> list(list.items());
       case TableValue table -> list(table.asList().items());
       case DecimalValue decimal -> Optional.of(decimal(decimal));
-      case VerdictValue _, FormulaValue _, FunctionDefinition _, NoneValue _ -> Optional.empty();
+      case VerdictValue _, FormulaValue _, FamilyValue _, FunctionDefinition _, NoneValue _ ->
+          Optional.empty();
     };
   }
 

@@ -6,8 +6,8 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalInt;
 
-/// An expression as it was written. From the outside in: [Clauses], [Matrix], [Solve] and
-/// [Recurrence] hold any expression below them, then [Sum], then [Sign], then [Term] and [Binder],
+/// An expression as it was written. From the outside in: [Clauses], [Matrix], [Solve], [Recurrence]
+/// and [Family] hold any expression below them, then [Sum], then [Sign], then [Term] and [Binder],
 /// then [Suffixed], then the atoms. Anything else stands inside a [Parenthesis] or [Bracket], which
 /// the tree keeps.
 public sealed interface Expression {
@@ -159,6 +159,9 @@ public sealed interface Expression {
   /// `recurrence a`, the law of a list, or of the coefficients of a function; with `exponential` of
   /// n! times the coefficients.
   record Recurrence(Expression subject, boolean exponential, Span span) implements Expression {}
+
+  /// `family U`.
+  record Family(Expression subject, Span span) implements Expression {}
 
   /// An expression and the clauses that follow it, first to last.
   record Clauses(Expression subject, List<Clause> clauses, Span span) implements Expression {

@@ -4,6 +4,7 @@ import gnomon.diagnostic.Span;
 import gnomon.syntax.Expression.Bracket;
 import gnomon.syntax.Expression.Clauses;
 import gnomon.syntax.Expression.Equation;
+import gnomon.syntax.Expression.Family;
 import gnomon.syntax.Expression.Handle;
 import gnomon.syntax.Expression.Matrix;
 import gnomon.syntax.Expression.Name;
@@ -60,6 +61,9 @@ final class ExpressionBuilder {
       GnomonParser.RecurrenceContext recurrence = context.recurrence();
       boolean exponential = recurrence.EXPONENTIAL() != null;
       return new Recurrence(sum(recurrence.sum()), exponential, span(recurrence));
+    }
+    if (context.family() != null) {
+      return new Family(sum(context.family().sum()), span(context.family()));
     }
     return context.matrix() != null ? matrix(context.matrix()) : solve(context.solve());
   }

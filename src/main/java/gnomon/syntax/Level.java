@@ -23,7 +23,11 @@ enum Level {
       case Expression.Term _, Expression.Binder _ -> TERM;
       case Expression.Sign _ -> SIGNED;
       case Expression.Sum _ -> SUM;
-      case Expression.Matrix _, Expression.Solve _, Expression.Recurrence _, Expression.Clauses _ ->
+      case Expression.Matrix _,
+          Expression.Solve _,
+          Expression.Recurrence _,
+          Expression.Family _,
+          Expression.Clauses _ ->
           CLAUSED;
     };
   }

@@ -3,6 +3,7 @@ package gnomon.syntax;
 import gnomon.syntax.Expression.Binder;
 import gnomon.syntax.Expression.Bracket;
 import gnomon.syntax.Expression.Clauses;
+import gnomon.syntax.Expression.Family;
 import gnomon.syntax.Expression.Handle;
 import gnomon.syntax.Expression.Matrix;
 import gnomon.syntax.Expression.Name;
@@ -40,6 +41,7 @@ public final class Parts {
       case Sum(var summands, _) -> summands.stream().map(Expression.Summand::value).toList();
       case Binder(_, var range, var body, _) -> List.of(range.lower(), range.upper(), body);
       case Matrix(var operator, var order, _) -> List.of(operator, order);
+      case Family(var subject, _) -> List.of(subject);
       case Solve(var equation, var conditions, _) ->
           Stream.concat(Stream.of(equation), conditions.stream())
               .flatMap(each -> Stream.of(each.left(), each.right()))

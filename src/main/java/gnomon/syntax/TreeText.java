@@ -5,6 +5,7 @@ import gnomon.syntax.Expression.Binding;
 import gnomon.syntax.Expression.Bracket;
 import gnomon.syntax.Expression.Clauses;
 import gnomon.syntax.Expression.Equation;
+import gnomon.syntax.Expression.Family;
 import gnomon.syntax.Expression.Handle;
 import gnomon.syntax.Expression.Matrix;
 import gnomon.syntax.Expression.Name;
@@ -67,6 +68,7 @@ final class TreeText {
           word(wordOf(binding)).add("(").range(range).add(") ").add(body);
       case Matrix(var operator, var order, _) ->
           add("matrix ").add(operator).add(" to ").add(order);
+      case Family(var subject, _) -> add("family ").add(subject);
       case Solve(var equation, var conditions, _) -> {
         add("solve ").equation(equation);
         String before = " with ";

@@ -77,7 +77,8 @@ final class WordTable {
           word("leave", STATEMENT, "ends the session"),
           word("matrix", STATEMENT, "matrix A to N is the matrix of A on x^0 to x^N"),
           word("solve", STATEMENT, "solves a linear difference or differential equation"),
-          word("recurrence", STATEMENT, "the law of a list, or of the coefficients of a function"));
+          word("recurrence", STATEMENT, "the law of a list, or of the coefficients of a function"),
+          word("family", STATEMENT, "says to which family of sequences a map or operator belongs"));
 
   static final List<Word> CLAUSES =
       List.of(

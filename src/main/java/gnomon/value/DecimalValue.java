@@ -47,6 +47,7 @@ public record DecimalValue(BigDecimal real, BigDecimal imaginary) implements Val
               TableValue _,
               VerdictValue _,
               FormulaValue _,
+              FamilyValue _,
               FunctionDefinition _,
               NoneValue _ ->
               Optional.empty();

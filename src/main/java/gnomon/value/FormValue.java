@@ -61,6 +61,7 @@ public record FormValue(Form form, Shape shape, boolean function) implements Val
           TableValue _,
           VerdictValue _,
           FormulaValue _,
+          FamilyValue _,
           FunctionDefinition _,
           NoneValue _ ->
           false;

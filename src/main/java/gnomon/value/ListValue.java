@@ -27,6 +27,7 @@ public record ListValue(List<Value> items) implements Value {
           VerdictValue _,
           DecimalValue _,
           FormulaValue _,
+          FamilyValue _,
           FunctionDefinition _,
           NoneValue _ ->
           false;

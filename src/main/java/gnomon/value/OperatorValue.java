@@ -25,6 +25,7 @@ public record OperatorValue(MappedOperator operator) implements Value {
           VerdictValue _,
           DecimalValue _,
           FormulaValue _,
+          FamilyValue _,
           FunctionDefinition _,
           NoneValue _ ->
           false;

@@ -14,6 +14,7 @@ public enum Sort {
   TABLE,
   VERDICT,
   FORMULA,
+  FAMILY,
   NONE;
 
   /// The word, such as `function`.

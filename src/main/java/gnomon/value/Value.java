@@ -12,6 +12,7 @@ public sealed interface Value
         VerdictValue,
         DecimalValue,
         FormulaValue,
+        FamilyValue,
         FunctionDefinition,
         NoneValue {
 

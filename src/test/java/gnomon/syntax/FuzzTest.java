@@ -34,6 +34,7 @@ final class FuzzTest {
           "leave",
           "matrix",
           "solve",
+          "family",
           "with",
           "recurrence",
           "in",

@@ -66,6 +66,7 @@ final class Outline {
           "{" + binding + " over " + of(range) + " of " + of(body) + "}";
       case Expression.Matrix(var operator, var order, _) ->
           "{matrix " + of(operator) + " to " + of(order) + "}";
+      case Expression.Family(var subject, _) -> "{family " + of(subject) + "}";
       case Expression.Solve(var equation, var conditions, _) ->
           "{solve "
               + of(equation)

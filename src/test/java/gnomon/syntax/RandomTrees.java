@@ -48,6 +48,7 @@ final class RandomTrees {
               new Expression.Solve(
                   equation(depth - 1), maybe(() -> equation(depth - 2)), Span.NONE);
           case 2 -> new Expression.Recurrence(sum(depth - 1), random.nextBoolean(), Span.NONE);
+          case 3 -> new Expression.Family(sum(depth - 1), Span.NONE);
           default -> sum(depth);
         };
     return random.nextInt(3) > 0
