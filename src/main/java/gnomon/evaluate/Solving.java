@@ -2,13 +2,17 @@ package gnomon.evaluate;
 
 import gnomon.algebra.Reason;
 import gnomon.algebra.Refusal;
+import gnomon.form.Accumulation;
 import gnomon.form.Form;
+import gnomon.form.Generator;
 import gnomon.form.Unknown;
 import gnomon.form.Variable;
 import gnomon.recurrence.ConstantsFromConditions;
 import gnomon.recurrence.DifferentialSolver;
 import gnomon.recurrence.LinearEquation;
+import gnomon.recurrence.Lowered;
 import gnomon.recurrence.RecurrenceSolver;
+import gnomon.recurrence.SingularPoint;
 import gnomon.recurrence.SolutionSpace;
 import gnomon.recurrence.UnknownFunction;
 import gnomon.summation.Condition;
@@ -18,8 +22,11 @@ import gnomon.value.Value;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.SortedMap;
 import java.util.SortedSet;
+import java.util.TreeMap;
 import java.util.TreeSet;
 
 /// `solve L f = g with f(0) = 1`: reads the equation and the conditions with the unknown function
@@ -34,6 +41,31 @@ final class Solving {
   }
 
   Value value(Expression.Solve solve, Scope scope) {
+    Optional<String> held = new UnknownName(scope).heldArgument(solve);
+    return held.isPresent() ? at(held.get(), solve, scope) : solved(solve, scope);
+  }
+
+  /// The solution at the number that the variable of the equation stands for here.
+  private Value at(String name, Expression.Solve solve, Scope scope) {
+    Value number = evaluator.value(new Expression.Name(name, solve.equation().span()), scope);
+    Map<Generator, Form> image =
+        Map.of(new Variable(name), Sorts.form(number, solve.equation().span(), "the argument"));
+    List<Condition> earlier = evaluation.conditions();
+    evaluation.conditions(List.of());
+    Value solution = solved(solve, scope.without(name));
+    List<Condition> met = evaluation.conditions();
+    evaluation.conditions(earlier);
+    if (Validity.fails(met, image)) {
+      throw Problems.of(
+          "domain-validity", "the solution does not hold here", solve.equation().span());
+    }
+    evaluation.require(met.stream().filter(c -> !Validity.concerns(c, image)).toList());
+    Form form = Sorts.form(solution, solve.span(), "the solution");
+    return Places.at(
+        solve.span(), () -> Sorts.of(Substitutions.addedUp(form.substitute(image)), scope));
+  }
+
+  private Value solved(Expression.Solve solve, Scope scope) {
     String name = new UnknownName(scope).of(solve);
     UnknownFunction unknown = new UnknownFunction(name);
     Scope inside = scope.with(name, new Binding.Arbitrary(name));
@@ -78,7 +110,8 @@ final class Solving {
       LinearEquation linear = unknown.equation(equation, variable);
       SolutionSpace space =
           switch (linear.action()) {
-            case SHIFT -> new RecurrenceSolver(evaluation.sums(), start()).solve(linear);
+            case SHIFT ->
+                new RecurrenceSolver(evaluation.sums(), start()).leavingSums().solve(linear);
             case DERIVATIVE -> DifferentialSolver.solve(linear);
           };
       if (space.isEmpty()) {
@@ -86,7 +119,7 @@ final class Solving {
       }
       List<Variable> constants = constants(space.basis().size());
       Form general = space.combination(constants);
-      if (!unknown.replaced(equation, variable, general).isZero()) {
+      if (!residual(general).isZero()) {
         throw new Refusal(Reason.SOLUTION_NOT_FOUND, space.within().words());
       }
       evaluation.require(space.nonzero().stream().map(Solving::notZero).toList());
@@ -96,11 +129,21 @@ final class Solving {
           .grounds()
           .equal(
               "put into the equation, left side less right side",
-              unknown.replaced(equation, variable, solution),
+              residual(solution),
               Form.ZERO,
               running);
       remarks(space, solution);
       return solution;
+    }
+
+    /// The equation with y put into it; standing sums in it are brought to one upper end.
+    private Form residual(Form y) {
+      return Lowered.of(unknown.replaced(equation, variable, y), variable);
+    }
+
+    /// A condition with y put into it, sums between numbers added up.
+    private Form valued(Form condition, Form y) {
+      return Substitutions.addedUp(unknown.replaced(condition, variable, y));
     }
 
     /// The least integer at which a condition is given.
@@ -116,10 +159,10 @@ final class Solving {
         return general;
       }
       List<Form> tied = conditions.stream().filter(c -> isTied(c, space)).toList();
-      List<Form> met = tied.stream().map(c -> unknown.replaced(c, variable, general)).toList();
+      List<Form> met = tied.stream().map(c -> valued(c, general)).toList();
       Optional<List<Form>> values = ConstantsFromConditions.of(met, constants);
       if (values.isEmpty()) {
-        throw space.isGeneral() ? new Refusal(Reason.CONDITIONS_CONTRADICT) : absent(space);
+        throw space.isGeneral() ? contradiction(space) : absent(space);
       }
       for (int i = 0; i < constants.size(); i++) {
         evaluation
@@ -133,7 +176,7 @@ final class Solving {
       }
       Form solution = space.withConstants(values.get());
       for (Form condition : tied) {
-        if (!unknown.replaced(condition, variable, solution).isZero()) {
+        if (!valued(condition, solution).isZero()) {
           throw new Refusal(Reason.SOLUTION_NOT_FOUND, space.within().words());
         }
       }
@@ -154,6 +197,39 @@ final class Solving {
           || unknown.occurrences(condition).stream()
               .flatMap(value -> value.argument().asInteger().stream())
               .anyMatch(point -> point.compareTo(first.get()) >= 0);
+    }
+
+    /// What contradicts the conditions: the equation at a zero of its leading coefficient, where it
+    /// can be told, or the conditions one another.
+    private Refusal contradiction(SolutionSpace space) {
+      if (!linearShift(space)) {
+        return new Refusal(Reason.CONDITIONS_CONTRADICT);
+      }
+      boolean tied = start().filter(first -> space.undetermined(first).isEmpty()).isPresent();
+      return SingularPoint.of(space.equation(), pointValues())
+          .map(point -> new Refusal(Reason.CONDITIONS_CONTRADICT, Form.of(point)))
+          .orElse(
+              tied
+                  ? new Refusal(Reason.CONDITIONS_CONTRADICT)
+                  : new Refusal(Reason.SOLUTION_NOT_FOUND, space.within().words()));
+    }
+
+    /// The conditions that give one value at one integer.
+    private SortedMap<BigInteger, Form> pointValues() {
+      SortedMap<BigInteger, Form> values = new TreeMap<>();
+      for (Form condition : conditions) {
+        List<Unknown> occurrences = unknown.occurrences(condition);
+        if (occurrences.size() == 1) {
+          Unknown value = occurrences.getFirst();
+          Form zero = unknown.replaced(condition, variable, Form.ZERO);
+          Form slope = unknown.replaced(condition, variable, Form.ONE).minus(zero);
+          value
+              .argument()
+              .asInteger()
+              .ifPresent(point -> values.put(point, zero.negated().dividedBy(slope)));
+        }
+      }
+      return values;
     }
 
     private Refusal absent(SolutionSpace space) {
@@ -203,6 +279,14 @@ final class Solving {
             space.exhaustive()
                 ? "not all solutions, but all " + space.within().words()
                 : "not all solutions");
+      }
+      for (Generator g : solution.generators()) {
+        if (g instanceof Accumulation standing && standing.upper().dependsOn(variable)) {
+          evaluation.require(
+              List.of(
+                  new Condition(
+                      Form.of(variable).minus(standing.lower()), Condition.Relation.NATURAL)));
+        }
       }
       first(space)
           .ifPresent(

@@ -1,10 +1,12 @@
 package gnomon.evaluate;
 
+import gnomon.form.Form;
 import gnomon.syntax.Expression;
 import gnomon.syntax.Factor;
 import gnomon.syntax.Parts;
 import gnomon.syntax.Suffix;
 import gnomon.syntax.Vocabulary;
+import gnomon.value.FormValue;
 import java.util.ArrayDeque;
 import java.util.ArrayList;
 import java.util.Deque;
@@ -56,6 +58,30 @@ final class UnknownName {
         "it cannot be told which function is unknown",
         solve.span(),
         "solve E f = 2 f + 1 with f(0) = 1");
+  }
+
+  /// A name that stands for a number here, and in the equation inside a parenthesis that is written
+  /// against the unknown function: the variable of the equation, put in before it is solved.
+  Optional<String> heldArgument(Expression.Solve solve) {
+    for (Expression part : all(sides(solve.equation()))) {
+      if (part instanceof Expression.Term term) {
+        for (Factor factor : term.factors()) {
+          if (factor.isArgument()) {
+            Optional<String> held =
+                names(List.of(factor.value())).stream().filter(this::isHeldNumber).findFirst();
+            if (held.isPresent()) {
+              return held;
+            }
+          }
+        }
+      }
+    }
+    return Optional.of(scope.running().name()).filter(this::isHeldNumber);
+  }
+
+  private boolean isHeldNumber(String name) {
+    return scope.binding(name).orElse(null) instanceof Binding.Held(FormValue(Form form, _, _))
+        && form.isConstant();
   }
 
   /// The names that a parenthesis is written against, but not those that stand in one such, as n in

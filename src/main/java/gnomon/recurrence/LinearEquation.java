@@ -70,7 +70,9 @@ public record LinearEquation(
   /// A^i y.
   public Form acted(Form y, int i) {
     return switch (action) {
-      case SHIFT -> i == 0 ? y : y.substitute(variable, Form.of(variable).plus(Form.of(i)));
+      case SHIFT ->
+          Lowered.of(
+              i == 0 ? y : y.substitute(variable, Form.of(variable).plus(Form.of(i))), variable);
       case DERIVATIVE -> {
         Form image = y;
         for (int j = 0; j < i; j++) {

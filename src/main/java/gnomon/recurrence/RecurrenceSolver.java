@@ -2,11 +2,13 @@ package gnomon.recurrence;
 
 import gnomon.algebra.Refusal;
 import gnomon.form.Accumulation;
+import gnomon.form.Factorial;
 import gnomon.form.Form;
 import gnomon.form.Generator;
 import gnomon.form.Structure;
 import gnomon.form.Variable;
 import gnomon.operator.Summation;
+import gnomon.polynomial.Factor;
 import gnomon.polynomial.Monomial;
 import gnomon.polynomial.Polynomial;
 import gnomon.polynomial.Term;
@@ -23,11 +25,22 @@ import java.util.Optional;
 public final class RecurrenceSolver {
   private final Summation sums;
   private final Optional<BigInteger> start;
+  private final boolean leavesSums;
+
+  private RecurrenceSolver(Summation sums, Optional<BigInteger> start, boolean leavesSums) {
+    this.sums = sums;
+    this.start = start;
+    this.leavesSums = leavesSums;
+  }
 
   /// A solver that sums by `sums`, for values from `start` on where that is given.
   public RecurrenceSolver(Summation sums, Optional<BigInteger> start) {
-    this.sums = sums;
-    this.start = start;
+    this(sums, start, false);
+  }
+
+  /// The same solver, which leaves sums and products standing that do not close.
+  public RecurrenceSolver leavingSums() {
+    return new RecurrenceSolver(sums, start, true);
   }
 
   /// What is known of the solutions.
@@ -134,7 +147,7 @@ public final class RecurrenceSolver {
     if (closed.isPresent()) {
       return closed.filter(y -> isSolution(equation, y)).stream().toList();
     }
-    if (!Structure.isRationalIn(ratio, v) || hasIntegerZeroOrPole(ratio, v)) {
+    if (!leavesSums || !Structure.isRationalIn(ratio, v) || hasIntegerZeroOrPole(ratio, v)) {
       return List.of();
     }
     Variable k = new Variable(v.name() + "'");
@@ -189,12 +202,47 @@ public final class RecurrenceSolver {
 
   private Optional<Form> antidifference(Form u, Variable v) {
     try {
-      return sums.antidifference(u, v, Form.ONE) instanceof Summation.Outcome.Found found
-          ? Optional.of(found.antidifference())
-          : Optional.empty();
+      if (sums.antidifference(u, v, Form.ONE) instanceof Summation.Outcome.Found found) {
+        return Optional.of(found.antidifference());
+      }
     } catch (Refusal _) {
       return Optional.empty();
     }
+    BigInteger lower = start.orElse(BigInteger.ZERO);
+    if (!leavesSums || !isFiniteFrom(u, v, lower)) {
+      return Optional.empty();
+    }
+    Variable k = new Variable(v.name() + "'");
+    Form upper = Form.of(v).minus(Form.ONE);
+    Form body = u.substitute(v, Form.of(k));
+    return Optional.of(Accumulation.of(Accumulation.Kind.SUM, k, Form.of(lower), upper, body));
+  }
+
+  /// Whether no pole at an integer v ≥ lower is seen: no zero of the denominator, no factorial of a
+  /// negative integer.
+  private static boolean isFiniteFrom(Form u, Variable v, BigInteger lower) {
+    for (Factor factor : u.denominator().factor().factors()) {
+      Form base = Form.of(factor.base());
+      if (base.dependsOn(v)
+          && Structure.isRationalIn(base, v)
+          && !IntegerRoots.of(base, v).tailSet(lower).isEmpty()) {
+        return false;
+      }
+    }
+    for (Generator g : u.generators()) {
+      if (g instanceof Factorial factorial
+          && u.numerator().contains(g)
+          && factorial.argument().dependsOn(v)) {
+        Form slope = factorial.argument().derivative(v);
+        Form first = factorial.argument().substitute(v, Form.of(lower));
+        boolean rising = slope.asRational().filter(s -> s.sign() > 0).isPresent();
+        boolean natural = first.asRational().filter(r -> r.sign() < 0).isEmpty();
+        if (!rising || !natural) {
+          return false;
+        }
+      }
+    }
+    return true;
   }
 
   // ---------------------------------------------------------------- right sides

@@ -98,9 +98,9 @@ final class SolveTest {
   @Test
   void absenceIsSaidByClassAndOnlyWhereItIsProved() {
     assertEquals("domain-no-solution", code("solve f(n+2) = f(n+1) + (n+1) f(n)"));
-    assertEquals("domain-no-solution", code("solve f(n+1) = 3 f(n) + n!"));
+    assertEquals("domain-no-solution", code("solve f(n+2) = 3 f(n+1) - 2 f(n) + n!"));
     assertEquals("domain-solution-not-found", code("solve f(n+3) = f(n+1) + f(n)"));
-    assertEquals("domain-solution-not-found", code("solve f(n+1) = (n^2 + 1) f(n)"));
+    assertEquals("domain-solution-not-found", code("solve f(n+1) = 2^n f(n)"));
   }
 
   @Test
@@ -119,6 +119,33 @@ final class SolveTest {
     assertEquals(
         "domain-conditions-contradict", code("solve f(n+1) = 2 f(n) with f(0) = 1, f(1) = 3"));
     assertEquals("1", value("(solve f(n+1) = 2 f(n) with f(0) = 1, f(1) = 2) at n = 0"));
+  }
+
+  @Test
+  void sumsThatDoNotCloseAreLeftAndHaveValues() {
+    said("let s = solve f(n+1) = 3 f(n) + n! with f(0) = 2");
+    for (int n = 0; n <= 6; n++) {
+      proves("(s at n = " + (n + 1) + ") = 3 (s at n = " + n + ") + " + n + "!");
+    }
+    assertEquals("2", value("s at n = 0"));
+    said("let p = solve f(n+1) = (n^2 + 1) f(n) with f(0) = 3");
+    assertEquals("300", value("p at n = 4"));
+    List<String> both = said("let q = solve f(n+2) - (n+3) f(n+1) + (n+1) f(n) = 0");
+    assertTrue(both.getLast().endsWith("left as a sum"), both.toString());
+    for (int n = 0; n <= 6; n++) {
+      String equation = "(q at n = %d) - (%d + 3) (q at n = %d) + (%d + 1) (q at n = %d) = 0";
+      proves(equation.formatted(n + 2, n, n + 1, n, n));
+    }
+  }
+
+  @Test
+  void zerosOfTheLeadingCoefficientForbidOrFreeValues() {
+    List<String> forbidden = said("solve (n-2) f(n+1) = f(n) with f(0) = 1");
+    assertEquals("error domain-conditions-contradict", forbidden.getFirst().split(":")[0]);
+    assertEquals("The equation itself forbids them where the argument is 2.", forbidden.get(1));
+    assertEquals(
+        "domain-solution-not-found",
+        code("solve (n-2) f(n+1) = (n-1) f(n) with f(0) = 1, f(5) = 1"));
   }
 
   @Test
@@ -143,8 +170,8 @@ final class SolveTest {
 
   @Test
   void partOfTheSolutionsIsSaidToBePart() {
-    List<String> lines = said("solve f(n+2) - (n+3) f(n+1) + (n+1) f(n) = 0");
-    assertEquals("C1 n!", lines.getFirst());
+    List<String> lines = said("solve x^2 D^2 f + x D f - f = 0");
+    assertEquals("C1 x", lines.getFirst());
     assertTrue(lines.getLast().contains("not all solutions"), lines.toString());
   }
 
