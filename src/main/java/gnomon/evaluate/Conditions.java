@@ -8,11 +8,9 @@ import gnomon.form.Generator;
 import gnomon.form.Variable;
 import gnomon.number.Rational;
 import gnomon.summation.Condition;
-import gnomon.summation.FunctionClass;
 import gnomon.value.FormValue;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
 
 /// The side conditions of an answer in the words of the status line.
@@ -91,10 +89,6 @@ final class Conditions {
       }
     }
     return text(subject) + relation + "0";
-  }
-
-  static String words(FunctionClass kind) {
-    return kind.name().toLowerCase(Locale.ROOT).replace('_', ' ') + " functions";
   }
 
   private String text(Form form) {

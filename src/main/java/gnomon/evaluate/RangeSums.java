@@ -141,8 +141,7 @@ final class RangeSums {
               .withDetail(new Conditions(writing, running).words(sum.conditions()));
       case NO_CLOSED_FORM ->
           Status.of(Status.Kind.NO_CLOSED_FORM)
-              .withDetail(
-                  sum.absentWithin().map(kind -> "among " + Conditions.words(kind)).orElse(""));
+              .withDetail(sum.absentWithin().map(kind -> "among " + kind.words()).orElse(""));
       case RECURRENCE ->
           Status.of(Status.Kind.RECURRENCE)
               .withDetail("of order " + sum.recurrence().orElseThrow().order() + ", see why");

@@ -67,7 +67,9 @@ final class EntangledSums {
           .map(
               begin ->
                   DefiniteSum.closed(
-                      value, from(found.conditions(), values.n(), begin, first), found.value()));
+                      value,
+                      from(beside(found.conditions(), values.n()), values.n(), begin, first),
+                      found.value()));
     } catch (Refusal _) {
       return Optional.empty();
     }
@@ -85,6 +87,12 @@ final class EntangledSums {
           DefiniteSum.recurrent(standing, recurrence.recurrence());
       case HypergeometricSums.Outcome.Nothing _ -> DefiniteSum.standing(standing);
     };
+  }
+
+  /// The conditions but those on n alone: [RangeCheck] has raised n above the poles of the
+  /// antidifference, and the values below are tried.
+  private static List<Condition> beside(List<Condition> conditions, Variable n) {
+    return conditions.stream().filter(c -> !Set.of(n).equals(c.subject().variables())).toList();
   }
 
   /// The conditions with n ≥ begin, unless the form holds down to the empty sum.

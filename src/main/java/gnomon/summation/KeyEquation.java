@@ -24,6 +24,13 @@ record KeyEquation(Univariate a, Univariate b, List<Univariate> sides) {
   ///
   /// Source of the bound: Petkovšek, Wilf, Zeilberger, A = B (1996), section 5.3, from memory.
   Optional<Solution> solve(Variable k) {
+    return solutions(k).stream()
+        .filter(solution -> solution.constants().stream().anyMatch(u -> !u.isZero()))
+        .findFirst();
+  }
+
+  /// A basis of all solutions (y, u); those with u = 0 solve the homogeneous equation.
+  List<Solution> solutions(Variable k) {
     int degree = bound();
     int unknowns = degree + 1 + sides.size();
     List<Univariate> columns = new ArrayList<>();
@@ -44,13 +51,11 @@ record KeyEquation(Univariate a, Univariate b, List<Univariate> sides) {
       }
       rows.add(row);
     }
-    for (List<Form> vector : LinearSystem.kernel(rows, unknowns)) {
-      List<Form> constants = vector.subList(degree + 1, unknowns);
-      if (constants.stream().anyMatch(u -> !u.isZero())) {
-        return Optional.of(new Solution(vector.subList(0, degree + 1), constants));
-      }
-    }
-    return Optional.empty();
+    return LinearSystem.kernel(rows, unknowns).stream()
+        .map(
+            vector ->
+                new Solution(vector.subList(0, degree + 1), vector.subList(degree + 1, unknowns)))
+        .toList();
   }
 
   private static Univariate in(Form form, Variable k) {

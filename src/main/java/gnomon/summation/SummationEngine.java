@@ -29,12 +29,15 @@ public final class SummationEngine implements Summation {
     this.solvers = List.copyOf(solvers);
   }
 
-  /// The engine for polynomials, polynomials times exponentials, rational functions and
-  /// hypergeometric terms.
+  /// The engine for polynomials, polynomials times exponentials, rational functions, hypergeometric
+  /// terms, and these times polynomials in harmonic numbers.
   public static SummationEngine standard() {
     return new SummationEngine(
         List.of(
-            new ExponentialPolynomialSolver(), new RationalSolver(), new HypergeometricSolver()));
+            new ExponentialPolynomialSolver(),
+            new RationalSolver(),
+            new HypergeometricSolver(),
+            new HarmonicTowerSolver()));
   }
 
   /// The outcome of [#search] as operators ask for it.
@@ -42,10 +45,10 @@ public final class SummationEngine implements Summation {
   public Outcome antidifference(Form summand, Variable variable, Form step) {
     return switch (search(summand, variable, step)) {
       case Antidifference.Found found -> new Outcome.Found(found.value());
-      case Antidifference.ProvedAbsent absent -> new Outcome.ProvedAbsent(absent.within().name());
+      case Antidifference.ProvedAbsent absent -> new Outcome.ProvedAbsent(absent.within().words());
       case Antidifference.GaveUp gaveUp ->
           new Outcome.GaveUp(
-              gaveUp.tried().stream().map(FunctionClass::name).collect(Collectors.joining(", ")));
+              gaveUp.tried().stream().map(FunctionClass::words).collect(Collectors.joining(", ")));
     };
   }
 

@@ -14,26 +14,6 @@ final class SumTablesTest {
   /// Rows about functions that the language does not have.
   private static final Set<String> OUT_OF_REACH = Set.of("fibonacci");
 
-  /// Rows whose antidifference the first layer of summation finds.
-  private static final Set<String> FOUND =
-      Set.of(
-          "const",
-          "x",
-          "square-falling",
-          "falling-3",
-          "falling-minus-2",
-          "falling-minus-1",
-          "one-over-x",
-          "pow2",
-          "pow3",
-          "pow-minus-2",
-          "x2x",
-          "x2-2x",
-          "x2",
-          "x3",
-          "binom-upper",
-          "alternating");
-
   @Test
   void powerSumsHaveTheirPublishedForms() {
     Talk talk = new Talk();
@@ -95,14 +75,14 @@ final class SumTablesTest {
   void antidifferencesAreFoundUpToAConstant() {
     Talk talk = new Talk();
     for (Row row : ReferenceTable.rows("antidifferences.tsv")) {
-      if (FOUND.contains(row.text("id"))) {
+      if (!OUT_OF_REACH.contains(row.text("id"))) {
         String g = Talk.translated(row.text("summand_g"));
         String f = Talk.translated(row.text("antidifference_f"));
         talk.say("let found = Delta^-1(" + g + ")");
         talk.claim(row.text("id"), "D(found - (" + f + "))", "0");
       }
     }
-    talk.allProved(FOUND.size());
+    talk.allProved(21);
   }
 
   @Test
