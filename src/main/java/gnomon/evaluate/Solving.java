@@ -3,8 +3,10 @@ package gnomon.evaluate;
 import gnomon.algebra.Reason;
 import gnomon.algebra.Refusal;
 import gnomon.form.Accumulation;
+import gnomon.form.Factored;
 import gnomon.form.Form;
 import gnomon.form.Generator;
+import gnomon.form.Structure;
 import gnomon.form.Unknown;
 import gnomon.form.Variable;
 import gnomon.recurrence.ConstantsFromConditions;
@@ -280,6 +282,12 @@ final class Solving {
                 ? "not all solutions, but all " + space.within().words()
                 : "not all solutions");
       }
+      evaluation.require(
+          Structure.factored(Form.of(solution.denominator())).factors().stream()
+              .map(Factored.Factor::base)
+              .filter(base -> !base.isConstant() && !base.dependsOn(variable))
+              .map(Solving::notZero)
+              .toList());
       for (Generator g : solution.generators()) {
         if (g instanceof Accumulation standing && standing.upper().dependsOn(variable)) {
           evaluation.require(

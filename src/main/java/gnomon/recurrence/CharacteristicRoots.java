@@ -4,6 +4,7 @@ import gnomon.algebra.Reason;
 import gnomon.algebra.Refusal;
 import gnomon.form.Constant;
 import gnomon.form.Elementary;
+import gnomon.form.Factored;
 import gnomon.form.Form;
 import gnomon.form.Structure;
 import gnomon.form.Variable;
@@ -29,7 +30,6 @@ record CharacteristicRoots(List<Root> roots, boolean complete, List<Form> distin
   /// A root and its multiplicity.
   record Root(Form value, int multiplicity) {}
 
-  private static final Form TWICE_I = Form.I.times(Form.TWO);
   private static final Variable Z = new Variable("z'");
 
   /// Real and imaginary part of a constant.
@@ -41,47 +41,33 @@ record CharacteristicRoots(List<Root> roots, boolean complete, List<Form> distin
           Form.of(parts.getOrDefault(Rational.ZERO, Polynomial.ZERO)).dividedBy(below),
           Form.of(parts.getOrDefault(Rational.ONE, Polynomial.ZERO)).dividedBy(below));
     }
-
-    Form conjugate() {
-      return real.minus(Form.I.times(imaginary));
-    }
   }
 
-  /// The solutions that belong to the roots, by the solution of each root: two conjugate ones,
-  /// which are y and ȳ, are replaced by (y + ȳ)/2 and (y − ȳ)/(2i).
+  /// The solutions that belong to the roots, by the solution of each root, conjugate ones in real
+  /// form.
   List<Form> inRealForm(Function<Form, Form> solution, Form variable) {
     List<Form> functions = new ArrayList<>();
-    for (int i = 0; i < roots.size(); i++) {
-      Form conjugate = Parts.of(roots.get(i).value()).conjugate();
-      boolean isReal = conjugate.equals(roots.get(i).value());
-      int partner = isReal ? -1 : indexOf(conjugate);
-      Form y = solution.apply(roots.get(i).value());
-      if (partner >= 0) {
-        Form other = solution.apply(conjugate);
-        y = partner > i ? y.plus(other).times(Rational.HALF) : other.minus(y).dividedBy(TWICE_I);
-      }
-      for (int j = 0; j < roots.get(i).multiplicity(); j++) {
+    for (Root root : roots) {
+      Form y = solution.apply(root.value());
+      for (int j = 0; j < root.multiplicity(); j++) {
         functions.add(y.times(variable.power(j)));
       }
     }
-    return functions;
-  }
-
-  private int indexOf(Form value) {
-    for (int i = 0; i < roots.size(); i++) {
-      if (roots.get(i).value().equals(value)) {
-        return i;
-      }
-    }
-    return -1;
+    return Conjugates.inRealForm(functions);
   }
 
   /// root^v; off the axes by its length and its angle, so that it can be shown in real form.
   static Form power(Form root, Form v) {
     Parts parts = Parts.of(root);
+    boolean positive = parts.imaginary().numerator().content().sign() > 0;
+    if (parts.real().isZero()) {
+      Form length = positive ? parts.imaginary() : parts.imaginary().negated();
+      Form quarter = v.times(Rational.of(positive ? 1 : -1, 2));
+      return Elementary.power(length, v).times(Elementary.power(Form.MINUS_ONE, quarter));
+    }
     boolean gaussian =
         parts.real().asRational().isPresent() && parts.imaginary().asRational().isPresent();
-    if (!root.isConstant() || gaussian || parts.real().isZero() || parts.imaginary().isZero()) {
+    if (!root.isConstant() || gaussian || parts.imaginary().isZero()) {
       return Elementary.power(root, v);
     }
     Form square = parts.real().power(2).plus(parts.imaginary().power(2));
@@ -89,8 +75,7 @@ record CharacteristicRoots(List<Root> roots, boolean complete, List<Form> distin
     Form angle = Elementary.arctan(parts.imaginary().dividedBy(parts.real()));
     Form turn = Elementary.exp(Form.I.times(angle).times(v));
     Form power = length.times(turn);
-    boolean above = parts.imaginary().numerator().content().sign() > 0;
-    Form half = Elementary.power(Form.MINUS_ONE, above ? v : v.negated());
+    Form half = Elementary.power(Form.MINUS_ONE, positive ? v : v.negated());
     Form left = power.times(half);
     Variable n = v.variables().first();
     return power.substitute(n, Form.ONE).equals(root)
@@ -146,7 +131,7 @@ record CharacteristicRoots(List<Root> roots, boolean complete, List<Form> distin
       return Optional.of(List.of(list.getFirst().dividedBy(list.getLast()).negated()));
     }
     int step = 1;
-    for (int m = degree; m > 1 && step == 1; m--) {
+    for (int m = degree; degree > 2 && m > 1 && step == 1; m--) {
       step = degree % m == 0 && isIn(list, m) ? m : 1;
     }
     if (degree / step > 2) {
@@ -181,8 +166,22 @@ record CharacteristicRoots(List<Root> roots, boolean complete, List<Form> distin
     }
     Form b = list.get(step).dividedBy(list.getLast()).times(Rational.of(-1, 2));
     Form square = b.times(b).minus(c.dividedBy(list.getLast()));
-    Form root = Elementary.sqrt(square);
+    Form root = squareRoot(square);
     return List.of(b.plus(root), b.minus(root));
+  }
+
+  /// One square root, with squares taken out of it: of −a² it is i a.
+  private static Form squareRoot(Form square) {
+    Factored factored = Structure.factored(square);
+    Form outside = Form.ONE;
+    Form inside = Form.of(factored.unit());
+    for (Factored.Factor factor : factored.factors()) {
+      int half = Math.floorDiv(factor.multiplicity(), 2);
+      outside = outside.times(factor.base().power(half));
+      inside = factor.multiplicity() % 2 == 0 ? inside : inside.times(factor.base());
+    }
+    Form root = Elementary.sqrt(inside).times(outside);
+    return root.times(root).equals(square) ? root : Elementary.sqrt(square);
   }
 
   /// All m-th roots of the value.
@@ -190,7 +189,8 @@ record CharacteristicRoots(List<Root> roots, boolean complete, List<Form> distin
     if (m == 1) {
       return List.of(value);
     }
-    Form principal = Elementary.power(value, Form.of(Rational.of(1, m)));
+    Form principal =
+        m == 2 ? squareRoot(value) : Elementary.power(value, Form.of(Rational.of(1, m)));
     List<Form> roots = new ArrayList<>();
     for (int k = 0; k < m; k++) {
       Form turn = Elementary.power(Form.MINUS_ONE, Form.of(Rational.of(2L * k, m)));

@@ -114,7 +114,7 @@ public final class RecurrenceSolver {
       exhaustive &= term.isPresent();
       term.filter(t -> isSolution(equation, t)).ifPresent(found::add);
     }
-    List<Form> chosen = Independence.chosen(found, equation);
+    List<Form> chosen = Conjugates.inRealForm(Independence.chosen(found, equation));
     if (!chosen.isEmpty() && chosen.size() < equation.order()) {
       chosen = completed(chosen, equation);
     }

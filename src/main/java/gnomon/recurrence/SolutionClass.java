@@ -8,6 +8,8 @@ public enum SolutionClass {
   RATIONAL("rational functions"),
   /// Sums of polynomials times exponentials.
   EXPONENTIAL_POLYNOMIAL("exponential polynomials"),
+  /// Sums of rational functions times exponentials e^(bx).
+  EXPONENTIAL_RATIONAL("rational functions times exponentials"),
   /// Sums of terms whose ratio t(n+1)/t(n) is a rational function of n.
   HYPERGEOMETRIC("sums of hypergeometric terms");
 

@@ -93,6 +93,10 @@ final class SolveTest {
     said("let r = solve D^2 f + 2 D f + 5 f = 0 with f(0) = 0, f'(0) = 2");
     proves("r = exp(-x) sin(2x)");
     assertEquals("C1 x^2", value("solve x D f = 2 f"));
+    assertEquals("C1 e^(x^2)", value("solve D f = 2 x f"));
+    assertEquals("C2 x + C1/x", value("solve x^2 D^2 f + x D f - f = 0"));
+    assertEquals("C2 e^x/x + C1/x", value("solve x D^2 f + (2 - x) D f - f = 0"));
+    assertEquals("domain-no-solution", code("solve D^2 f = x f"));
   }
 
   @Test
@@ -170,7 +174,7 @@ final class SolveTest {
 
   @Test
   void partOfTheSolutionsIsSaidToBePart() {
-    List<String> lines = said("solve x^2 D^2 f + x D f - f = 0");
+    List<String> lines = said("solve D^2 f - 2 x D f + 2 f = 0");
     assertEquals("C1 x", lines.getFirst());
     assertTrue(lines.getLast().contains("not all solutions"), lines.toString());
   }
