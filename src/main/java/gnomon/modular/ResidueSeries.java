@@ -17,8 +17,14 @@ import java.util.Arrays;
 /// zero-finding methods and the complexity of elementary function evaluation (1975); from memory.
 public final class ResidueSeries {
 
-  /// Up to this length products are formed term by term.
-  private static final int SHORT_PRODUCT = 32;
+  /// A step of a transform costs about as much as so many products in a row.
+  private static final int TRANSFORM_COST = 12;
+
+  /// Up to this length inverses take products, from there on transforms of their own.
+  private static final int SHORT_INVERSE = 256;
+
+  /// Up to this length compositions go in baby steps and giant steps.
+  private static final int SHORT_COMPOSITION = 256;
 
   /// Up to this length series are formed coefficient by coefficient.
   private static final int SHORT_SERIES = 32;
@@ -76,10 +82,15 @@ public final class ResidueSeries {
     if (left.length == 0 || right.length == 0) {
       return new int[length];
     }
-    if (Math.min(left.length, right.length) <= SHORT_PRODUCT) {
-      return termByTerm(left, right, length);
-    }
     int size = powerOfTwo(left.length + right.length - 1);
+    long work = (long) left.length * right.length;
+    if (left.length + right.length > length) {
+      long beyond = left.length + right.length - length;
+      work -= beyond * beyond / 2;
+    }
+    if (work <= (long) TRANSFORM_COST * size * (Integer.numberOfTrailingZeros(size) + 1)) {
+      return new LazyRow(field, length).addProduct(left, right).residues();
+    }
     int[] values = Arrays.copyOf(left, size);
     transform.forward(values, size);
     int[] others = values;
@@ -100,18 +111,8 @@ public final class ResidueSeries {
     return end == a.length ? a : Arrays.copyOf(a, end);
   }
 
-  private int[] termByTerm(int[] a, int[] b, int length) {
-    int[] result = new int[length];
-    for (int n = 0; n < Math.min(length, a.length + b.length - 1); n++) {
-      int from = Math.max(0, n - b.length + 1);
-      int to = Math.min(n, a.length - 1);
-      result[n] = convolution(a, from, b, n - from, to - from + 1);
-    }
-    return result;
-  }
-
   /// Σ_(i<count) a_(from+i) b_(top−i): four products of 60 bits fit a word.
-  private int convolution(int[] a, int from, int[] b, int top, int count) {
+  int convolution(int[] a, int from, int[] b, int top, int count) {
     long p = field.prime();
     long sum = 0;
     int i = 0;
@@ -201,6 +202,15 @@ public final class ResidueSeries {
   /// From 1/a to `known` terms to `next` ≤ 2 `known`. In the cyclic product of length 2 `known` the
   /// terms that wrap around fall on those that are known to be zero.
   private void refineInverse(int[] a, int[] result, int known, int next) {
+    if (next <= SHORT_INVERSE) {
+      int[] start = Arrays.copyOf(result, known);
+      int[] defect = Arrays.copyOfRange(product(a, start, next), known, next);
+      int[] change = product(start, defect, next - known);
+      for (int i = known; i < next; i++) {
+        result[i] = field.negated(change[i - known]);
+      }
+      return;
+    }
     int size = powerOfTwo(2 * known);
     int[] error = padded(a, next, size);
     int[] values = padded(result, known, size);
@@ -328,7 +338,9 @@ public final class ResidueSeries {
   public int[] compose(int[] outer, int[] inner, int length) {
     requireLength(length);
     requireFirst(inner, 0);
-    return new PowerProjection(this, inner, length).combination(outer, length);
+    return length <= SHORT_COMPOSITION
+        ? new ShortComposition(this, length).compose(outer, inner)
+        : new PowerProjection(this, inner, length).combination(outer, length);
   }
 
   /// The compositional inverse of a series with a_0 = 0 and a_1 ≠ 0, in near-linear time.
@@ -349,6 +361,10 @@ public final class ResidueSeries {
     int[] weights = new int[length];
     weights[n] = 1;
     int[] unit = times(a, scale, length);
+    if (length <= SHORT_COMPOSITION) {
+      int[] ratio = inverse(Arrays.copyOfRange(unit, 1, length), n);
+      return stretched(new ShortComposition(this, n).reversion(ratio), scale);
+    }
     int[] tops = new PowerProjection(this, unit, length).project(weights);
     int[] ratio = new int[n];
     for (int k = 1; k <= n; k++) {
@@ -356,11 +372,17 @@ public final class ResidueSeries {
     }
     int[] shape = power(ratio, field.negated(inverses[n]), n);
     int[] result = new int[length];
-    int stretch = scale;
-    for (int k = 1; k <= n; k++) {
-      result[k] = field.times(shape[k - 1], stretch);
-      stretch = field.times(stretch, scale);
+    System.arraycopy(shape, 0, result, 1, n);
+    return stretched(result, scale);
+  }
+
+  /// a_k factor^k.
+  private int[] stretched(int[] a, int factor) {
+    int power = 1;
+    for (int k = 0; k < a.length; k++) {
+      a[k] = field.times(a[k], power);
+      power = field.times(power, factor);
     }
-    return result;
+    return a;
   }
 }
