@@ -80,6 +80,13 @@ public final class Integers {
     return Combinatorics.lahRow(natural(n));
   }
 
+  /// The Bell numbers B_0, ..., B_n: the numbers of partitions of sets of that size.
+  ///
+  /// @throws Refusal with [Reason#NOT_NATURAL] for a negative n
+  public static List<BigInteger> bellNumbers(int n) {
+    return Bell.numbers(natural(n));
+  }
+
   /// The Bernoulli number B_n with B_1 = -1/2.
   ///
   /// @throws Refusal with [Reason#NOT_NATURAL] for a negative n

@@ -1,15 +1,19 @@
 package gnomon.polynomial;
 
 import gnomon.algebra.Budget;
+import gnomon.modular.IntegerProduct;
 import java.math.BigInteger;
 import java.util.Arrays;
 
 /// Products of integer coefficient lists by Kronecker substitution: the coefficients are written
 /// side by side into one long integer, slots wide enough for every coefficient of the product, and
-/// the long integers are multiplied.
+/// the long integers are multiplied. Long lists go through transforms modulo primes instead.
 final class Kronecker {
 
   private static final int SCHOOLBOOK = 6;
+
+  /// From this length of the shorter list on, transforms modulo primes are faster.
+  private static final int TRANSFORMS = 64;
 
   private Kronecker() {}
 
@@ -21,6 +25,9 @@ final class Kronecker {
     int shorter = Math.min(a.length, b.length);
     if (shorter <= SCHOOLBOOK) {
       return schoolbook(a, b);
+    }
+    if (shorter >= TRANSFORMS) {
+      return IntegerProduct.of(a, b);
     }
     long bits = bits(a) + (long) bits(b) + Integer.SIZE - Integer.numberOfLeadingZeros(shorter) + 2;
     int slot = slot(bits, a.length + (long) b.length);

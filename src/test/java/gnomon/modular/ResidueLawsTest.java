@@ -19,7 +19,9 @@ import org.junit.jupiter.api.Test;
 final class ResidueLawsTest {
 
   private static final long SEED = 20260411;
-  private static final int[] LENGTHS = {1, 2, 3, 5, 16, 31, 32, 33, 63, 65, 100, 256, 257, 258, 600};
+  private static final int[] LENGTHS = {
+    1, 2, 3, 5, 16, 31, 32, 33, 63, 65, 100, 256, 257, 258, 600
+  };
   private static final List<PrimeField> FIELDS =
       List.of(
           new PrimeField(998_244_353), new PrimeField(12_289), Primes.forProduct(13, 1).getFirst());

@@ -198,4 +198,14 @@ class IntegersTest {
         Reason.OUT_OF_RANGE,
         assertThrows(Refusal.class, () -> Integers.primeFactors(BigInteger.ZERO)).reason());
   }
+
+  @Test
+  void bellNumbersThroughPrimesAreThoseOfTheTriangle() {
+    for (int n : new int[] {20, 149, 150, 151, 230}) {
+      List<BigInteger> triangle = Bell.triangle(n);
+      assertEquals(triangle, Bell.throughPrimes(n), "n = " + n);
+      assertEquals(triangle, Integers.bellNumbers(n));
+      assertTrue(triangle.getLast().bitLength() <= Bell.bits(n) + 1);
+    }
+  }
 }
