@@ -58,6 +58,8 @@ public enum Reason {
   NOT_COMMUTING,
   /// A constant was needed. Data: the form that is none.
   NOT_CONSTANT,
+  /// A value that the equation does not tie to those given. Data: the argument.
+  NOT_DETERMINED,
   /// A number at least zero was needed. Data: the value met.
   NOT_NATURAL,
   /// An operator that is not polynomial in x where a basis map has to pass it. Data: the symbol,

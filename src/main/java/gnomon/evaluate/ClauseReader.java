@@ -51,6 +51,10 @@ final class ClauseReader {
     try {
       value = evaluator.value(clausal.subject(), scope);
     } catch (LocatedRefusal refused) {
+      Optional<Value> point = atPoint(refused, clausal, scope);
+      if (point.isPresent() && clauses.size() == 1) {
+        return point.get();
+      }
       if (refused.refusal().reason() != Reason.INFINITE_SERIES
           || !(clauses.getFirst() instanceof Clause.To(Expression order, Span _))) {
         throw refused;
@@ -91,6 +95,15 @@ final class ClauseReader {
       at += joined ? 2 : 1;
     }
     return value;
+  }
+
+  /// The value of an equation without a formula for its solution, where its variable is a number.
+  private Optional<Value> atPoint(LocatedRefusal refused, Expression.Clauses clausal, Scope scope) {
+    Reason reason = refused.refusal().reason();
+    boolean none = reason == Reason.NO_SOLUTION || reason == Reason.SOLUTION_NOT_FOUND;
+    return none && clausal.clauses().getFirst() instanceof Clause.At values
+        ? Optional.of(evaluator.value(clausal.subject(), substitutions.holding(values, scope)))
+        : Optional.empty();
   }
 
   /// Several values put in at once. Where the form has no limit there, as binom(n, k) at n = −2, k

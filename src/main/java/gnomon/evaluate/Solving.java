@@ -3,6 +3,7 @@ package gnomon.evaluate;
 import gnomon.algebra.Reason;
 import gnomon.algebra.Refusal;
 import gnomon.form.Accumulation;
+import gnomon.form.Exponential;
 import gnomon.form.Factored;
 import gnomon.form.Form;
 import gnomon.form.Generator;
@@ -16,6 +17,7 @@ import gnomon.recurrence.Lowered;
 import gnomon.recurrence.RecurrenceSolver;
 import gnomon.recurrence.SingularPoint;
 import gnomon.recurrence.SolutionSpace;
+import gnomon.recurrence.StepByStep;
 import gnomon.recurrence.UnknownFunction;
 import gnomon.summation.Condition;
 import gnomon.syntax.Expression;
@@ -54,7 +56,13 @@ final class Solving {
         Map.of(new Variable(name), Sorts.form(number, solve.equation().span(), "the argument"));
     List<Condition> earlier = evaluation.conditions();
     evaluation.conditions(List.of());
-    Value solution = solved(solve, scope.without(name));
+    Value solution;
+    try {
+      solution = solved(solve, scope.without(name));
+    } catch (LocatedRefusal refused) {
+      evaluation.conditions(earlier);
+      return stepByStep(refused, image.get(new Variable(name)), solve, scope.without(name));
+    }
     List<Condition> met = evaluation.conditions();
     evaluation.conditions(earlier);
     if (Validity.fails(met, image)) {
@@ -67,7 +75,20 @@ final class Solving {
         solve.span(), () -> Sorts.of(Substitutions.addedUp(form.substitute(image)), scope));
   }
 
-  private Value solved(Expression.Solve solve, Scope scope) {
+  /// The value at an integer where there is no formula, from the given ones.
+  private Value stepByStep(
+      LocatedRefusal refused, Form point, Expression.Solve solve, Scope scope) {
+    Reason reason = refused.refusal().reason();
+    boolean none = reason == Reason.NO_SOLUTION || reason == Reason.SOLUTION_NOT_FOUND;
+    if (!none || point.asInteger().isEmpty()) {
+      throw refused;
+    }
+    return Places.at(
+        solve.span(),
+        () -> Sorts.of(problem(solve, scope).valueAt(point.asInteger().orElseThrow()), scope));
+  }
+
+  private Problem problem(Expression.Solve solve, Scope scope) {
     String name = new UnknownName(scope).of(solve);
     UnknownFunction unknown = new UnknownFunction(name);
     Scope inside = scope.with(name, new Binding.Arbitrary(name));
@@ -76,10 +97,11 @@ final class Solving {
     for (Expression.Equation condition : solve.conditions()) {
       conditions.add(vanishing(condition, inside));
     }
-    Form solution =
-        Places.at(
-            solve.equation().span(),
-            () -> new Problem(unknown, equation, conditions, scope.running()).solution());
+    return new Problem(unknown, equation, conditions, scope.running());
+  }
+
+  private Value solved(Expression.Solve solve, Scope scope) {
+    Form solution = Places.at(solve.equation().span(), () -> problem(solve, scope).solution());
     evaluation.status(Status.of(Status.Kind.CLOSED_FORM));
     return Sorts.of(solution, scope);
   }
@@ -136,6 +158,15 @@ final class Solving {
               running);
       remarks(space, solution);
       return solution;
+    }
+
+    /// The value at an integer, from the conditions that give values.
+    Form valueAt(BigInteger point) {
+      LinearEquation linear = unknown.equation(equation, variable);
+      if (linear.action() != LinearEquation.Action.SHIFT) {
+        throw new Refusal(Reason.NOT_DETERMINED, Form.of(point));
+      }
+      return StepByStep.at(linear, pointValues(), point);
     }
 
     /// The equation with y put into it; standing sums in it are brought to one upper end.
@@ -286,6 +317,7 @@ final class Solving {
           Structure.factored(Form.of(solution.denominator())).factors().stream()
               .map(Factored.Factor::base)
               .filter(base -> !base.isConstant() && !base.dependsOn(variable))
+              .filter(base -> !(base.asGenerator().orElse(null) instanceof Exponential))
               .map(Solving::notZero)
               .toList());
       for (Generator g : solution.generators()) {
@@ -305,7 +337,9 @@ final class Solving {
                               Form.of(variable).minus(Form.of(first)),
                               Condition.Relation.NATURAL))));
       if (linearShift(space) && start().isPresent()) {
-        for (BigInteger point : space.undetermined(start().get())) {
+        List<BigInteger> undetermined = new ArrayList<>(space.undetermined(start().get()));
+        undetermined.removeAll(pointValues().keySet());
+        for (BigInteger point : undetermined) {
           evaluation.remark(unknown.name() + "(" + point + ") is not determined by the equation");
         }
       }

@@ -17,8 +17,7 @@ import java.util.Map;
 /// coefficients (1992), algorithm Hyper, from memory.
 ///
 /// @param ratios the ratios found, in the order of the search
-/// @param exhaustive whether every hypergeometric solution over the field of the coefficients, with
-///   any z, is among them or a combination of them
+/// @param exhaustive whether every hypergeometric solution is among them or a combination of them
 record HypergeometricSolutions(List<Form> ratios, boolean exhaustive) {
 
   private static final int MOST_PAIRS = 3_000;
@@ -38,7 +37,10 @@ record HypergeometricSolutions(List<Form> ratios, boolean exhaustive) {
       Form last = ShiftFactors.moved(equation.leading(), v, 1 - equation.order());
       List<Form> as = monicDivisors(equation.coefficients().getFirst());
       List<Form> bs = monicDivisors(last);
-      exhaustive = equation.coefficients().stream().allMatch(ShiftFactors::isWithoutRadicals);
+      exhaustive =
+          equation.coefficients().stream().allMatch(ShiftFactors::isWithoutRadicals)
+              && hasLinearFactors(equation.coefficients().getFirst())
+              && hasLinearFactors(last);
       if ((long) as.size() * bs.size() > MOST_PAIRS) {
         exhaustive = false;
         return;
@@ -49,6 +51,12 @@ record HypergeometricSolutions(List<Form> ratios, boolean exhaustive) {
           pair(a, b);
         }
       }
+    }
+
+    /// Whether the factors cannot split over a larger field of constants.
+    private boolean hasLinearFactors(Form polynomial) {
+      return ShiftFactors.of(polynomial, v).factors().stream()
+          .allMatch(factor -> Structure.degree(factor, v).orElse(0) == 1);
     }
 
     private void pair(Form a, Form b) {

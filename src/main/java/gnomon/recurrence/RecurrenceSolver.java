@@ -106,6 +106,13 @@ public final class RecurrenceSolver {
     if (equation.order() == 1) {
       return new Basis(firstOrder(equation), nonzero, SolutionClass.HYPERGEOMETRIC, true);
     }
+    if (TwoTermSolutions.covers(equation)) {
+      List<Form> found =
+          TwoTermSolutions.of(equation).stream().filter(y -> isSolution(equation, y)).toList();
+      if (found.size() == equation.order()) {
+        return new Basis(Conjugates.inRealForm(found), nonzero, SolutionClass.HYPERGEOMETRIC, true);
+      }
+    }
     HypergeometricSolutions search = HypergeometricSolutions.of(equation);
     boolean exhaustive = search.exhaustive();
     List<Form> found = new ArrayList<>();

@@ -228,6 +228,12 @@ final class RefusalWords {
                   "It is {1}.",
                   "solve E f = 2 f + 1")),
           Map.entry(
+              "NOT_DETERMINED",
+              domain(
+                  "the equation does not determine this value",
+                  "It is asked for the argument {1}.",
+                  "solve f(n + 1) = f(n) with f(0) = 1")),
+          Map.entry(
               "NO_DIFFERENTIAL_EQUATION",
               domain(
                   "no linear differential equation was found for this function",

@@ -49,6 +49,10 @@ final class SolveTest {
           f(n+1) = (n+1) f(n) with f(0) = 1                             | 1 1 2 6 24 120
           f(n+1) = (n-3) f(n) with f(0) = 1                             | 1 -3 6 -6 0 0 0
           f(n+2) - (2n+3) f(n+1) + (n+1)^2 f(n) = 0 with f(0)=0, f(1)=1 | 0 1 3 11 50
+          f(n+2) = (n+1) f(n) with f(0) = 1, f(1) = 1                   | 1 1 1 2 3 8 15 48 105
+          (n+2) f(n+2) = (n+1) f(n) with f(0) = 1, f(1) = 0             | 1 0 1/2 0 3/8 0 5/16
+          f(n+3) = (n+1) f(n) with f(0) = 1, f(1) = 1, f(2) = 1         | 1 1 1 1 2 3 4 10 18
+          f(n+2) + f(n) = 0 with f(0) = 1, f(1) = 2                     | 1 2 -1 -2 1 2
           f(n) = f(n-1) + 1/n with f(0) = 0                             | 0 1 3/2 11/6 25/12
           """)
   void valuesAtIntegersAreThoseOfTheEquation(String equation, String values) {
@@ -104,6 +108,8 @@ final class SolveTest {
     assertEquals("domain-no-solution", code("solve f(n+2) = f(n+1) + (n+1) f(n)"));
     assertEquals("domain-no-solution", code("solve f(n+2) = 3 f(n+1) - 2 f(n) + n!"));
     assertEquals("domain-solution-not-found", code("solve f(n+3) = f(n+1) + f(n)"));
+    String radical = "solve f(n+2) = f(n+1) + (n^2 + 1) f(n)";
+    assertEquals("domain-solution-not-found", code(radical), "(n^2 + 1) splits over i");
     assertEquals("domain-solution-not-found", code("solve f(n+1) = 2^n f(n)"));
   }
 
@@ -143,6 +149,17 @@ final class SolveTest {
   }
 
   @Test
+  void equationsWithoutAFormulaHaveValues() {
+    String involutions = "solve f(n+2) = f(n+1) + (n+1) f(n) with f(0) = 1, f(1) = 1";
+    assertEquals("764", value(involutions + " at n = 8"));
+    assertEquals("[[7, 232],", value(involutions + " for n: 7..8"));
+    assertEquals("6 a + 4", value(involutions.replace("f(1) = 1", "f(1) = a") + " at n = 4"));
+    String open = "solve (n-2) f(n+1) = (n-1) f(n) with f(0) = 1, f(5) = 1 at n = ";
+    assertEquals("1/2", value(open + "1"));
+    assertEquals("domain-not-determined", code(open + "3"));
+  }
+
+  @Test
   void zerosOfTheLeadingCoefficientForbidOrFreeValues() {
     List<String> forbidden = said("solve (n-2) f(n+1) = f(n) with f(0) = 1");
     assertEquals("error domain-conditions-contradict", forbidden.getFirst().split(":")[0]);
@@ -168,6 +185,8 @@ final class SolveTest {
             "solve (n-1) y(n+2) - (n^2+3n-2) y(n+1) + 2n(n+1) y(n) = 0"
                 + " with y(0) = 1, y(1) = 2");
     assertEquals("2^n", lines.getFirst());
+    List<String> given = said("solve n f(n+1) = (n+1) f(n) with f(0) = 0, f(1) = 1");
+    assertEquals(List.of("n", "@2 closed form"), given);
     assertTrue(
         lines.getLast().endsWith("(y(3) is not determined by the equation)"), lines.toString());
   }

@@ -57,7 +57,9 @@ final class RecurrenceTablesTest {
         "fibonacci",
         "Sigma(k: 0..n) binom(n-k, k)",
         "(((1 + sqrt(5))/2)^(n+1) - ((1 - sqrt(5))/2)^(n+1))/sqrt(5)");
-    talk.allProved(3);
+    talk.claim(
+        "alternating squares", "Sigma(k: 0..n) (-1)^k binom(n, k)^2", "cos(pi n/2) binom(n, n/2)");
+    talk.allProved(4);
   }
 
   private static String at(String side, int point) {
