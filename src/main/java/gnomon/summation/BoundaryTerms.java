@@ -5,10 +5,12 @@ import gnomon.algebra.Refusal;
 import gnomon.form.Factorial;
 import gnomon.form.Form;
 import gnomon.form.Generator;
+import gnomon.form.Harmonic;
 import gnomon.form.Variable;
 import gnomon.number.Rational;
 import java.math.BigInteger;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 
 /// From a telescoper of the summand to a recurrence of the sum, with its boundary terms.
@@ -57,13 +59,14 @@ final class BoundaryTerms {
     if (!range.isFinite(anti)) {
       return Optional.empty();
     }
-    Form right = at(anti, upper.plus(Form.ONE)).minus(at(anti, lower));
     for (int i = 0; i < coefficients.size(); i++) {
-      Form moved = summand.substitute(n, Form.of(n).plus(Form.of(i)));
-      if (!range.isFinite(moved)) {
+      if (!range.isFinite(summand.substitute(n, Form.of(n).plus(Form.of(i))))) {
         return Optional.empty();
       }
-      right = right.plus(coefficients.get(i).times(difference(moved, i)));
+    }
+    Form right = ends(summand, anti, coefficients);
+    for (int i = 0; i < coefficients.size(); i++) {
+      right = right.plus(coefficients.get(i).times(difference(summand, i)));
     }
     range.settleAtRoots(coefficients.getLast());
     range.settleAtRoots(Form.of(right.denominator()));
@@ -71,26 +74,42 @@ final class BoundaryTerms {
     return Optional.of(new SumRecurrence(n, coefficients, right, range.from(), telescoper));
   }
 
-  private Form at(Form form, Form point) {
-    return form.substitute(k, point);
+  /// G(n, b+1) − G(n, a); where G has a pole at b + 1, G(n, b) − G(n, a) and the telescoped terms
+  /// at b apart.
+  private Form ends(Form summand, Form anti, List<Form> coefficients) {
+    Form low = anti.substitute(k, lower);
+    try {
+      return anti.substitute(k, upper.plus(Form.ONE)).minus(low);
+    } catch (Refusal _) {
+      Form last = anti.substitute(k, upper).minus(low);
+      for (int i = 0; i < coefficients.size(); i++) {
+        last = last.plus(coefficients.get(i).times(at(summand, i, upper)));
+      }
+      return last;
+    }
+  }
+
+  /// F(n + i, point).
+  private Form at(Form summand, int i, Form point) {
+    return summand.substitute(Map.of(n, Form.of(n).plus(Form.of(i)), k, point));
   }
 
   /// Σ over the range of S(n+i) less Σ over the range of S(n), of F(n+i, k).
-  private Form difference(Form moved, int i) {
+  private Form difference(Form summand, int i) {
     Form sum = Form.ZERO;
     int more = shift(range.upperLine(), i);
     for (int j = 1; j <= more; j++) {
-      sum = sum.plus(at(moved, upper.plus(Form.of(j))));
+      sum = sum.plus(at(summand, i, upper.plus(Form.of(j))));
     }
     for (int j = 0; j > more; j--) {
-      sum = sum.minus(at(moved, upper.plus(Form.of(j))));
+      sum = sum.minus(at(summand, i, upper.plus(Form.of(j))));
     }
     int later = shift(range.lowerLine(), i);
     for (int j = 0; j < later; j++) {
-      sum = sum.minus(at(moved, lower.plus(Form.of(j))));
+      sum = sum.minus(at(summand, i, lower.plus(Form.of(j))));
     }
     for (int j = -1; j >= later; j--) {
-      sum = sum.plus(at(moved, lower.plus(Form.of(j))));
+      sum = sum.plus(at(summand, i, lower.plus(Form.of(j))));
     }
     return sum;
   }
@@ -104,7 +123,9 @@ final class BoundaryTerms {
   private Form settled(Form right) {
     Form value = right;
     for (Generator g : right.generators()) {
-      if (g instanceof Factorial factorial) {
+      if (g instanceof Harmonic harmonic) {
+        settleHarmonic(harmonic);
+      } else if (g instanceof Factorial factorial) {
         Optional<Line> line =
             Line.of(factorial.argument(), n)
                 .map(l -> new Line(l.slope(), l.start().plus(Rational.ONE)));
@@ -122,5 +143,18 @@ final class BoundaryTerms {
       }
     }
     return value;
+  }
+
+  /// Raises n to where the argument of a harmonic number is no negative integer.
+  private void settleHarmonic(Harmonic harmonic) {
+    Optional<Line> line = Line.of(harmonic.argument(), n);
+    if (line.isPresent() && !line.get().slope().isZero()) {
+      if (line.get().signAtInfinity() < 0) {
+        throw new Refusal(Reason.POLE, Form.of(harmonic));
+      }
+      new Line(line.get().slope(), line.get().start().plus(Rational.ONE))
+          .settledFrom()
+          .ifPresent(range::raise);
+    }
   }
 }

@@ -125,7 +125,14 @@ public final class DefiniteSums {
   private DefiniteSum symbolic(Form g, Variable k, Form span, Form f, Form a, Form b) {
     refusePole(
         IntegerPoles.of(g, k).atOrAbove(BigInteger.ZERO), a.asRational().isPresent() ? a : b);
-    return switch (engine.search(g, k, Form.ONE)) {
+    Antidifference outcome = engine.search(g, k, Form.ONE);
+    if (!(outcome instanceof Antidifference.Found)) {
+      Optional<DefiniteSum> strided = new StridedSums(engine).sum(g, k, span);
+      if (strided.isPresent()) {
+        return strided.get();
+      }
+    }
+    return switch (outcome) {
       case Antidifference.Found found
           when IntegerPoles.of(found.value(), k).atOrAbove(BigInteger.ZERO).isEmpty() -> {
         Form value = telescoped(found.value(), k, Form.ZERO, span.plus(Form.ONE));

@@ -33,19 +33,22 @@ final class HarmonicTowerSolver implements AntidifferenceSolver {
       return none;
     }
     HarmonicTower tower = new HarmonicTower(x, summand.get().steps());
-    List<Form> sums = new ArrayList<>();
-    for (HarmonicSummand.Part part : summand.get().parts()) {
-      HarmonicTower.Outcome outcome = tower.sum(part);
-      if (outcome.sum().isEmpty()) {
-        return outcome.decided() && isTower(summand.get(), rescaled, x)
-            ? new Antidifference.ProvedAbsent(searches())
-            : none;
-      }
-      sums.add(outcome.sum().get());
+    HarmonicTower.Outcome outcome = tower.solve(levels(summand.get()));
+    if (outcome.solution().isEmpty()) {
+      return outcome.absent() && isTower(summand.get(), rescaled, x)
+          ? new Antidifference.ProvedAbsent(searches())
+          : none;
     }
-    Form sum = Form.sum(sums);
+    HarmonicTower.Solution solution = outcome.solution().get();
+    Form sum = solution.sum().dividedBy(solution.constants().getFirst());
     Form value = h.isOne() ? sum : sum.substitute(x, Form.of(x).dividedBy(h));
     return new Antidifference.Found(value, conditions(sum, rescaled, x), searches());
+  }
+
+  private static List<HarmonicTower.Level> levels(HarmonicSummand summand) {
+    return summand.parts().stream()
+        .map(part -> new HarmonicTower.Level(part.term(), part.ratio(), List.of(part.polynomial())))
+        .toList();
   }
 
   /// Whether the summand is one of a tower in which absence is proved: terms of which none is a

@@ -21,6 +21,7 @@ import java.util.Set;
 final class HypergeometricSums {
 
   private static final int MAXIMAL_ORDER = 4;
+  private static final int MAXIMAL_HARMONIC_ORDER = 3;
 
   private final SummationEngine engine;
 
@@ -57,7 +58,9 @@ final class HypergeometricSums {
     }
     BigInteger first = length.get().firstNatural();
     Form term = Reflection.applied(summand, n, k, lower, upper);
-    Optional<Telescoper> telescoper = Telescoper.of(term, n, k, MAXIMAL_ORDER);
+    Optional<Telescoper> telescoper =
+        Telescoper.of(term, n, k, MAXIMAL_ORDER)
+            .or(() -> HarmonicTelescoper.of(term, n, k, MAXIMAL_HARMONIC_ORDER));
     Optional<SumRecurrence> recurrence =
         telescoper.flatMap(
             found -> BoundaryTerms.recurrence(term, found, n, k, lower, upper, first));

@@ -94,7 +94,7 @@ public record Telescoper(List<Form> coefficients, Form certificate) {
     return new Univariate(Structure.asPolynomial(form, k).orElseThrow());
   }
 
-  private static Form commonMultiple(Form polynomial, Form fraction) {
+  static Form commonMultiple(Form polynomial, Form fraction) {
     return Form.of(Polynomial.lcm(polynomial.numerator(), fraction.denominator()));
   }
 

@@ -38,6 +38,22 @@ final class Talk {
     return this;
   }
 
+  /// Says a statement whose answer must have a status line that starts with the words, or, where it
+  /// is refused, that refusal's code.
+  Talk answers(String id, String statement, String words) {
+    claims++;
+    Reply reply = session.submit(statement);
+    String lines = String.join("\n", ReplyText.lines(reply, Spelling.ASCII));
+    boolean met =
+        reply instanceof Reply.Answer answer
+            ? answer.status().startsWith(words)
+            : lines.contains(words);
+    if (!met) {
+      failures.add(id + ": " + statement + " -> " + lines);
+    }
+    return this;
+  }
+
   /// Fails unless everything was accepted and proved, and at least `least` claims were made.
   void allProved(int least) {
     assertEquals(List.of(), failures);
