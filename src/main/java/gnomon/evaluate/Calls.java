@@ -210,6 +210,9 @@ final class Calls {
         expect(name, 2, arguments.size(), span);
         Form first = Sorts.form(arguments.getFirst(), span, "the first argument");
         Form second = Sorts.form(arguments.getLast(), span, "the second argument");
+        if (name.equals("binom")) {
+          requireNatural(first, second);
+        }
         yield Sorts.of(combinatorial(name, first, second), scope);
       }
       case String function -> {
@@ -217,6 +220,15 @@ final class Calls {
         yield elementary(function, arguments.getFirst(), span, scope);
       }
     };
+  }
+
+  /// binom(n, n − j) with an integer j is written as a polynomial, its value for natural n: for a
+  /// negative integer n it is 0 or another number.
+  private void requireNatural(Form n, Form k) {
+    boolean tied = n.minus(k).asInteger().isPresent();
+    if (tied && !n.isConstant()) {
+      evaluation.require(List.of(new Condition(n, Condition.Relation.NATURAL)));
+    }
   }
 
   private static Form combinatorial(String name, Form first, Form second) {

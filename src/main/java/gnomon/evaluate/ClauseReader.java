@@ -67,7 +67,8 @@ final class ClauseReader {
     while (at < clauses.size()) {
       Clause clause = clauses.get(at);
       if (clause instanceof Clause.At values
-          && Validity.fails(evaluation.conditions(), substitutions.images(values, scope))) {
+          && (Validity.fails(evaluation.conditions(), substitutions.images(values, scope))
+              || Validity.isSingular(value, substitutions.images(values, scope)))) {
         evaluation.conditions(earlier);
         value = evaluator.value(upTo(clausal, at), substitutions.holding(values, scope));
         at++;

@@ -29,15 +29,28 @@ final class Conditions {
     List<String> outside = new ArrayList<>();
     for (Condition condition : withoutConjugates(conditions)) {
       switch (condition.relation()) {
-        case NOT_ZERO, INTEGER, NATURAL, POSITIVE, INSIDE_UNIT -> said.add(words(condition));
+        case NOT_ZERO, INTEGER, POSITIVE, INSIDE_UNIT -> said.add(words(condition));
+        case NATURAL -> {
+          if (!isImplied(condition, conditions)) {
+            said.add(words(condition));
+          }
+        }
         case NOT_IN_RANGE -> outside.add(text(condition.subject()));
-        case RANGE_LENGTH -> {}
+        case RANGE_LENGTH, FINITE_FACTORIAL -> {}
       }
     }
     if (!outside.isEmpty()) {
       said.add(String.join(" and ", outside) + " outside the range");
     }
     return said.isEmpty() ? "" : "for " + String.join(", ", said);
+  }
+
+  /// Whether the condition says no more than that a range of the sum has no negative length.
+  private static boolean isImplied(Condition condition, List<Condition> conditions) {
+    return conditions.stream()
+        .filter(other -> other.relation() == Condition.Relation.RANGE_LENGTH)
+        .map(length -> condition.subject().minus(length.subject()).asRational())
+        .anyMatch(excess -> excess.filter(e -> e.sign() >= 0).isPresent());
   }
 
   /// The conditions with complex subjects that must not be zero put together into one, which is
@@ -76,6 +89,7 @@ final class Conditions {
       case POSITIVE -> compared(condition.subject(), " > ");
       case INSIDE_UNIT -> "|" + subject + "| < 1";
       case NOT_IN_RANGE -> subject + " outside the range";
+      case FINITE_FACTORIAL -> subject + " no negative integer";
     };
   }
 

@@ -6,6 +6,7 @@ import gnomon.diagnostic.Diagnostic;
 import gnomon.diagnostic.Span;
 import gnomon.evaluate.Binders.Limits;
 import gnomon.form.Form;
+import gnomon.form.Structure;
 import gnomon.form.Variable;
 import gnomon.summation.Condition;
 import gnomon.summation.DefiniteProducts;
@@ -52,13 +53,13 @@ final class RangeSums {
       Value value = evaluator.value(body, limits.inside(scope));
       List<Condition> met = evaluation.conditions();
       evaluation.conditions(earlier);
-      if (Validity.fails(met, Map.of(limits.variable(), limits.lower()))) {
-        return withoutClosedForm(limits, met, body);
+      for (Condition condition : met) {
+        if (!Validity.concerns(condition, Map.of(limits.variable(), Form.ZERO))) {
+          evaluation.require(List.of(condition));
+        } else if (!requiredAtEnds(condition, limits)) {
+          return withoutClosedForm(limits, met, body);
+        }
       }
-      evaluation.require(
-          met.stream()
-              .filter(c -> !Validity.concerns(c, Map.of(limits.variable(), Form.ZERO)))
-              .toList());
       if (value instanceof FormValue form) {
         return Optional.of(form.form());
       }
@@ -76,6 +77,36 @@ final class RangeSums {
       }
       throw needsNumbers;
     }
+  }
+
+  /// Whether a condition on the bound variable holds at both ends of the range, and so between
+  /// them; at a symbolic end it is required.
+  private boolean requiredAtEnds(Condition condition, Limits limits) {
+    Optional<List<Form>> linear = Structure.asPolynomial(condition.subject(), limits.variable());
+    boolean ordered =
+        switch (condition.relation()) {
+          case NATURAL, POSITIVE -> linear.filter(c -> c.size() == 2).isPresent();
+          case NOT_ZERO, INTEGER, INSIDE_UNIT, FINITE_FACTORIAL, NOT_IN_RANGE, RANGE_LENGTH ->
+              false;
+        };
+    if (!ordered) {
+      return !Validity.fails(List.of(condition), Map.of(limits.variable(), limits.lower()));
+    }
+    boolean rising = linear.get().getLast().asRational().filter(r -> r.sign() > 0).isPresent();
+    if (!rising && limits.upper().isEmpty()) {
+      return false;
+    }
+    for (Form end : limits.all()) {
+      Condition there =
+          new Condition(
+              condition.subject().substitute(limits.variable(), end), condition.relation());
+      if (!there.subject().isConstant()) {
+        evaluation.require(List.of(there));
+      } else if (Validity.fails(List.of(condition), Map.of(limits.variable(), end))) {
+        return false;
+      }
+    }
+    return true;
   }
 
   /// A body whose closed form does not hold on the whole range: between numbers it is evaluated for

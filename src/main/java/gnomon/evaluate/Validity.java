@@ -1,10 +1,14 @@
 package gnomon.evaluate;
 
 import gnomon.algebra.Refusal;
+import gnomon.form.Factorial;
 import gnomon.form.Form;
 import gnomon.form.Generator;
 import gnomon.number.Rational;
 import gnomon.summation.Condition;
+import gnomon.value.FormValue;
+import gnomon.value.Value;
+import java.math.BigInteger;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -19,6 +23,31 @@ final class Validity {
     return conditions.stream()
         .filter(condition -> concerns(condition, images))
         .anyMatch(condition -> !holds(condition, images));
+  }
+
+  /// Whether values for some variables lead to factorials of negative integers while others stay
+  /// symbols. The limit is then right for symbols that are no integers, but (m + n + 1)!/((m + 1)!
+  /// n!) at m = −3 is 1 for n = 0 and not its limit 0 for other n.
+  static boolean isSingular(Value value, Map<? extends Generator, Form> images) {
+    if (!(value instanceof FormValue formValue)) {
+      return false;
+    }
+    Form form = formValue.form();
+    return form.variables().stream().anyMatch(v -> !images.containsKey(v))
+        && form.generators().stream()
+            .filter(Factorial.class::isInstance)
+            .map(factorial -> ((Factorial) factorial).argument())
+            .filter(argument -> images.keySet().stream().anyMatch(argument::dependsOn))
+            .anyMatch(argument -> isNegativeInteger(argument, images));
+  }
+
+  private static boolean isNegativeInteger(Form argument, Map<? extends Generator, Form> images) {
+    try {
+      Optional<BigInteger> value = argument.substitute(Map.copyOf(images)).asInteger();
+      return value.filter(n -> n.signum() < 0).isPresent();
+    } catch (Refusal undefined) {
+      return true;
+    }
   }
 
   static boolean concerns(Condition condition, Map<? extends Generator, Form> images) {
@@ -44,6 +73,7 @@ final class Validity {
           case INSIDE_UNIT ->
               form ->
                   form.asRational().filter(v -> v.abs().compareTo(Rational.ONE) < 0).isPresent();
+          case FINITE_FACTORIAL -> form -> form.asInteger().filter(n -> n.signum() < 0).isEmpty();
           case NOT_IN_RANGE -> _ -> false;
         };
     return Optional.of(value).filter(test).isPresent();

@@ -15,7 +15,8 @@ import java.util.List;
 final class IntegerPowers {
   private IntegerPowers() {}
 
-  static Form reduce(Form form, Collection<Variable> integers) {
+  static Form reduce(Form given, Collection<Variable> integers) {
+    Form form = IntegerReflection.reduce(given, integers);
     List<Exponential> signs = new ArrayList<>();
     for (Generator g : form.generators()) {
       if (g instanceof Exponential power && isSign(power, integers)) {

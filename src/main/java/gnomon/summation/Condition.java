@@ -20,6 +20,9 @@ public record Condition(Form subject, Relation relation) {
     POSITIVE,
     /// The modulus of the subject is less than one.
     INSIDE_UNIT,
+    /// The subject, an argument of a factorial, is no negative integer; that is taken for granted
+    /// of symbols.
+    FINITE_FACTORIAL,
     /// The subject, a pole, is none of the points summed over.
     NOT_IN_RANGE,
     /// The subject is the number of terms of a sum, an integer and at least zero; that is taken for

@@ -58,7 +58,7 @@ public final class DefiniteProducts {
     return closed(factor, k, a, b, conditions)
         .map(form -> form.takingIntegers(DefiniteSums.integersIn(span)))
         .map(form -> DefiniteSum.closed(form, conditions))
-        .map(found -> found.under(GenericPoles.outside(factor, k, DefiniteSums.variables(a, b))))
+        .map(found -> found.under(GenericPoles.outside(factor, k, a, DefiniteSums.variables(a, b))))
         .orElseGet(() -> DefiniteSum.standing(standing));
   }
 

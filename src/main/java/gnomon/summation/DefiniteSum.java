@@ -1,6 +1,7 @@
 package gnomon.summation;
 
 import gnomon.form.Form;
+import gnomon.form.Variable;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -49,6 +50,20 @@ public record DefiniteSum(
     List<Condition> all = new ArrayList<>(conditions);
     all.addAll(further);
     return new DefiniteSum(value, status, all, antidifference, absentWithin, theorems, recurrence);
+  }
+
+  /// The closed form with another value of a variable; a recurrence in it is left out.
+  DefiniteSum substituted(Variable n, Form image) {
+    return new DefiniteSum(
+        value.substitute(n, image),
+        status,
+        conditions.stream()
+            .map(c -> new Condition(c.subject().substitute(n, image), c.relation()))
+            .toList(),
+        antidifference.map(form -> form.substitute(n, image)),
+        absentWithin,
+        theorems,
+        Optional.empty());
   }
 
   static DefiniteSum termByTerm(Form value) {

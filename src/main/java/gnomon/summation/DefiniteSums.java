@@ -11,6 +11,7 @@ import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 
@@ -39,7 +40,7 @@ public final class DefiniteSums {
     Form summand = f.takingIntegers(Set.of(k));
     DefiniteSum sum = found(summand, k, a, b);
     return sum.status() == DefiniteSum.Status.CLOSED_FORM
-        ? sum.under(GenericPoles.outside(summand, k, variables(a, b)))
+        ? sum.under(GenericPoles.outside(summand, k, a, variables(a, b)))
         : sum;
   }
 
@@ -59,6 +60,10 @@ public final class DefiniteSums {
       Form value = summand.times(span.plus(Form.ONE));
       return DefiniteSum.closed(value, List.of(), summand.times(Form.of(k)));
     }
+    Optional<DefiniteSum> counted = countedFromStart(summand, k, a, b);
+    if (counted.isPresent()) {
+      return counted.get();
+    }
     if (span.variables().stream().anyMatch(summand::dependsOn)) {
       Form reversed = summand.substitute(k, a.plus(b).minus(Form.of(k)));
       boolean free = span.variables().stream().noneMatch(reversed::dependsOn);
@@ -73,6 +78,26 @@ public final class DefiniteSums {
       return symbolic(fromZero, k, span, summand, a, b);
     }
     return bothSymbolic(summand, k, a, b);
+  }
+
+  /// Σ(k: m..n) f for symbols m and n where m occurs in f, with n counted from m.
+  private Optional<DefiniteSum> countedFromStart(Form f, Variable k, Form a, Form b) {
+    if (a.variables().size() != 1 || b.variables().size() != 1) {
+      return Optional.empty();
+    }
+    Variable m = a.variables().first();
+    Variable n = b.variables().first();
+    Optional<Rational> start = a.minus(Form.of(m)).asRational();
+    Optional<Rational> end = b.minus(Form.of(n)).asRational();
+    if (m.equals(n) || start.isEmpty() || end.isEmpty() || !f.dependsOn(m)) {
+      return Optional.empty();
+    }
+    Form later = Form.of(n).plus(Form.of(m));
+    Form counted = f.substitute(Map.of(k, Form.of(k).plus(a), n, later));
+    DefiniteSum sum = found(counted, k, Form.ZERO, b.minus(a).substitute(n, later));
+    return Optional.of(sum)
+        .filter(found -> found.status() == DefiniteSum.Status.CLOSED_FORM)
+        .map(found -> found.substituted(n, Form.of(n).minus(Form.of(m))));
   }
 
   /// A range of a known number of points.

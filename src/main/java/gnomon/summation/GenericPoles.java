@@ -1,6 +1,8 @@
 package gnomon.summation;
 
+import gnomon.form.Factorial;
 import gnomon.form.Form;
+import gnomon.form.Generator;
 import gnomon.form.Structure;
 import gnomon.form.Variable;
 import java.util.ArrayList;
@@ -14,9 +16,10 @@ import java.util.Set;
 final class GenericPoles {
   private GenericPoles() {}
 
-  /// The conditions that no such pole of f lies in the range. Poles that move with the `ends` alone
-  /// are not among them: whether the range meets these is decided, not assumed.
-  static List<Condition> outside(Form f, Variable k, Set<Variable> ends) {
+  /// The conditions that no such pole of f lies in the range, which begins at `start`. Poles that
+  /// move with the `ends` alone are not among them: whether the range meets these is decided, not
+  /// assumed.
+  static List<Condition> outside(Form f, Variable k, Form start, Set<Variable> ends) {
     List<Condition> conditions = new ArrayList<>();
     Form denominator = Form.of(f.denominator());
     if (denominator.dependsOn(k)) {
@@ -27,6 +30,14 @@ final class GenericPoles {
             .filter(root -> !ends.containsAll(root.variables()))
             .map(root -> new Condition(root, Condition.Relation.NOT_IN_RANGE))
             .ifPresent(conditions::add);
+      }
+    }
+    for (Generator g : f.generators()) {
+      if (g instanceof Factorial(Form argument)
+          && f.numerator().contains(g)
+          && argument.variables().stream().anyMatch(v -> !v.equals(k) && !ends.contains(v))) {
+        Form first = argument.substitute(k, start);
+        conditions.add(new Condition(first, Condition.Relation.FINITE_FACTORIAL));
       }
     }
     return conditions;

@@ -61,7 +61,7 @@ public final class InfiniteSums {
       }
     }
     return total.status() == DefiniteSum.Status.CLOSED_FORM
-        ? total.under(GenericPoles.outside(summand, k, a.variables()))
+        ? total.under(GenericPoles.outside(summand, k, a, a.variables()))
         : total;
   }
 

@@ -1,5 +1,6 @@
 package gnomon.summation;
 
+import gnomon.algebra.Refusal;
 import gnomon.form.Factorial;
 import gnomon.form.Form;
 import gnomon.form.Generator;
@@ -28,7 +29,7 @@ record IntegerPoles(
     Form denominator = Form.of(f.denominator());
     if (denominator.dependsOn(k)) {
       for (var factor : Structure.factored(denominator).factors()) {
-        root(factor.base(), k).ifPresent(points::add);
+        root(factor.base(), k).filter(point -> !isFinite(f, k, point)).ifPresent(points::add);
       }
     }
     IntegerPoles poles = new IntegerPoles(points, Optional.empty(), Optional.empty());
@@ -36,6 +37,19 @@ record IntegerPoles(
       poles = poles.with(generator, f, k);
     }
     return poles;
+  }
+
+  /// Whether a root of the denominator is no pole, because a reciprocal factorial vanishes there.
+  private static boolean isFinite(Form f, Variable k, BigInteger point) {
+    if (f.generators().stream().noneMatch(g -> g instanceof Factorial && g.dependsOn(k))) {
+      return false;
+    }
+    try {
+      f.substitute(k, Form.of(point));
+      return true;
+    } catch (Refusal _) {
+      return false;
+    }
   }
 
   /// The first pole at or above `bound`.

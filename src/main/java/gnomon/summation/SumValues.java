@@ -32,19 +32,30 @@ record SumValues(Form summand, Variable n, Variable k, Form lower, Form upper) {
   /// values below, down to the empty sum at first − 1; nothing where a spot check at and above
   /// `proved`, with numbers for the parameters, fails.
   Optional<BigInteger> validFrom(Form form, BigInteger proved, BigInteger first) {
-    Map<Generator, Form> numbers = numbers();
-    SumValues sample = new SumValues(summand.substitute(numbers), n, k, lower, upper);
-    Form value = form.substitute(numbers);
-    for (int i = SPARE; i >= 0; i--) {
-      if (!sample.agrees(value, proved.add(BigInteger.valueOf(i)))) {
-        return Optional.empty();
-      }
+    if (!agrees(form, proved, numbers(7)) && !agrees(form, proved, numbers(1))) {
+      return Optional.empty();
     }
     BigInteger begin = proved;
     while (begin.compareTo(first) >= 0 && agrees(form, begin.subtract(BigInteger.ONE))) {
       begin = begin.subtract(BigInteger.ONE);
     }
     return Optional.of(begin);
+  }
+
+  /// Whether the form has the values of the sum from a point on, with numbers for the parameters.
+  private boolean agrees(Form form, BigInteger from, Map<Generator, Form> numbers) {
+    try {
+      SumValues sample = new SumValues(summand.substitute(numbers), n, k, lower, upper);
+      Form value = form.substitute(numbers);
+      for (int i = SPARE; i >= 0; i--) {
+        if (!sample.agrees(value, from.add(BigInteger.valueOf(i)))) {
+          return false;
+        }
+      }
+      return true;
+    } catch (Refusal _) {
+      return false;
+    }
   }
 
   /// Whether the form has the value of the sum at a point.
@@ -56,13 +67,14 @@ record SumValues(Form summand, Variable n, Variable k, Form lower, Form upper) {
     }
   }
 
-  /// Numbers to put in for the parameters in a spot check.
-  private Map<Generator, Form> numbers() {
+  /// Numbers to put in for the parameters in a spot check. Fractions avoid special values; whole
+  /// numbers are for parameters in exponents, as of −1.
+  private Map<Generator, Form> numbers(int denominator) {
     Map<Generator, Form> numbers = new HashMap<>();
     int next = 11;
     for (Variable parameter : summand.variables()) {
       if (!parameter.equals(n) && !parameter.equals(k)) {
-        numbers.put(parameter, Form.of(Rational.of(next * next + 1L, 7)));
+        numbers.put(parameter, Form.of(Rational.of(next * next + 1L, denominator)));
         next += 2;
       }
     }
