@@ -12,6 +12,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalInt;
 
 /// The general operator: a finite sum of A ∘ U with operators A and umbral maps U.
 ///
@@ -262,6 +263,10 @@ public final class MappedOperator {
     if (equals(that)) {
       return new Comparison.Equal();
     }
+    Optional<Comparison.Way> way = SymbolIdentity.of(this, that);
+    if (way.isPresent()) {
+      return new Comparison.Identical(way.get());
+    }
     for (int k = 0; k <= order; k++) {
       Form power = Form.of(x).power(k);
       Form left = applyTo(power, engine);
@@ -269,6 +274,12 @@ public final class MappedOperator {
       if (!left.equals(right)) {
         return new Comparison.Different(k, left, right);
       }
+    }
+    OptionalInt later = SymbolIdentity.firstDifference(this, that, x, order + 1);
+    if (later.isPresent()) {
+      Form power = Form.of(x).power(later.getAsInt());
+      return new Comparison.Different(
+          later.getAsInt(), applyTo(power, engine), that.applyTo(power, engine));
     }
     return new Comparison.Open(order);
   }

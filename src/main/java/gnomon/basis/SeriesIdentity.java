@@ -27,32 +27,40 @@ final class SeriesIdentity {
 
   /// Whether a and b are proved to be the same series in t.
   static boolean same(Form a, Form b, Dual t) {
-    if (a.equals(b)) {
-      return true;
-    }
+    return a.equals(b) || wayOf(a, b, t).isPresent();
+  }
+
+  /// How a and b, whose normal forms differ, are proved to be the same series in t.
+  static Optional<Comparison.Way> wayOf(Form a, Form b, Dual t) {
     try {
-      return vanishes(a.minus(b), t) || proportional(a, b, t);
+      Form gap = a.minus(b);
+      if (isConstantZero(gap, t)) {
+        return Optional.of(Comparison.Way.DERIVATIVE);
+      }
+      if (vanishesStraight(gap, t)) {
+        return Optional.of(Comparison.Way.DEFINING_EQUATION);
+      }
+      return proportional(a, b, t) ? Optional.of(Comparison.Way.QUOTIENT) : Optional.empty();
     } catch (Refusal _) {
-      return false;
+      return Optional.empty();
     }
   }
 
-  /// Whether the form is proved to be the series 0 in t.
-  static boolean vanishes(Form h, Dual t) {
-    if (h.isZero()) {
-      return true;
-    }
-    try {
-      Optional<InverseSeries> standing = standing(h, t);
-      if (standing.isPresent()) {
-        Form f = standing.get().of().substitute(standing.get().in(), Form.of(t));
-        Form straight = Kernels.unwrapped(h.substitute(t, f), t);
-        return standing(straight, t).isEmpty() && vanishes(straight, t);
-      }
-      return h.derivative(t).isZero() && Expansion.of(h, t, 0).isZero();
-    } catch (Refusal _) {
+  /// Whether the derivative is 0 and the value at 0 too.
+  private static boolean isConstantZero(Form h, Dual t) {
+    return h.isZero() || h.derivative(t).isZero() && Expansion.of(h, t, 0).isZero();
+  }
+
+  /// Whether h vanishes after t ↦ f(t), for an inverse series W of f at t in it.
+  private static boolean vanishesStraight(Form h, Dual t) {
+    Optional<InverseSeries> standing = standing(h, t);
+    if (standing.isEmpty()) {
       return false;
     }
+    Form f = standing.get().of().substitute(standing.get().in(), Form.of(t));
+    Form straight = Kernels.unwrapped(h.substitute(t, f), t);
+    return standing(straight, t).isEmpty() && isConstantZero(straight, t)
+        || vanishesStraight(straight, t);
   }
 
   /// Whether a′ b = b′ a and the first coefficients agree.

@@ -362,6 +362,11 @@ public final class ShefferMap {
     if (equals(that) || inverse.equals(that.inverse) && w.equals(that.w)) {
       return new Comparison.Equal();
     }
+    Optional<Comparison.Way> way =
+        SymbolIdentity.of(MappedOperator.of(this), MappedOperator.of(that));
+    if (way.isPresent()) {
+      return new Comparison.Identical(way.get());
+    }
     for (int n = 0; n <= order; n++) {
       Form left = memberAt(n);
       Form right = that.memberAt(n);

@@ -193,6 +193,8 @@ final class Claims {
     Comparison comparison = a.comparedWith(b, x, CHECKED_TO, evaluation.sums());
     return switch (comparison) {
       case Comparison.Equal _ -> normalForm(Sorts.of(a), Sorts.of(b), Sorts.of(a), scope);
+      case Comparison.Identical(Comparison.Way way) ->
+          new Proved(new Ground.Words(words(way), Optional.empty()));
       case Comparison.Different(int power, Form first, Form second)
           when OpenConstants.mayAgree(first, second, x) ->
           new Open(
@@ -213,6 +215,15 @@ final class Claims {
           new Open(
               x.name() + "^0, ..., " + x.name() + "^" + checkedTo,
               "the normal form does not decide operators of this kind");
+    };
+  }
+
+  private static String words(Comparison.Way way) {
+    return switch (way) {
+      case DERIVATIVE -> "the symbols have the same derivative and begin alike";
+      case QUOTIENT -> "the symbols have the same logarithmic derivative and begin alike";
+      case DEFINING_EQUATION ->
+          "both sides are equal by the equation that defines the inverse series";
     };
   }
 

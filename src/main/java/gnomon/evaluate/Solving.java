@@ -45,6 +45,10 @@ final class Solving {
   }
 
   Value value(Expression.Solve solve, Scope scope) {
+    Optional<Value> operator = new OperatorEquations(evaluator).value(solve, scope);
+    if (operator.isPresent()) {
+      return operator.get();
+    }
     Optional<String> held = new UnknownName(scope).heldArgument(solve);
     return held.isPresent() ? at(held.get(), solve, scope) : solved(solve, scope);
   }

@@ -1,0 +1,103 @@
+package gnomon.session;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
+import org.junit.jupiter.params.provider.ValueSource;
+
+/// Operators without closed form: defined by an equation, used like any other, compared by the
+/// equation that defines them.
+///
+/// Source: Lagrange's inversion, Comtet, Advanced Combinatorics (1974), section 3.8, from memory;
+/// the Catalan numbers of DLMF Table 26.5.1.
+final class OperatorEquationsTest {
+  private final Session session = Session.of(Settings.batch());
+
+  private String first(String statement) {
+    return ReplyText.lines(session.submit(statement), Spelling.ASCII).getFirst();
+  }
+
+  @ParameterizedTest
+  @CsvSource(
+      delimiter = '&',
+      value = {
+        "D exp(a W) & D + a D^2 + 3/2 a^2 D^3 + 8/3 a^3 D^4 + 125/24 a^4 D^5 + O(D^6)",
+        "D (1 + W)^2 & D + 2 D^2 + 5 D^3 + 14 D^4 + 42 D^5 + O(D^6)",
+        "D (1 + W)^3 & D + 3 D^2 + 12 D^3 + 55 D^4 + 273 D^5 + O(D^6)",
+        "D + W^2 exp(W) & D + D^2 + 3 D^3 + 21/2 D^4 + 247/6 D^5 + O(D^6)",
+        "D + D^2 W & D + D^3 + D^5 + O(D^6)",
+      })
+  void equationsHaveTheirSeries(String right, String series) {
+    first("let S = solve W = " + right);
+    assertEquals(series.strip(), first("S to 5"));
+  }
+
+  @ParameterizedTest
+  @ValueSource(
+      strings = {
+        "D exp(a W)",
+        "D (1 + W)^2",
+        "D (1 + W)^3",
+        "D + W^2 exp(W)",
+        "Delta exp(W)",
+        "D + D^2 W",
+        "ln(1 + D + W^2)",
+        "D - W^2 sqrt(1 + W)",
+        "D + D^2 W^5 + D exp(W)",
+      })
+  void theDefiningEquationIsProved(String right) {
+    first("let S = solve W = " + right);
+    String claim = "claim S = " + right.replace("W", "S");
+    assertTrue(first(claim).startsWith("proved"), first(claim));
+    String wrong = first(claim + " + D^15");
+    assertTrue(wrong.startsWith("refuted: on x^15"), wrong);
+  }
+
+  @Test
+  void whatIsDefinedByAnEquationIsUsedLikeAnyOperator() {
+    first("let W = solve W = D exp(W)");
+    assertEquals("3 x^2 + 6 x + 9", first("W(x^3)"));
+    assertEquals("[[1, 0,  0,  0],", first("matrix umbral(W) to 3"));
+    assertTrue(first("claim umbral(W) umbral(D exp(-D)) = 1").startsWith("proved"));
+    assertTrue(first("claim umbral(W) D umbral(W)^-1 = W").startsWith("proved"));
+    assertTrue(first("claim W' = exp(W)/(1 - W)").startsWith("proved"));
+    assertTrue(first("claim ln(W/D) = W").startsWith("proved"));
+    assertTrue(first("family W").startsWith("the inverse of the map of the Abel polynomials"));
+  }
+
+  @Test
+  void twoWaysToOneOperatorAreProvedEqual() {
+    first("let V = umbral(D exp(-a D))^-1 D umbral(D exp(-a D))");
+    assertTrue(first("claim V = (solve W = D exp(a W))").startsWith("proved"));
+    assertTrue(first("claim V = (solve W = D exp(2 a W))").startsWith("refuted"));
+  }
+
+  @ParameterizedTest
+  @CsvSource(
+      delimiter = '&',
+      value = {
+        "D + 1 & domain-operator-equation",
+        "D + W & domain-operator-equation",
+        "D W & domain-operator-equation",
+        "x W & domain-operator-equation",
+        "D + x W & domain-not-shift-invariant",
+        "D^2 exp(W) & domain-operator-equation",
+        "sin(W) + D & domain-operator-equation",
+        "Sigma + W & domain-not-shift-invariant",
+        "umbral(Delta) W & kind-not-an-operator",
+      })
+  void whatDefinesNoDeltaOperatorIsRefused(String right, String code) {
+    String said = first("solve W = " + right);
+    assertTrue(said.startsWith("error " + code.strip() + ":"), said);
+  }
+
+  @Test
+  void functionsAreSolvedForAsBefore() {
+    assertEquals("C1 e^x", first("solve f = D f"));
+    session.submit("arbitrary F");
+    assertEquals("C1 e^x", first("solve F = D F"));
+  }
+}
