@@ -6,6 +6,7 @@ import gnomon.algebra.Refusal;
 import gnomon.form.Form;
 import gnomon.number.Rational;
 import gnomon.series.PowerSeries;
+import gnomon.series.PowerTriangle;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -92,6 +93,11 @@ final class Members {
   /// s_n = Σ_k (n!/k!) [t^n] w F^k x^k, all n together.
   private static List<List<Form>> byPowers(ShefferMap map, int n) {
     Budget.charge((long) n * n * n / SERIES_SHARE);
+    Optional<List<List<Rational>>> triangle =
+        PowerTriangle.of(map.weightSeries(n), map.inverseSeries(Math.max(1, n)), n);
+    if (triangle.isPresent()) {
+      return triangle.get().stream().map(row -> row.stream().map(Form::of).toList()).toList();
+    }
     List<List<Form>> members = new ArrayList<>();
     for (int j = 0; j <= n; j++) {
       members.add(new ArrayList<>());

@@ -39,6 +39,9 @@ final class DenominatorScale {
   /// Scales with more bits for each power of t than this are not used.
   private static final long MAX_BITS = 48;
 
+  /// Denominators with more bits are taken for those of exponential generating functions.
+  private static final int LONG_DENOMINATOR = 64;
+
   private static final int LARGEST_PRIME = 4096;
 
   private final Kind kind;
@@ -61,9 +64,12 @@ final class DenominatorScale {
       Budget.checkpoint();
       factorial = kind == Kind.EXPONENTIAL ? factorial.multiply(BigInteger.valueOf(n)) : factorial;
       BigInteger left = remaining(coefficients.get(n).denominator(), factorial);
+      if (left.bitLength() > MAX_BITS * (n - lag) + 1) {
+        return Optional.empty();
+      }
       if (!left.equals(BigInteger.ONE)) {
-        add(exponents, left, n - lag);
-        if (bits(exponents) > MAX_BITS) {
+        boolean more = add(exponents, left, n - lag);
+        if (more && bits(exponents) > MAX_BITS) {
           return Optional.empty();
         }
       }
@@ -73,16 +79,19 @@ final class DenominatorScale {
 
   /// The smaller one of the ordinary and the exponential scale.
   static Optional<DenominatorScale> best(List<Rational> coefficients, int lag, int length) {
-    return smaller(
-        of(coefficients, Kind.ORDINARY, lag, length),
-        of(coefficients, Kind.EXPONENTIAL, lag, length),
-        length);
+    Optional<DenominatorScale> exponential = of(coefficients, Kind.EXPONENTIAL, lag, length);
+    return isPlain(exponential, coefficients, length)
+        ? exponential
+        : smaller(of(coefficients, Kind.ORDINARY, lag, length), exponential, length);
   }
 
   /// The smaller one of the products of the ordinary and of the exponential scales.
   static Optional<DenominatorScale> best(List<List<Rational>> lists, int length) {
-    return smaller(
-        product(lists, Kind.ORDINARY, length), product(lists, Kind.EXPONENTIAL, length), length);
+    Optional<DenominatorScale> exponential = product(lists, Kind.EXPONENTIAL, length);
+    boolean plain = lists.stream().anyMatch(list -> isPlain(exponential, list, length));
+    return plain
+        ? exponential
+        : smaller(product(lists, Kind.ORDINARY, length), exponential, length);
   }
 
   /// The scale of the kind that clears both lists.
@@ -94,6 +103,16 @@ final class DenominatorScale {
         .exponents
         .forEach((p, s) -> exponents.merge(p, s, (x, y) -> x.compareTo(y) >= 0 ? x : y));
     return new DenominatorScale(kind, exponents);
+  }
+
+  /// Whether n! alone is enough, and not much too large.
+  private static boolean isPlain(
+      Optional<DenominatorScale> scale, List<Rational> coefficients, int length) {
+    int last = Math.min(length, coefficients.size()) - 1;
+    return scale.isPresent()
+        && scale.get().exponents.isEmpty()
+        && last > 0
+        && coefficients.get(last).denominator().bitLength() > LONG_DENOMINATOR;
   }
 
   private static Optional<DenominatorScale> product(
@@ -129,7 +148,9 @@ final class DenominatorScale {
     return rest.signum() == 0 ? BigInteger.ONE : denominator.divide(denominator.gcd(rest));
   }
 
-  private static void add(Map<BigInteger, Rational> exponents, BigInteger denominator, int n) {
+  /// Takes in a denominator of t^n; whether an exponent has changed.
+  private static boolean add(Map<BigInteger, Rational> exponents, BigInteger denominator, int n) {
+    boolean more = false;
     BigInteger rest = denominator;
     for (int p = 2; p < LARGEST_PRIME && !rest.equals(BigInteger.ONE); p += p == 2 ? 1 : 2) {
       if (rest.bitLength() < Long.SIZE && (long) p * p > rest.longValue()) {
@@ -143,27 +164,38 @@ final class DenominatorScale {
         rest = parts[0];
         parts = rest.divideAndRemainder(prime);
       }
-      raise(exponents, prime, power, n);
+      more |= raise(exponents, prime, power, n);
     }
     if (!rest.equals(BigInteger.ONE)) {
-      raise(exponents, rest, 1, n);
+      more |= raise(exponents, rest, 1, n);
     }
+    return more;
   }
 
-  private static void raise(Map<BigInteger, Rational> exponents, BigInteger p, int power, int n) {
-    if (power > 0) {
-      exponents.merge(p, Rational.of(power, n), (a, b) -> a.compareTo(b) >= 0 ? a : b);
+  private static boolean raise(
+      Map<BigInteger, Rational> exponents, BigInteger p, int power, int n) {
+    if (power == 0) {
+      return false;
     }
+    Rational share = Rational.of(power, n);
+    Rational before = exponents.get(p);
+    if (before != null && before.compareTo(share) >= 0) {
+      return false;
+    }
+    exponents.put(p, share);
+    return true;
   }
 
-  /// At least the number of bits of Π p^s_p.
+  /// The number of bits of Π p^s_p, rounded up.
   private static long bits(Map<BigInteger, Rational> exponents) {
-    long bits = 0;
+    long parts = 0;
     for (var entry : exponents.entrySet()) {
-      Rational share = entry.getValue().times(Rational.of(entry.getKey().bitLength()));
-      bits += share.floor().longValue() + 1;
+      // p^16 < 2^bits, so bits/16 is above log2 p
+      long bits = entry.getKey().pow(16).bitLength();
+      Rational share = entry.getValue();
+      parts += bits * 64 * share.numerator().longValue() / share.denominator().longValue() + 1;
     }
-    return bits;
+    return parts / 1024 + 1;
   }
 
   /// This scale with W_n = lcm(1, …, n) or n! in place of what it has.
@@ -213,21 +245,24 @@ final class DenominatorScale {
             case LOGARITHMIC -> BigInteger.valueOf(primes[n]);
             case EXPONENTIAL -> BigInteger.valueOf(Math.max(1, n));
           };
-      for (var entry : exponents.entrySet()) {
-        int power = n <= lag ? 0 : power(entry.getValue(), n - lag);
-        step = power == 0 ? step : step.multiply(entry.getKey().pow(power));
-      }
       steps[n] = step;
     }
+    exponents.forEach((p, share) -> multiplyPowers(steps, p, share, lag));
     return steps;
   }
 
-  private static int power(Rational share, int n) {
-    return floor(share, n) - floor(share, n - 1);
-  }
-
-  private static int floor(Rational share, int n) {
-    return share.times(Rational.of(n)).floor().intValueExact();
+  /// Multiplies p at the places where ⌊(n−lag) share⌋ rises.
+  private static void multiplyPowers(BigInteger[] steps, BigInteger p, Rational share, int lag) {
+    long top = share.numerator().longValue();
+    long bottom = share.denominator().longValue();
+    long before = 0;
+    for (int n = lag + 1; n < steps.length; n++) {
+      long power = (n - lag) * top / bottom;
+      if (power > before) {
+        steps[n] = steps[n].multiply(p.pow((int) (power - before)));
+        before = power;
+      }
+    }
   }
 
   /// p where n is a power of the prime p, otherwise 1.

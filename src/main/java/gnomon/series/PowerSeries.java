@@ -180,6 +180,12 @@ public final class PowerSeries {
     int first = valuation + that.valuation;
     int last = Math.min(order + that.valuation, that.order + valuation);
     int length = Math.max(0, last - first + 1);
+    if (isMonomial(valuation)) {
+      return that.times(coefficients.getFirst()).shifted(valuation).truncated(last);
+    }
+    if (that.isMonomial(that.valuation)) {
+      return that.times(this);
+    }
     return run(
         that,
         first,
@@ -255,6 +261,12 @@ public final class PowerSeries {
   PowerSeries unitPower(Form exponent) {
     Form scale = coefficients.getFirst().inverse();
     PowerSeries unit = shifted(-valuation).times(scale);
+    if (exponent.isOne()) {
+      return unit;
+    }
+    if (exponent.equals(Form.MINUS_ONE)) {
+      return unit.inverse();
+    }
     int length = unit.coefficients.size();
     PowerSeries weight = constant(exponent, 0);
     return unit.run(
@@ -376,6 +388,9 @@ public final class PowerSeries {
     }
     long reach = (long) (order + 1) * inner.valuation - 1;
     int last = (int) Math.min(inner.order, reach);
+    if (isMonomial(1)) {
+      return inner.times(coefficients.getFirst()).truncated(last);
+    }
     int length = last + 1;
     return fromZero(
         inner,
