@@ -35,6 +35,11 @@ public final class ChineseRemainder {
   /// 1/M_i modulo p_i.
   private final int[] weights;
 
+  /// ⌊2^32 weight/p_i⌋, for products by a known factor, and ⌊2^62/p_i⌋.
+  private final long[] weightQuotients;
+
+  private final long[] reciprocals;
+
   /// The digits of M_1, …, M_k, and of M.
   private final int[][] cofactors;
 
@@ -47,12 +52,16 @@ public final class ChineseRemainder {
     modulus = product(0, fields.length);
     int length = modulus.bitLength() / DIGIT + 3;
     weights = new int[fields.length];
+    weightQuotients = new long[fields.length];
+    reciprocals = new long[fields.length];
     cofactors = new int[fields.length][];
     whole = digits(modulus, length);
     for (int i = 0; i < fields.length; i++) {
       Budget.checkpoint();
       cofactors[i] = quotient(whole, fields[i].prime());
       weights[i] = fields[i].inverse(residue(cofactors[i], fields[i]));
+      weightQuotients[i] = ((long) weights[i] << Integer.SIZE) / fields[i].prime();
+      reciprocals[i] = (1L << 62) / fields[i].prime();
     }
   }
 
@@ -125,18 +134,20 @@ public final class ChineseRemainder {
   private BigInteger integer(int[][] residues, int n, long[] sums) {
     Arrays.fill(sums, 0);
     long fraction = 0;
-    long quotient = 0;
     for (int i = 0; i < fields.length; i++) {
-      int weight = fields[i].times(residues[i][n], weights[i]);
+      long residue = residues[i][n];
+      long p = fields[i].prime();
+      long weight = residue * weights[i] - (residue * weightQuotients[i] >>> Integer.SIZE) * p;
+      weight = weight >= p ? weight - p : weight;
       if (weight != 0) {
-        fraction += ((long) weight << Integer.SIZE) / fields[i].prime();
+        fraction += weight * reciprocals[i] >> PrimeField.BITS;
         addProduct(sums, cofactors[i], weight);
       }
       if (i % FOLD == FOLD - 1) {
         carry(sums);
       }
     }
-    quotient = (fraction + (1L << (Integer.SIZE - 1))) >> Integer.SIZE;
+    long quotient = (fraction + (1L << (Integer.SIZE - 1))) >> Integer.SIZE;
     carry(sums);
     addProduct(sums, whole, -quotient);
     carry(sums);

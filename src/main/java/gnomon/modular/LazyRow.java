@@ -1,7 +1,5 @@
 package gnomon.modular;
 
-import java.util.Arrays;
-
 /// A row of sums of products modulo p that are reduced late: every place holds a number below 4p²,
 /// and after at most four more products below p² one subtraction of 4p² brings it back.
 ///
@@ -12,6 +10,7 @@ final class LazyRow {
   private final PrimeField field;
   private final long[] sums;
   private int pending;
+  private int lowest;
 
   /// A row of zeros.
   LazyRow(PrimeField field, int length) {
@@ -23,6 +22,7 @@ final class LazyRow {
   void add(int[] row, int count, int shift, int factor) {
     if (factor != 0) {
       addProduct(sums, shift, row, Math.min(count, sums.length - shift), factor);
+      lowest = pending == 0 ? shift : Math.min(lowest, shift);
       pending++;
       if (pending == 4) {
         fold();
@@ -38,14 +38,14 @@ final class LazyRow {
 
   private void fold() {
     long bound = 4L * field.prime() * field.prime();
-    fold(sums, sums.length, bound);
+    fold(sums, lowest, sums.length - lowest, bound);
     pending = 0;
   }
 
-  private static void fold(long[] sums, int count, long bound) {
+  private static void fold(long[] sums, int from, int count, long bound) {
     for (int j = 0; j < count; j++) {
-      long rest = sums[j] - bound;
-      sums[j] = rest + ((rest >> 63) & bound);
+      long rest = sums[from + j] - bound;
+      sums[from + j] = rest + ((rest >> 63) & bound);
     }
   }
 
@@ -67,11 +67,5 @@ final class LazyRow {
       residues[j] = (int) (sums[j] % p);
     }
     return residues;
-  }
-
-  /// The row of zeros again.
-  void clear() {
-    Arrays.fill(sums, 0);
-    pending = 0;
   }
 }
