@@ -135,7 +135,7 @@ public final class PowerTriangle {
     return bits;
   }
 
-  /// D_n (n!/k!) [t^n] w F^k at index [k][prime][n − k].
+  /// The residues of D_n (n!/k!) times the coefficient of t^n of w F^k, by k, prime and n − k.
   private int[][][] residues(List<PrimeField> primes, int[] needs) {
     int[][][] residues = new int[last + 1][][];
     for (int k = 0; k <= last; k++) {
