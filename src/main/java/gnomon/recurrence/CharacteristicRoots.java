@@ -24,8 +24,8 @@ import java.util.function.Function;
 ///
 /// @param roots pairwise different as forms, none of them zero
 /// @param complete whether with multiplicities they are all roots other than zero
-/// @param distinct forms that must not vanish for the roots to be different
-record CharacteristicRoots(List<Root> roots, boolean complete, List<Form> distinct) {
+/// @param bases the irreducible factors in an unknown of its own
+record CharacteristicRoots(List<Root> roots, boolean complete, List<Polynomial> bases) {
 
   /// A root and its multiplicity.
   record Root(Form value, int multiplicity) {}
@@ -87,7 +87,6 @@ record CharacteristicRoots(List<Root> roots, boolean complete, List<Form> distin
   static CharacteristicRoots of(List<Form> coefficients) {
     Form polynomial = Structure.polynomial(coefficients, Z);
     List<Root> roots = new ArrayList<>();
-    List<Form> distinct = new ArrayList<>();
     List<Polynomial> bases = new ArrayList<>();
     boolean complete = true;
     for (Factor factor : polynomial.numerator().factor().factors()) {
@@ -106,13 +105,19 @@ record CharacteristicRoots(List<Root> roots, boolean complete, List<Form> distin
         add(roots, root, factor.multiplicity());
       }
     }
+    return new CharacteristicRoots(List.copyOf(roots), complete, List.copyOf(bases));
+  }
+
+  /// Forms that must not vanish for the roots to be different.
+  List<Form> distinct() {
+    List<Form> distinct = new ArrayList<>();
     for (int i = 0; i < bases.size(); i++) {
       distinct.add(Form.of(Polynomial.resultant(bases.get(i), bases.get(i).derivative(Z), Z)));
       for (int j = 0; j < i; j++) {
         distinct.add(Form.of(Polynomial.resultant(bases.get(i), bases.get(j), Z)));
       }
     }
-    return new CharacteristicRoots(List.copyOf(roots), complete, List.copyOf(distinct));
+    return distinct;
   }
 
   private static void add(List<Root> roots, Form value, int multiplicity) {

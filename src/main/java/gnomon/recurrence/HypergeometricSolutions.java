@@ -4,7 +4,9 @@ import gnomon.algebra.Budget;
 import gnomon.form.Form;
 import gnomon.form.Structure;
 import gnomon.form.Variable;
+import gnomon.number.Rational;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -22,21 +24,95 @@ record HypergeometricSolutions(List<Form> ratios, boolean exhaustive) {
 
   private static final int MOST_PAIRS = 3_000;
 
+  /// A monic polynomial with its degree and its second coefficient.
+  private record Monic(Form form, int degree, Form second) {
+    static Monic of(Form form, Variable v) {
+      List<Form> list = Structure.asPolynomial(form, v).orElseThrow();
+      int degree = list.size() - 1;
+      return new Monic(form, degree, degree == 0 ? Form.ZERO : list.get(degree - 1));
+    }
+  }
+
+  /// The coefficients at the highest power and the one below in the equation for c.
+  private record LeadingTerms(List<Form> first, List<Form> second) {
+
+    /// From the coefficients of the c_i: P_i is c_i times i factors a and J − i factors b, moved.
+    static LeadingTerms of(List<List<Form>> lists, Monic a, Monic b) {
+      int order = lists.size() - 1;
+      int highest = -1;
+      for (int i = 0; i <= order; i++) {
+        highest = lists.get(i).isEmpty() ? highest : Math.max(highest, degree(lists, a, b, i));
+      }
+      List<Form> first = new ArrayList<>();
+      List<Form> second = new ArrayList<>();
+      for (int i = 0; i <= order; i++) {
+        List<Form> list = lists.get(i);
+        int below = list.isEmpty() ? 2 : highest - degree(lists, a, b, i);
+        first.add(below == 0 ? list.getLast() : Form.ZERO);
+        second.add(
+            below == 0 ? second(list, a, b, i, order) : below == 1 ? list.getLast() : Form.ZERO);
+      }
+      return new LeadingTerms(first, second);
+    }
+
+    private static int degree(List<List<Form>> lists, Monic a, Monic b, int i) {
+      return lists.get(i).size() - 1 + i * a.degree() + (lists.size() - 1 - i) * b.degree();
+    }
+
+    private static Form second(List<Form> list, Monic a, Monic b, int i, int order) {
+      long early = (long) i * (i - 1) / 2;
+      long late = (long) order * (order - 1) / 2 - early;
+      Form moved = Form.of(a.degree() * early + b.degree() * late);
+      Form sum =
+          moved
+              .plus(a.second().times(Rational.of(i)))
+              .plus(b.second().times(Rational.of(order - i)));
+      Form own = list.size() > 1 ? list.get(list.size() - 2) : Form.ZERO;
+      return own.plus(list.getLast().times(sum));
+    }
+
+    /// Whether the two highest powers leave a degree for c: with z a simple root it is the only d ≥
+    /// 0 with Σ z^i second_i + d Σ i z^i first_i = 0.
+    boolean allowsDegree(Form z) {
+      Form constant = Form.ZERO;
+      Form slope = Form.ZERO;
+      Form power = Form.ONE;
+      for (int i = 0; i < first.size(); i++) {
+        constant = constant.plus(second.get(i).times(power));
+        slope = slope.plus(first.get(i).times(power).times(Rational.of(i)));
+        power = power.times(z);
+      }
+      return slope.isZero()
+          || constant
+              .negated()
+              .dividedBy(slope)
+              .asInteger()
+              .filter(d -> d.signum() >= 0)
+              .isPresent();
+    }
+  }
+
   private static final class Search {
     private final LinearEquation equation;
     private final Variable v;
     private final List<Form> ratios = new ArrayList<>();
+    private final Map<List<Form>, CharacteristicRoots> known = new HashMap<>();
+    private final List<List<Form>> lists;
     private boolean exhaustive = true;
 
     Search(LinearEquation equation) {
       this.equation = equation;
       this.v = equation.variable();
+      this.lists =
+          equation.coefficients().stream()
+              .map(c -> Structure.asPolynomial(c, v).orElseThrow())
+              .toList();
     }
 
     void run() {
       Form last = ShiftFactors.moved(equation.leading(), v, 1 - equation.order());
-      List<Form> as = monicDivisors(equation.coefficients().getFirst());
-      List<Form> bs = monicDivisors(last);
+      List<Monic> as = monicDivisors(equation.coefficients().getFirst());
+      List<Monic> bs = monicDivisors(last);
       exhaustive =
           equation.coefficients().stream().allMatch(ShiftFactors::isWithoutRadicals)
               && hasLinearFactors(equation.coefficients().getFirst())
@@ -45,8 +121,8 @@ record HypergeometricSolutions(List<Form> ratios, boolean exhaustive) {
         exhaustive = false;
         return;
       }
-      for (Form a : as) {
-        for (Form b : bs) {
+      for (Monic a : as) {
+        for (Monic b : bs) {
           Budget.checkpoint();
           pair(a, b);
         }
@@ -59,7 +135,21 @@ record HypergeometricSolutions(List<Form> ratios, boolean exhaustive) {
           .allMatch(factor -> Structure.degree(factor, v).orElse(0) == 1);
     }
 
-    private void pair(Form a, Form b) {
+    private void pair(Monic a, Monic b) {
+      LeadingTerms leading = LeadingTerms.of(lists, a, b);
+      CharacteristicRoots roots = known.computeIfAbsent(leading.first(), CharacteristicRoots::of);
+      exhaustive &= roots.complete();
+      List<Form> products = List.of();
+      for (CharacteristicRoots.Root root : roots.roots()) {
+        if (leading.allowsDegree(root.value())) {
+          products = products.isEmpty() ? products(a.form(), b.form()) : products;
+          Form ratio = a.form().dividedBy(b.form()).times(root.value());
+          solve(ratio, scaled(products, root.value()));
+        }
+      }
+    }
+
+    private List<Form> products(Form a, Form b) {
       List<Form> products = new ArrayList<>();
       for (int i = 0; i <= equation.order(); i++) {
         Form product = equation.coefficients().get(i);
@@ -68,16 +158,7 @@ record HypergeometricSolutions(List<Form> ratios, boolean exhaustive) {
         }
         products.add(product);
       }
-      List<List<Form>> lists =
-          products.stream().map(p -> Structure.asPolynomial(p, v).orElseThrow()).toList();
-      int degree = lists.stream().mapToInt(List::size).max().orElse(0);
-      List<Form> top =
-          lists.stream().map(l -> l.size() == degree ? l.getLast() : Form.ZERO).toList();
-      CharacteristicRoots roots = CharacteristicRoots.of(top);
-      exhaustive &= roots.complete();
-      for (CharacteristicRoots.Root root : roots.roots()) {
-        solve(a.dividedBy(b).times(root.value()), scaled(products, root.value()));
-      }
+      return products;
     }
 
     private void solve(Form ratio, List<Form> coefficients) {
@@ -100,7 +181,7 @@ record HypergeometricSolutions(List<Form> ratios, boolean exhaustive) {
       return scaled;
     }
 
-    private List<Form> monicDivisors(Form polynomial) {
+    private List<Monic> monicDivisors(Form polynomial) {
       Map<Form, Integer> multiplicities = new LinkedHashMap<>();
       for (Form factor : ShiftFactors.of(polynomial, v).factors()) {
         List<Form> list = Structure.asPolynomial(factor, v).orElseThrow();
@@ -115,7 +196,7 @@ record HypergeometricSolutions(List<Form> ratios, boolean exhaustive) {
               before.forEach(d -> divisors.add(d.times(power)));
             }
           });
-      return divisors;
+      return divisors.stream().map(d -> Monic.of(d, v)).toList();
     }
   }
 
