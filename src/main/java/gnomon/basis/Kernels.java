@@ -4,6 +4,7 @@ import gnomon.form.Accumulation;
 import gnomon.form.AngleConstant;
 import gnomon.form.Arc;
 import gnomon.form.Base;
+import gnomon.form.CoefficientSeries;
 import gnomon.form.Constant;
 import gnomon.form.Dual;
 import gnomon.form.Elementary;
@@ -48,6 +49,7 @@ final class Kernels {
       case Harmonic harmonic -> List.of(harmonic.argument());
       case Unknown unknown -> List.of(unknown.argument());
       case Accumulation sum -> List.of(sum.lower(), sum.upper(), sum.body());
+      case CoefficientSeries series -> List.of(series.coefficient(), series.argument());
       case InverseSeries series -> List.of(series.argument());
       case Variable _, Dual _, Constant _, AngleConstant _ -> List.of();
     };

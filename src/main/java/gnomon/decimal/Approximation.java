@@ -7,6 +7,7 @@ import gnomon.form.Accumulation;
 import gnomon.form.AngleConstant;
 import gnomon.form.Arc;
 import gnomon.form.Base;
+import gnomon.form.CoefficientSeries;
 import gnomon.form.Constant;
 import gnomon.form.Dual;
 import gnomon.form.Exponential;
@@ -96,7 +97,7 @@ final class Approximation {
           SpecialValues.harmonic(real(argument), order, precision);
       case Variable _, Dual _, Unknown _ ->
           throw new Refusal(Reason.NOT_CONSTANT, Form.of(generator));
-      case Accumulation _, InverseSeries _ ->
+      case Accumulation _, CoefficientSeries _, InverseSeries _ ->
           throw new Refusal(Reason.NO_DIGITS, Form.of(generator));
     };
   }

@@ -6,6 +6,7 @@ import gnomon.form.Accumulation;
 import gnomon.form.AngleConstant;
 import gnomon.form.Arc;
 import gnomon.form.Base;
+import gnomon.form.CoefficientSeries;
 import gnomon.form.Constant;
 import gnomon.form.Dual;
 import gnomon.form.Elementary;
@@ -83,6 +84,7 @@ final class Conjugate {
               Dual _,
               Unknown _,
               Accumulation _,
+              CoefficientSeries _,
               InverseSeries _ ->
               false;
         };

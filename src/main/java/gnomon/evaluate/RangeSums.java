@@ -39,6 +39,13 @@ final class RangeSums {
 
   Value value(Limits limits, Expression body, boolean adding, Scope scope) {
     Span span = limits.span().to(body.span());
+    Optional<Value> series =
+        adding
+            ? Places.at(span, () -> new OperatorSeries(evaluator).value(limits, body, scope))
+            : Optional.empty();
+    if (series.isPresent()) {
+      return series.get();
+    }
     Optional<Form> form = symbolic(limits, body, scope);
     return form.isPresent()
         ? Places.at(span, () -> ofForm(limits, form.get(), adding, scope))

@@ -167,7 +167,13 @@ final class CompositionalInverse {
           series.of().dependsOn(s) && !series.in().equals(s)
               ? List.of()
               : solve(series.argument(), series.of().substitute(series.in(), z.power(m)));
-      case Constant _, AngleConstant _, Factorial _, Harmonic _, Unknown _, Accumulation _ ->
+      case Constant _,
+          AngleConstant _,
+          Factorial _,
+          Harmonic _,
+          Unknown _,
+          Accumulation _,
+          CoefficientSeries _ ->
           throw new Refusal(Reason.NO_CLOSED_FORM, Form.of(kernel));
     };
   }

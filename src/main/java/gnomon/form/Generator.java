@@ -20,6 +20,7 @@ public sealed interface Generator extends Indeterminate
         Harmonic,
         Unknown,
         Accumulation,
+        CoefficientSeries,
         InverseSeries {
 
   /// A spelling that tells this generator from every other one.

@@ -42,6 +42,7 @@ final class KernelLimit {
               Arc _,
               Unknown _,
               Accumulation _,
+              CoefficientSeries _,
               InverseSeries _ ->
               null;
         };

@@ -85,6 +85,7 @@ final class FactorNotation {
           gnomon.form.Harmonic _,
           gnomon.form.Unknown _,
           gnomon.form.Accumulation _,
+          gnomon.form.CoefficientSeries _,
           gnomon.form.InverseSeries _ ->
           functions;
     };

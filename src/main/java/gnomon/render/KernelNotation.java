@@ -3,6 +3,7 @@ package gnomon.render;
 import gnomon.form.Accumulation;
 import gnomon.form.AngleConstant;
 import gnomon.form.Arc;
+import gnomon.form.CoefficientSeries;
 import gnomon.form.Constant;
 import gnomon.form.Dual;
 import gnomon.form.Exponential;
@@ -58,6 +59,7 @@ final class KernelNotation {
       case Harmonic(Form argument, int order) -> new Notation.Harmonic(inner(argument), order);
       case Unknown unknown -> unknown(unknown);
       case Accumulation accumulation -> accumulation(accumulation);
+      case CoefficientSeries series -> coefficientSeries(series);
       case InverseSeries inverse -> inverse(inverse);
     };
   }
@@ -92,6 +94,17 @@ final class KernelNotation {
         inner(of.lower()),
         inner(of.upper()),
         forms.of(of.body()));
+  }
+
+  private Notation coefficientSeries(CoefficientSeries of) {
+    Notation index = Notation.name(of.index().name());
+    Notation power = new Notation.Power(inner(of.argument()), index);
+    return new Notation.Binder(
+        Glyph.SIGMA,
+        index,
+        Notation.of(0),
+        new Notation.Name(Glyph.INFINITY),
+        TermNotation.scaled(forms.of(of.coefficient()), power));
   }
 
   /// f̄(a) = ε(0) U⁻¹ D U e^(ax), where U carries D to f(D); of an operator, f̄(D) = U⁻¹ D U.

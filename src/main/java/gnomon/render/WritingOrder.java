@@ -180,6 +180,7 @@ final class WritingOrder {
           gnomon.form.Harmonic _,
           Unknown _,
           gnomon.form.Accumulation _,
+          gnomon.form.CoefficientSeries _,
           gnomon.form.InverseSeries _ ->
           Form.of(generator).isConstant() ? 3 : 1;
     };

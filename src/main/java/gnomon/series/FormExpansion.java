@@ -7,6 +7,7 @@ import gnomon.form.Accumulation;
 import gnomon.form.AngleConstant;
 import gnomon.form.Arc;
 import gnomon.form.Base;
+import gnomon.form.CoefficientSeries;
 import gnomon.form.Constant;
 import gnomon.form.Dual;
 import gnomon.form.Elementary;
@@ -221,6 +222,7 @@ final class FormExpansion {
       case Logarithm(Form argument) -> logarithm(argument, g);
       case Arc _ -> fromDerivative(g);
       case InverseSeries inverse -> inverseSeries(inverse);
+      case CoefficientSeries series -> coefficientSeries(series);
       case Variable _, Dual _, Constant _, AngleConstant _, Exponential _ ->
           throw new IllegalStateException("expanded elsewhere: " + g.key());
       case Factorial _, Harmonic _, Unknown _, Accumulation _ ->
@@ -247,6 +249,18 @@ final class FormExpansion {
     Form start = Form.of(g).substitute(t, Form.ZERO);
     PowerSeries rest = slope.integral();
     return rest.plus(PowerSeries.constant(start, rest.order())).truncated(work);
+  }
+
+  private PowerSeries coefficientSeries(CoefficientSeries given) {
+    PowerSeries argument = series(given.argument());
+    if (argument.valuation() < 1 || given.coefficient().dependsOn(t)) {
+      throw new Refusal(Reason.NO_SERIES, Form.of(given));
+    }
+    List<Form> coefficients = new ArrayList<>();
+    for (int k = 0; k <= work; k++) {
+      coefficients.add(given.coefficient().substitute(given.index(), Form.of(k)));
+    }
+    return PowerSeries.of(coefficients, 0, work).compose(argument);
   }
 
   private PowerSeries inverseSeries(InverseSeries inverse) {
