@@ -107,7 +107,9 @@ public final class DefiniteProducts {
     boolean endsAtOrAboveZero = last.asInteger().filter(end -> end.signum() >= 0).isPresent();
     if (startsAtOrBelowZero || endsAtOrAboveZero) {
       if (multiplicity < 0) {
-        throw new Refusal(Reason.POLE_IN_RANGE, offset.negated(), startsAtOrBelowZero ? a : b);
+        throw startsAtOrBelowZero
+            ? new Refusal(Reason.POLE_IN_RANGE, first.negated(), a)
+            : new Refusal(Reason.POLE_IN_RANGE, last, b);
       }
       // the factor vanishes at a point of every range that reaches it
       conditions.add(
