@@ -4,8 +4,10 @@ import gnomon.algebra.Reason;
 import gnomon.algebra.Refusal;
 import gnomon.form.Accumulation;
 import gnomon.form.Form;
+import gnomon.form.Harmonic;
 import gnomon.form.Variable;
 import gnomon.number.Rational;
+import gnomon.polynomial.Monomial;
 import gnomon.recurrence.HypergeometricTotal;
 import java.math.BigInteger;
 import java.util.ArrayList;
@@ -51,6 +53,13 @@ public final class DefiniteSums {
   }
 
   private DefiniteSum found(Form summand, Variable k, Form a, Form b) {
+    Form factor = harmonicFactor(summand, k);
+    if (!factor.isOne()) {
+      DefiniteSum rest = found(summand.dividedBy(factor), k, a, b);
+      if (rest.status() == DefiniteSum.Status.CLOSED_FORM) {
+        return DefiniteSum.closed(rest.value().times(factor), rest.conditions());
+      }
+    }
     Form span = b.minus(a);
     Optional<Rational> length = span.asRational();
     if (length.isPresent()) {
@@ -98,6 +107,20 @@ public final class DefiniteSums {
     return Optional.of(sum)
         .filter(found -> found.status() == DefiniteSum.Status.CLOSED_FORM)
         .map(found -> found.substituted(n, Form.of(n).minus(Form.of(m))));
+  }
+
+  /// The harmonic numbers free of k by which a summand that depends on k is divisible.
+  private static Form harmonicFactor(Form summand, Variable k) {
+    Form factor = Form.ONE;
+    if (summand.dependsOn(k)) {
+      Monomial content = summand.numerator().monomialContent();
+      for (Monomial.Power power : content.factors()) {
+        if (power.indeterminate() instanceof Harmonic harmonic && !harmonic.dependsOn(k)) {
+          factor = factor.times(Form.of(harmonic, power.exponent()));
+        }
+      }
+    }
+    return factor;
   }
 
   /// A range of a known number of points.

@@ -12,8 +12,8 @@ public enum FunctionClass {
   RATIONAL_WITH_HARMONIC_NUMBERS("rational functions with harmonic numbers"),
   /// Terms whose ratio t(x+1)/t(x) is a rational function of x.
   HYPERGEOMETRIC("hypergeometric terms"),
-  /// Sums of products of a hypergeometric term with a polynomial in harmonic numbers over the
-  /// rational functions: those of the summand, and any further harmonic numbers H(x + c, r).
+  /// Sums of products of a hypergeometric term with a rational function of x and of harmonic
+  /// numbers: those of the summand, and any further harmonic numbers H(x + c, r).
   HYPERGEOMETRIC_WITH_HARMONIC_NUMBERS("hypergeometric terms with harmonic numbers"),
   /// Sums of functions of the classes above, each summed on its own.
   MIXED("sums of functions of several classes");

@@ -52,7 +52,8 @@ record HarmonicSummand(Map<Generator, Form> steps, List<Part> parts) {
     return parts(f, x, steps, powers).map(parts -> new HarmonicSummand(steps, parts));
   }
 
-  private static boolean isPower(Generator g) {
+  /// Whether the generator is a factorial or a power.
+  static boolean isPower(Generator g) {
     return g instanceof Factorial
         || g instanceof Exponential power && !(power.base() instanceof Base.Zero);
   }

@@ -30,7 +30,9 @@ final class HarmonicTowerSolver implements AntidifferenceSolver {
     Form rescaled = h.isOne() ? f : f.substitute(x, Form.of(x).times(h));
     Optional<HarmonicSummand> summand = HarmonicSummand.of(rescaled, x);
     if (summand.isEmpty()) {
-      return none;
+      return HarmonicDenominators.proveAbsence(rescaled, x)
+          ? new Antidifference.ProvedAbsent(searches())
+          : none;
     }
     HarmonicTower tower = new HarmonicTower(x, summand.get().steps());
     HarmonicTower.Outcome outcome = tower.solve(levels(summand.get()));

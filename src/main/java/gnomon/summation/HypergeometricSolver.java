@@ -1,6 +1,7 @@
 package gnomon.summation;
 
 import gnomon.form.Form;
+import gnomon.form.Generator;
 import gnomon.form.Structure;
 import gnomon.form.Univariate;
 import gnomon.form.Variable;
@@ -11,7 +12,8 @@ import java.util.Optional;
 ///
 /// With t(k+1)/t(k) = a(k)/b(k)·c(k+1)/c(k) in Gosper's form, T(k) = b(k−1) y(k)/c(k)·t(k) is an
 /// antidifference exactly for the polynomial solutions y of a(k) y(k+1) − b(k−1) y(k) = c(k); where
-/// there is none, no hypergeometric term is an antidifference.
+/// there is none, no hypergeometric term is an antidifference; that is claimed where no i and no
+/// radical stands in the term.
 ///
 /// Source: R. W. Gosper (1978), as told in Petkovšek, Wilf, Zeilberger, A = B (1996), chapter 5,
 /// from memory.
@@ -39,7 +41,7 @@ final class HypergeometricSolver implements AntidifferenceSolver {
     Optional<KeyEquation.Solution> solution =
         new KeyEquation(form.a(), lowered, List.of(form.c())).solve(x);
     if (solution.isEmpty()) {
-      return new Antidifference.ProvedAbsent(searches());
+      return isWithoutRadicals(term.get()) ? new Antidifference.ProvedAbsent(searches()) : none;
     }
     Form y = Structure.polynomial(solution.get().y(), x);
     Form factor = Structure.polynomial(lowered.coefficients(), x).times(y);
@@ -49,5 +51,12 @@ final class HypergeometricSolver implements AntidifferenceSolver {
     Form sum = factor.dividedBy(scale).times(rescaled);
     Form value = h.isOne() ? sum : sum.substitute(x, Form.of(x).dividedBy(h));
     return new Antidifference.Found(value, List.of(), searches());
+  }
+
+  /// Whether factors over ℚ decide which factors are shifts of one another: beside i or a radical
+  /// they may split further.
+  private static boolean isWithoutRadicals(HypergeometricTerm term) {
+    return term.term().generators().stream().noneMatch(Generator::isAlgebraic)
+        && term.ratio().generators().stream().noneMatch(Generator::isAlgebraic);
   }
 }
