@@ -18,13 +18,13 @@ import java.util.Arrays;
 public final class ResidueSeries {
 
   /// A step of a transform costs about as much as so many products in a row.
-  private static final int TRANSFORM_COST = 12;
+  private static final int TRANSFORM_COST = 5;
 
   /// Up to this length inverses take products, from there on transforms of their own.
   private static final int SHORT_INVERSE = 256;
 
   /// Up to this length compositions go in baby steps and giant steps.
-  private static final int SHORT_COMPOSITION = 256;
+  private static final int SHORT_COMPOSITION = 192;
 
   /// Up to this length series are formed coefficient by coefficient.
   private static final int SHORT_SERIES = 32;

@@ -98,18 +98,39 @@ final class LowestTerms {
     return common.shiftLeft(twos);
   }
 
-  /// The highest power of p that divides both, by repeated squaring.
+  /// The highest power of p that divides both, which mostly shows in the remainders by the highest
+  /// power of p that fits a word.
   private static BigInteger commonPower(BigInteger a, BigInteger b, BigInteger p) {
-    BigInteger[] first = a.divideAndRemainder(p);
-    BigInteger[] second = b.divideAndRemainder(p);
-    if (first[1].signum() != 0 || second[1].signum() != 0) {
-      return BigInteger.ONE;
+    long prime = p.longValue();
+    long chunk = prime;
+    int size = 1;
+    for (; chunk * prime < 1L << 31; size++) {
+      chunk *= prime;
     }
-    BigInteger square = commonPower(first[0], second[0], p.multiply(p));
-    BigInteger left = first[0].divide(square);
-    BigInteger right = second[0].divide(square);
-    boolean more = left.mod(p).signum() == 0 && right.mod(p).signum() == 0;
-    BigInteger power = p.multiply(square);
-    return more ? power.multiply(p) : power;
+    BigInteger divisor = BigInteger.valueOf(chunk);
+    BigInteger left = a;
+    BigInteger right = b;
+    int power = 0;
+    while (true) {
+      int most =
+          Math.min(
+              valuation(left.mod(divisor).longValue(), prime, size),
+              valuation(right.mod(divisor).longValue(), prime, size));
+      power += most;
+      if (most < size) {
+        return p.pow(power);
+      }
+      left = left.divide(divisor);
+      right = right.divide(divisor);
+    }
+  }
+
+  /// How often p divides the number, at most `limit` times, which is the answer for 0.
+  private static int valuation(long number, long prime, int limit) {
+    int power = 0;
+    for (long rest = number; power < limit && rest % prime == 0; rest /= prime) {
+      power++;
+    }
+    return power;
   }
 }

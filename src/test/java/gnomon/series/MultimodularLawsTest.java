@@ -15,7 +15,7 @@ import org.junit.jupiter.api.Test;
 final class MultimodularLawsTest {
 
   private static final long SEED = 500_123;
-  private static final int[] LENGTHS = {2, 3, 5, 23, 24, 25, 31, 32, 33, 63, 64, 65};
+  private static final int[] LENGTHS = {2, 3, 5, 23, 24, 25, 63, 64};
   private static final RationalCoefficients FIELD = RationalCoefficients.FIELD;
 
   private final Random random = new Random(SEED);
@@ -126,7 +126,7 @@ final class MultimodularLawsTest {
   @Test
   void compositionsAndReversionsAgreeWithBabyStepsAndGiantSteps() {
     for (Sort sort : Sort.values()) {
-      for (int length : new int[] {2, 3, 5, 7, 8, 9, 31, 32, 33}) {
+      for (int length : new int[] {2, 3, 7, 8, 31, 32}) {
         List<Rational> inner = series(sort, length, Rational.ZERO, Rational.of(-2, 3));
         List<Rational> outer = series(sort, length, Rational.of(1, 5));
         List<Rational> plain = SeriesAlgorithms.compose(FIELD, outer, inner, length);
@@ -144,7 +144,7 @@ final class MultimodularLawsTest {
   @Test
   void theReversionOfTheReversionIsTheSeries() {
     for (Sort sort : Sort.values()) {
-      int length = 70;
+      int length = 40;
       List<Rational> f = series(sort, length, Rational.ZERO, Rational.ONE);
       assertEquals(f, FIELD.reversion(FIELD.reversion(f, length), length), message(sort, length));
     }
@@ -152,7 +152,7 @@ final class MultimodularLawsTest {
 
   @Test
   void compositionIsAssociative() {
-    int length = 60;
+    int length = 36;
     List<Rational> f = series(Sort.RECIPROCAL, length, Rational.of(1, 2));
     List<Rational> g = series(Sort.EXPONENTIAL, length, Rational.ZERO);
     List<Rational> h = series(Sort.SMALL_DENOMINATOR, length, Rational.ZERO);
