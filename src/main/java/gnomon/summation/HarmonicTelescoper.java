@@ -22,7 +22,7 @@ final class HarmonicTelescoper {
   private HarmonicTelescoper() {}
 
   /// The telescoper of least order up to the limit, or nothing where none is found. It has been
-  /// checked by forming the difference of G.
+  /// checked by dividing by the summand.
   static Optional<Telescoper> of(Form summand, Variable n, Variable k, int maximalOrder) {
     if (!summand.dependsOn(n)) {
       return Optional.empty();
@@ -80,15 +80,17 @@ final class HarmonicTelescoper {
     return new Telescoper(coefficients, solution.sum().times(scale).dividedBy(summand));
   }
 
-  /// Whether Σ_i c_i F(n+i, k) = G(n, k+1) − G(n, k) in the normal form.
+  /// Whether Σ_i c_i F(n+i, k) = G(n, k+1) − G(n, k), divided by F(n, k), in the normal form.
   private static boolean confirms(
       Telescoper telescoper, Form summand, List<Form> moved, Variable k) {
     Form left = Form.ZERO;
     for (int i = 0; i < moved.size(); i++) {
       left = left.plus(telescoper.coefficients().get(i).times(moved.get(i)));
     }
-    Form anti = telescoper.certificate().times(summand);
-    return Differencing.confirms(anti, left, k, Form.ONE)
+    Form certificate = telescoper.certificate();
+    Form ratio = GosperForm.moved(summand, k, 1).dividedBy(summand);
+    Form next = GosperForm.moved(certificate, k, 1).times(ratio);
+    return left.dividedBy(summand).equals(next.minus(certificate))
         && !telescoper.coefficients().getLast().isZero();
   }
 }
