@@ -19,7 +19,7 @@ import java.util.Optional;
 /// denominator of the block and the values have in common is taken out. A right side is carried
 /// along by its own ratio.
 public final class Unrolling {
-  private static final int BLOCK = 2048;
+  private static final int BLOCK = 4096;
 
   private final List<IntegerPolynomial> coefficients;
   private final Optional<List<IntegerPolynomial>> ratio;
