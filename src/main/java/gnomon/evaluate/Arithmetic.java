@@ -145,6 +145,9 @@ final class Arithmetic {
       return Sorts.of(Elementary.power(left.form(), right.form()), scope);
     }
     if (base instanceof FormValue left && Sorts.acts(exponent)) {
+      if (left.form().isZero()) {
+        throw Problems.of("domain-power", "0 has no power with an operator in it", span, "2^D");
+      }
       Operator rate = plain(exponent, span);
       return Sorts.of(rate.lift(symbol -> Elementary.power(left.form(), symbol)));
     }

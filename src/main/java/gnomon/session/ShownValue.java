@@ -1,9 +1,12 @@
 package gnomon.session;
 
+import gnomon.algebra.Halt;
+import gnomon.algebra.Refusal;
 import gnomon.form.Variable;
 import gnomon.render.Rendering;
 import gnomon.value.Value;
 import java.util.List;
+import java.util.function.Supplier;
 
 /// A value shown by the room that renders, with operators acting on the running variable.
 record ShownValue(Value value, Variable running) implements Shown {
@@ -22,12 +25,24 @@ record ShownValue(Value value, Variable running) implements Shown {
 
   @Override
   public List<String> lines(Spelling spelling, int width) {
-    return rendering(spelling, running).withWidth(width).text(value).lines().toList();
+    return written(() -> rendering(spelling, running).withWidth(width).text(value))
+        .lines()
+        .toList();
   }
 
   @Override
   public String latex() {
-    return Rendering.latex().withRunning(running).line(value);
+    return written(() -> Rendering.latex().withRunning(running).line(value));
+  }
+
+  /// What is written, or that it cannot be: a value is written after its statement is done, when
+  /// nothing may fail any more.
+  private static String written(Supplier<String> text) {
+    try {
+      return text.get();
+    } catch (Refusal | Halt | StackOverflowError unwritable) {
+      return "(this value cannot be written)";
+    }
   }
 
   static Rendering rendering(Spelling spelling, Variable running) {
