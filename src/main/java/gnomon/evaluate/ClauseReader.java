@@ -6,6 +6,7 @@ import gnomon.basis.Basis;
 import gnomon.basis.MappedOperator;
 import gnomon.diagnostic.Span;
 import gnomon.form.Form;
+import gnomon.form.Generator;
 import gnomon.form.Structure;
 import gnomon.form.Variable;
 import gnomon.operator.Operator;
@@ -23,6 +24,7 @@ import gnomon.value.Shape;
 import gnomon.value.Status;
 import gnomon.value.Value;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 
 /// What the clauses after an expression make of its value, from left to right. `in Q` followed by
@@ -46,10 +48,11 @@ final class ClauseReader {
       return tables.value(before(clausal), table, scope);
     }
     List<Condition> earlier = evaluation.conditions();
+    Scope inside = substitutions.free(clauses, scope);
     Value value;
     int at = 0;
     try {
-      value = evaluator.value(clausal.subject(), scope);
+      value = evaluator.value(clausal.subject(), inside);
     } catch (LocatedRefusal refused) {
       Optional<Value> point = atPoint(refused, clausal, scope);
       if (point.isPresent() && clauses.size() == 1) {
@@ -61,7 +64,7 @@ final class ClauseReader {
       }
       value =
           evaluation.truncating(
-              evaluator.whole(order, scope), () -> evaluator.value(clausal.subject(), scope));
+              evaluator.whole(order, scope), () -> evaluator.value(clausal.subject(), inside));
       at = 1;
     }
     while (at < clauses.size()) {
@@ -76,6 +79,7 @@ final class ClauseReader {
       }
       if (clause instanceof Clause.At values && values.substitutions().size() > 1) {
         value = putIn(value, values, upTo(clausal, at), clausal.subject().span(), scope);
+        settle(earlier, values, scope);
         at++;
         continue;
       }
@@ -93,9 +97,25 @@ final class ClauseReader {
                   joined
                       ? expandedTo(before, clause, order.get(), scope)
                       : applied(before, clause, scope));
+      if (clause instanceof Clause.At values) {
+        settle(earlier, values, scope);
+      }
       at += joined ? 2 : 1;
     }
     return value;
+  }
+
+  /// Puts the values also into the side conditions met since; those that become numbers hold.
+  private void settle(List<Condition> earlier, Clause.At values, Scope scope) {
+    Map<Generator, Form> images = substitutions.images(values, scope);
+    List<Condition> since =
+        evaluation.conditions().stream()
+            .filter(condition -> !earlier.contains(condition))
+            .map(met -> new Condition(met.subject().substitute(images), met.relation()))
+            .filter(met -> !met.subject().isConstant())
+            .toList();
+    evaluation.conditions(earlier);
+    evaluation.require(since);
   }
 
   /// The value of an equation without a formula for its solution, where its variable is a number.

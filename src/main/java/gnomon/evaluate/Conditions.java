@@ -80,7 +80,8 @@ final class Conditions {
                 || power.unit().generators().contains(Constant.I));
   }
 
-  private String words(Condition condition) {
+  /// One condition, without the word before it.
+  String words(Condition condition) {
     String subject = text(condition.subject());
     return switch (condition.relation()) {
       case NOT_ZERO -> compared(condition.subject(), " != ");

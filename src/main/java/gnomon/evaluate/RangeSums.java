@@ -8,6 +8,7 @@ import gnomon.evaluate.Binders.Limits;
 import gnomon.form.Form;
 import gnomon.form.Structure;
 import gnomon.form.Variable;
+import gnomon.number.Rational;
 import gnomon.summation.Condition;
 import gnomon.summation.DefiniteProducts;
 import gnomon.summation.DefiniteSum;
@@ -63,8 +64,8 @@ final class RangeSums {
       for (Condition condition : met) {
         if (!Validity.concerns(condition, Map.of(limits.variable(), Form.ZERO))) {
           evaluation.require(List.of(condition));
-        } else if (!requiredAtEnds(condition, limits)) {
-          return withoutClosedForm(limits, met, body);
+        } else if (!holdsInRange(condition, limits)) {
+          return withoutClosedForm(limits, condition, body);
         }
       }
       if (value instanceof FormValue form) {
@@ -86,29 +87,57 @@ final class RangeSums {
     }
   }
 
-  /// Whether a condition on the bound variable holds at both ends of the range, and so between
-  /// them; at a symbolic end it is required.
+  /// Whether a condition on the bound variable holds on the whole range. One that holds at both
+  /// ends of it and so between them is looked at there, and required at a symbolic end. That a
+  /// subject is not zero is looked at at the lower end only: elsewhere the limit of the closed form
+  /// is the sum.
+  private boolean holdsInRange(Condition condition, Limits limits) {
+    Form subject = condition.subject();
+    Variable k = limits.variable();
+    Optional<Form> slope = slope(subject, k);
+    return switch (condition.relation()) {
+      case NATURAL, POSITIVE, FINITE_FACTORIAL, RANGE_LENGTH ->
+          slope.isPresent()
+              && (limits.upper().isPresent() || isPositive(slope.get()))
+              && requiredAtEnds(condition, limits);
+      case INSIDE_UNIT ->
+          slope.isPresent()
+              ? limits.upper().isPresent() && requiredAtEnds(condition, limits)
+              : slope(subject.inverse(), k).filter(RangeSums::isPositive).isPresent()
+                  && subject
+                      .substitute(k, limits.lower())
+                      .asRational()
+                      .filter(RangeSums::isInUnit)
+                      .isPresent();
+      case NOT_ZERO -> !Validity.fails(List.of(condition), Map.of(k, limits.lower()));
+      case INTEGER ->
+          slope.flatMap(Form::asInteger).isPresent()
+              && !Validity.fails(List.of(condition), Map.of(k, limits.lower()));
+      case NOT_IN_RANGE -> false;
+    };
+  }
+
+  private static Optional<Form> slope(Form form, Variable k) {
+    return Structure.asPolynomial(form, k).filter(c -> c.size() == 2).map(List::getLast);
+  }
+
+  private static boolean isPositive(Form slope) {
+    return slope.asRational().filter(value -> value.sign() > 0).isPresent();
+  }
+
+  /// Whether the value is in (0, 1), where the reciprocal of a rising function stays.
+  private static boolean isInUnit(Rational value) {
+    return value.sign() > 0 && value.compareTo(Rational.ONE) < 0;
+  }
+
   private boolean requiredAtEnds(Condition condition, Limits limits) {
-    Optional<List<Form>> linear = Structure.asPolynomial(condition.subject(), limits.variable());
-    boolean ordered =
-        switch (condition.relation()) {
-          case NATURAL, POSITIVE -> linear.filter(c -> c.size() == 2).isPresent();
-          case NOT_ZERO, INTEGER, INSIDE_UNIT, FINITE_FACTORIAL, NOT_IN_RANGE, RANGE_LENGTH ->
-              false;
-        };
-    if (!ordered) {
-      return !Validity.fails(List.of(condition), Map.of(limits.variable(), limits.lower()));
-    }
-    boolean rising = linear.get().getLast().asRational().filter(r -> r.sign() > 0).isPresent();
-    if (!rising && limits.upper().isEmpty()) {
-      return false;
-    }
     for (Form end : limits.all()) {
-      Condition there =
-          new Condition(
-              condition.subject().substitute(limits.variable(), end), condition.relation());
-      if (!there.subject().isConstant()) {
-        evaluation.require(List.of(there));
+      Form there = condition.subject().substitute(limits.variable(), end);
+      if (!there.isConstant()) {
+        boolean length = condition.relation() == Condition.Relation.RANGE_LENGTH;
+        evaluation.require(
+            List.of(
+                new Condition(there, length ? Condition.Relation.NATURAL : condition.relation())));
       } else if (Validity.fails(List.of(condition), Map.of(limits.variable(), end))) {
         return false;
       }
@@ -118,18 +147,17 @@ final class RangeSums {
 
   /// A body whose closed form does not hold on the whole range: between numbers it is evaluated for
   /// each, otherwise refused.
-  private Optional<Form> withoutClosedForm(
-      Limits limits, List<Condition> conditions, Expression body) {
+  private Optional<Form> withoutClosedForm(Limits limits, Condition condition, Expression body) {
     if (limits.isNumeric()) {
       return Optional.empty();
     }
-    String words = new Conditions(evaluation.writing(), limits.variable()).words(conditions);
+    String words = new Conditions(evaluation.writing(), limits.variable()).words(condition);
     throw new DiagnosedException(
         Diagnostic.of(
                 "domain-validity",
                 "the closed form of the summand does not hold on the range",
                 body.span())
-            .withEvidence("It holds " + words + "."));
+            .withEvidence("It holds for " + words + "."));
   }
 
   private Value ofForm(Limits limits, Form body, boolean adding, Scope scope) {

@@ -47,6 +47,23 @@ final class Substitutions {
     return inside;
   }
 
+  /// The scope for what stands before the clauses, in which the variables that get values there are
+  /// free, whatever they stand for outside.
+  Scope free(List<Clause> clauses, Scope scope) {
+    Scope inside = scope;
+    for (Clause clause : clauses) {
+      if (clause instanceof Clause.At values) {
+        for (Clause.Substitution substitution : values.substitutions()) {
+          String name = substitution.variable().text();
+          if (inside.binding(name).orElse(null) instanceof Binding.Held) {
+            inside = inside.without(name);
+          }
+        }
+      }
+    }
+    return inside;
+  }
+
   /// What is put in for which variable.
   Map<Generator, Form> images(Clause.At clause, Scope scope) {
     Map<Generator, Form> images = new HashMap<>();

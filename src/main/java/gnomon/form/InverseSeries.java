@@ -21,14 +21,14 @@ public record InverseSeries(Form of, Dual in, Form argument) implements Generato
     return 8;
   }
 
+  /// From f(g) = argument: f′(g) dg/dv + (∂f/∂v)(g) is the derivative of the argument, where f may
+  /// have v for a parameter.
   @Override
   public Form derivative(Generator v) {
-    Form inner = argument.derivative(v);
-    if (inner.isZero()) {
-      return inner;
-    }
-    Form slope = of.derivative(in).substitute(Map.of(in, Form.of(this)));
-    return inner.dividedBy(slope);
+    Map<Generator, Form> here = Map.of(in, Form.of(this));
+    Form direct = v.equals(in) ? Form.ZERO : of.derivative(v).substitute(here);
+    Form inner = argument.derivative(v).minus(direct);
+    return inner.isZero() ? inner : inner.dividedBy(of.derivative(in).substitute(here));
   }
 
   @Override

@@ -35,7 +35,9 @@ public record Condition(Form subject, Relation relation) {
     Objects.requireNonNull(relation);
   }
 
+  /// That the subject is not zero, said of its numerator alone.
   static Condition notZero(Form subject) {
-    return new Condition(subject, Relation.NOT_ZERO);
+    Form numerator = Form.of(subject.numerator().primitivePart());
+    return new Condition(numerator, Relation.NOT_ZERO);
   }
 }

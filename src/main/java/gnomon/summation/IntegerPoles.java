@@ -39,9 +39,10 @@ record IntegerPoles(
     return poles;
   }
 
-  /// Whether a root of the denominator is no pole, because a reciprocal factorial vanishes there.
+  /// Whether a root of the denominator is no pole, because a kernel makes the numerator vanish
+  /// there, as a reciprocal factorial does, or 1 − k^n at k = 1.
   private static boolean isFinite(Form f, Variable k, BigInteger point) {
-    if (f.generators().stream().noneMatch(g -> g instanceof Factorial && g.dependsOn(k))) {
+    if (f.generators().stream().allMatch(g -> g.equals(k) || !g.dependsOn(k))) {
       return false;
     }
     try {

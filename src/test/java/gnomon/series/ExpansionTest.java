@@ -89,6 +89,18 @@ class ExpansionTest {
     assertEquals(rationals("0 1 1 3/2 8/3 125/24"), series.coefficients());
   }
 
+  @Test
+  void inverseSeriesAreDifferentiatedByTheirParameters() {
+    Dual t = new Dual(X);
+    Variable a = new Variable("a");
+    Form f = Form.of(t).times(Elementary.exp(Form.of(t).times(Form.of(a)).negated()));
+    Form inverse = InverseSeries.of(f, t, FX);
+    PowerSeries slope = Expansion.of(inverse.derivative(a), X, 5);
+    assertEquals(
+        Expansion.of(inverse, X, 5).coefficients().stream().map(c -> c.derivative(a)).toList(),
+        slope.coefficients());
+  }
+
   @ParameterizedTest
   @ValueSource(longs = {1, 2, 3, 4, 5, 6, 7, 8, 9, 10, 11, 12})
   void expansionIsAHomomorphism(long seed) {
