@@ -3,6 +3,7 @@ package gnomon.basis;
 import gnomon.algebra.Budget;
 import gnomon.form.Dual;
 import gnomon.form.Form;
+import gnomon.form.InverseSeries;
 import gnomon.form.Structure;
 import gnomon.number.Rational;
 import gnomon.polynomial.Polynomial;
@@ -33,8 +34,7 @@ sealed interface Recurrence {
 
   private static Optional<Recurrence> inIndex(ShefferMap map) {
     Dual t = map.dual();
-    if (ShefferMap.containsInverseSeries(map.inverseOfF())
-        || ShefferMap.containsInverseSeries(map.weight())) {
+    if (isDeep(map.inverseOfF(), t) || isDeep(map.weight(), t)) {
       return Optional.empty();
     }
     Form slope = map.inverseOfF().derivative(t);
@@ -54,7 +54,7 @@ sealed interface Recurrence {
 
   private static Optional<Recurrence> inDerivatives(ShefferMap map) {
     Dual t = map.dual();
-    if (ShefferMap.containsInverseSeries(map.f()) || ShefferMap.containsInverseSeries(map.g())) {
+    if (isDeep(map.f(), t) || isDeep(map.g(), t)) {
       return Optional.empty();
     }
     Form p = map.f().derivative(t).inverse();
@@ -64,6 +64,17 @@ sealed interface Recurrence {
     return stretch.isPresent() && drift.isPresent()
         ? Optional.of(new InDerivatives(stretch.get(), drift.get()))
         : Optional.empty();
+  }
+
+  /// Whether there are kernels within kernels, or inverse series: then the logarithmic derivative
+  /// is not rational, and to form it would multiply out as many denominators as there are levels.
+  private static boolean isDeep(Form form, Dual t) {
+    return form.generators().stream()
+        .anyMatch(
+            kernel ->
+                kernel instanceof InverseSeries
+                    || Kernels.arguments(kernel).stream()
+                        .anyMatch(argument -> !Structure.isRationalIn(argument, t)));
   }
 
   private static List<Form> coefficients(Form polynomial, Dual t) {

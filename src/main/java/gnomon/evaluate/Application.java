@@ -63,7 +63,7 @@ final class Application {
       return Sorts.of(image, scope);
     }
     Optional<Operator> plain = Sorts.asPlainOperator(a);
-    if (plain.filter(operator -> operator.equals(Operator.sum(x))).isPresent()) {
+    if (plain.filter(operator -> isSum(operator, x)).isPresent()) {
       return sum(f, scope);
     }
     MappedOperator operator = Sorts.asOperator(a).orElseThrow();
@@ -113,11 +113,16 @@ final class Application {
     }
   }
 
+  private static boolean isSum(Operator operator, Variable x) {
+    return operator.iterate().isEmpty() && operator.equals(Operator.sum(x));
+  }
+
   /// Whether shifts are inverted: the image then is a sum.
   private static boolean sums(Operator operator) {
-    boolean shifts =
-        operator.symbol().duals().stream()
-            .anyMatch(t -> !Structure.isRationalIn(operator.symbol(), t));
-    return shifts && !operator.kernelOrders().isEmpty();
+    if (operator.kernelOrders().isEmpty()) {
+      return false;
+    }
+    return operator.symbol().duals().stream()
+        .anyMatch(t -> !Structure.isRationalIn(operator.symbol(), t));
   }
 }

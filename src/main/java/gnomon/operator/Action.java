@@ -6,6 +6,7 @@ import gnomon.algebra.Refusal;
 import gnomon.form.Dual;
 import gnomon.form.ExponentialPart;
 import gnomon.form.Form;
+import gnomon.form.Structure;
 import gnomon.form.Variable;
 import gnomon.number.Integers;
 import gnomon.number.Rational;
@@ -16,6 +17,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import java.util.TreeSet;
+import java.util.stream.IntStream;
 
 /// The action of a symbol on a form without antidifferences: exactly on exponential polynomials,
 /// and on anything when the symbol is a finite sum of t^j e^(h t).
@@ -113,6 +115,11 @@ final class Action {
   private static void onPolynomial(
       List<Splitting.Product> result, Form symbol, Form p, int degree, Variable x, Dual t) {
     PowerSeries series = Expansion.of(symbol, t, degree);
+    Optional<List<Form>> coefficients = Structure.asPolynomial(p, x);
+    if (coefficients.isPresent() && hasConstants(series)) {
+      addUnlessZero(result, Form.ONE, onCoefficients(series, coefficients.get(), x));
+      return;
+    }
     Form image = p;
     for (int k = 0; k <= degree; k++) {
       Budget.checkpoint();
@@ -124,6 +131,31 @@ final class Action {
       image = Antiderivative.ofPolynomial(image, x);
       addUnlessZero(result, series.coefficient(k), image);
     }
+  }
+
+  private static boolean hasConstants(PowerSeries series) {
+    return IntStream.rangeClosed(series.valuation(), series.order())
+        .allMatch(k -> series.coefficient(k).isConstant());
+  }
+
+  /// The image of Σ c_k x^k under Σ a_j D^j with constants a_j: since D and the integral from 0
+  /// take x^k/k! to its neighbours, a product of series with the coefficients k! c_k in falling
+  /// order.
+  private static Form onCoefficients(PowerSeries series, List<Form> coefficients, Variable x) {
+    int degree = coefficients.size() - 1;
+    List<Form> falling = new ArrayList<>();
+    for (int k = degree; k >= 0; k--) {
+      falling.add(coefficients.get(k).times(Rational.of(Integers.factorial(k))));
+    }
+    int order = degree + Math.max(0, -series.valuation());
+    PowerSeries product = series.times(PowerSeries.of(falling, 0, order));
+    List<Form> terms = new ArrayList<>();
+    for (int i = product.valuation(); i <= degree; i++) {
+      Budget.checkpoint();
+      Rational weight = Rational.of(Integers.factorial(degree - i)).inverse();
+      terms.add(product.coefficient(i).times(weight).times(Form.of(x).power(degree - i)));
+    }
+    return Form.sum(terms);
   }
 
   private static void addUnlessZero(List<Splitting.Product> result, Form left, Form right) {

@@ -11,6 +11,7 @@ import gnomon.series.Expansion;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
 import java.util.TreeMap;
 import java.util.TreeSet;
@@ -34,6 +35,13 @@ final class Composition {
   }
 
   static Operator compose(Operator a, Operator b) {
+    if (a.isMultiplication() && a.symbol().isOne()) {
+      return b;
+    }
+    Optional<Operator> shorter = b.iterate().flatMap(power -> power.after(a));
+    if (shorter.isPresent()) {
+      return shorter.get();
+    }
     return new Composition(a, b).result();
   }
 

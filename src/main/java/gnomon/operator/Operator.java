@@ -12,7 +12,6 @@ import gnomon.number.Rational;
 import gnomon.series.Expansion;
 import gnomon.series.LazySeries;
 import gnomon.series.PowerSeries;
-import java.util.Collections;
 import java.util.List;
 import java.util.Map;
 import java.util.Objects;
@@ -22,6 +21,7 @@ import java.util.SortedSet;
 import java.util.TreeMap;
 import java.util.TreeSet;
 import java.util.concurrent.ConcurrentHashMap;
+import java.util.function.Supplier;
 import java.util.function.UnaryOperator;
 
 /// A linear operator f ↦ a(x, D) f + [r(x, D_y) f(y)] at y = 0.
@@ -42,19 +42,24 @@ public final class Operator {
 
   private static final Variable X = new Variable("x");
   private static final int SMALL = 4;
+  private static final int WORKED_OUT = 4;
 
-  private final Form symbol;
-  private final SortedMap<Variable, Form> boundaries;
-  private final SortedMap<Variable, Integer> kernelOrders;
+  private final Optional<Iterate> iterate;
+  private final Supplier<NormalForm> normal;
   private final Map<Variable, LazySeries> expansions = new ConcurrentHashMap<>();
 
   Operator(
       Form symbol,
       SortedMap<Variable, Form> boundaries,
       SortedMap<Variable, Integer> kernelOrders) {
-    this.symbol = symbol;
-    this.kernelOrders = Collections.unmodifiableSortedMap(kernelOrders);
-    this.boundaries = Collections.unmodifiableSortedMap(Kernels.reduce(boundaries, kernelOrders));
+    NormalForm form = new NormalForm(symbol, boundaries, kernelOrders);
+    this.iterate = Optional.empty();
+    this.normal = () -> form;
+  }
+
+  private Operator(Iterate iterate) {
+    this.iterate = Optional.of(iterate);
+    this.normal = iterate::normal;
   }
 
   // ---------------------------------------------------------------- operators of the trade
@@ -159,67 +164,72 @@ public final class Operator {
 
   /// The full symbol a.
   public Form symbol() {
-    return symbol;
+    return iterate.isPresent() ? iterate.get().symbol() : normal.get().symbol();
+  }
+
+  /// The operator of which this is a high power that has not been worked out, and the exponent.
+  public Optional<Iterate> iterate() {
+    return iterate;
   }
 
   /// The boundary part in the variable; zero where there is none.
   public Form boundary(Variable x) {
-    return boundaries.getOrDefault(x, Form.ZERO);
+    return boundaries().getOrDefault(x, Form.ZERO);
   }
 
   /// The boundary parts that are not zero.
   public SortedMap<Variable, Form> boundaries() {
-    return boundaries;
+    return normal.get().boundaries();
   }
 
   /// The expansion of the symbol in powers of the dual of x, to the order; kept for later calls.
   ///
   /// @throws Refusal with [Reason#NO_SERIES] where there is none
   public PowerSeries series(Variable x, int order) {
-    return expansions.computeIfAbsent(x, v -> LazySeries.of(symbol, new Dual(v))).to(order);
+    return expansions.computeIfAbsent(x, v -> LazySeries.of(symbol(), new Dual(v))).to(order);
   }
 
   /// How many of 1, x, x², … the image leaves undetermined.
   public int kernelOrder(Variable x) {
-    return kernelOrders.getOrDefault(x, 0);
+    return kernelOrders().getOrDefault(x, 0);
   }
 
   /// The kernel orders that are not zero.
   public SortedMap<Variable, Integer> kernelOrders() {
-    return kernelOrders;
+    return iterate.isPresent() ? new TreeMap<>() : normal.get().kernelOrders();
   }
 
   /// The variables the operator acts on: those whose dual, boundary or kernel occurs in it.
   public SortedSet<Variable> variables() {
-    TreeSet<Variable> result = new TreeSet<>(boundaries.keySet());
-    result.addAll(kernelOrders.keySet());
-    symbol.duals().forEach(dual -> result.add(dual.of()));
+    TreeSet<Variable> result = new TreeSet<>(boundaries().keySet());
+    result.addAll(kernelOrders().keySet());
+    symbol().duals().forEach(dual -> result.add(dual.of()));
     return result;
   }
 
   /// Whether symbol and boundary are zero and nothing is undetermined.
   public boolean isZero() {
-    return symbol.isZero() && isPlain();
+    return iterate.isEmpty() && symbol().isZero() && isPlain();
   }
 
   /// Whether there is neither a boundary part nor an undetermined kernel.
   public boolean isPlain() {
-    return boundaries.isEmpty() && kernelOrders.isEmpty();
+    return boundaries().isEmpty() && kernelOrders().isEmpty();
   }
 
   /// Whether the operator multiplies by a function.
   public boolean isMultiplication() {
-    return isPlain() && symbol.duals().isEmpty();
+    return isPlain() && symbol().duals().isEmpty();
   }
 
   /// Whether the operator multiplies by a scalar: a function that does not depend on x.
   public boolean isScalar(Variable x) {
-    return isMultiplication() && !symbol.dependsOn(x);
+    return isMultiplication() && !symbol().dependsOn(x);
   }
 
-  /// Whether the operator commutes with all shifts of x: no boundary, no x in the symbol.
+  /// Whether the operator commutes with all shifts of x: no boundary, no x in the symbol().
   public boolean isShiftInvariant(Variable x) {
-    return boundary(x).isZero() && !symbol.dependsOn(x);
+    return boundary(x).isZero() && !symbol().dependsOn(x);
   }
 
   /// Whether the operator is shift-invariant in each of the variables it acts on; one that acts on
@@ -227,7 +237,7 @@ public final class Operator {
   public boolean isShiftInvariant() {
     SortedSet<Variable> acting = variables();
     return acting.isEmpty()
-        ? symbol.variables().isEmpty()
+        ? symbol().variables().isEmpty()
         : acting.stream().allMatch(this::isShiftInvariant);
   }
 
@@ -235,16 +245,16 @@ public final class Operator {
 
   /// The sum.
   public Operator plus(Operator that) {
-    TreeMap<Variable, Form> sum = new TreeMap<>(boundaries);
-    that.boundaries.forEach((x, r) -> sum.merge(x, r, Form::plus));
-    TreeMap<Variable, Integer> kernels = new TreeMap<>(kernelOrders);
-    that.kernelOrders.forEach((x, k) -> kernels.merge(x, k, Math::max));
-    return new Operator(symbol.plus(that.symbol), sum, kernels);
+    TreeMap<Variable, Form> sum = new TreeMap<>(boundaries());
+    that.boundaries().forEach((x, r) -> sum.merge(x, r, Form::plus));
+    TreeMap<Variable, Integer> kernels = new TreeMap<>(kernelOrders());
+    that.kernelOrders().forEach((x, k) -> kernels.merge(x, k, Math::max));
+    return new Operator(symbol().plus(that.symbol()), sum, kernels);
   }
 
   /// The difference. Undetermined kernels do not cancel: Δ⁻¹ − Δ⁻¹ is 0 modulo constants.
   public Operator minus(Operator that) {
-    return plus(that.negated());
+    return iterate.isPresent() && iterate.equals(that.iterate) ? zero() : plus(that.negated());
   }
 
   /// The additive inverse.
@@ -274,12 +284,22 @@ public final class Operator {
     if (exponent < 0) {
       return inverse().power(Math.negateExact(exponent));
     }
-    if (isPlain() && (symbol.duals().isEmpty() || isShiftInvariant() && !isSingular())) {
-      return ofSymbol(symbol.power(exponent));
+    if (isPlain() && (symbol().duals().isEmpty() || isShiftInvariant() && !isSingular())) {
+      return ofSymbol(symbol().power(exponent));
     }
+    // the symbols have no divisors of zero, so that a power of one that is not zero is not zero
+    boolean plain = boundaries().isEmpty() || !kernelOrders().isEmpty() || symbol().isZero();
+    if (plain || exponent <= WORKED_OUT) {
+      return workedOut(exponent);
+    }
+    return new Operator(Iterate.of(this, exponent));
+  }
+
+  /// The power in its normal form.
+  Operator workedOut(int exponent) {
     long square = (long) exponent * exponent;
     long capped = Math.min(square, Integer.MAX_VALUE);
-    Budget.charge(boundaries.isEmpty() ? square : Math.multiplyExact(capped, capped));
+    Budget.charge(boundaries().isEmpty() ? square : Math.multiplyExact(capped, capped));
     Operator result = identity();
     if (isSmallPolynomial()) {
       // a factor of low order on the left has few derivatives: cheaper than squaring long symbols
@@ -300,10 +320,10 @@ public final class Operator {
 
   private boolean isSmallPolynomial() {
     return isPlain()
-        && symbol.isPolynomial()
-        && symbol.numerator().size() <= SMALL
-        && symbol.duals().stream()
-            .allMatch(t -> Structure.degree(symbol, t).orElse(SMALL + 1) <= SMALL);
+        && symbol().isPolynomial()
+        && symbol().numerator().size() <= SMALL
+        && symbol().duals().stream()
+            .allMatch(t -> Structure.degree(symbol(), t).orElse(SMALL + 1) <= SMALL);
   }
 
   /// A power with any exponent: of a multiplication, or of a shift-invariant operator whose power
@@ -338,8 +358,8 @@ public final class Operator {
   /// A B − B A.
   public Operator commutator(Operator that) {
     if (that.isMultiplication()) {
-      Optional<Variable> x = that.symbol.asGenerator().map(g -> g instanceof Variable v ? v : X);
-      if (x.isPresent() && that.symbol.equals(Form.of(x.get()))) {
+      Optional<Variable> x = that.symbol().asGenerator().map(g -> g instanceof Variable v ? v : X);
+      if (x.isPresent() && that.symbol().equals(Form.of(x.get()))) {
         return pincherle(x.get());
       }
     }
@@ -350,14 +370,15 @@ public final class Operator {
   public Operator pincherle(Variable x) {
     Dual t = new Dual(x);
     TreeMap<Variable, Form> changed = new TreeMap<>();
-    boundaries.forEach(
-        (v, r) -> {
-          Form slope = r.derivative(t);
-          changed.put(v, v.equals(x) ? slope.minus(r.times(Form.of(x))) : slope);
-        });
-    TreeMap<Variable, Integer> kernels = new TreeMap<>(kernelOrders);
+    boundaries()
+        .forEach(
+            (v, r) -> {
+              Form slope = r.derivative(t);
+              changed.put(v, v.equals(x) ? slope.minus(r.times(Form.of(x))) : slope);
+            });
+    TreeMap<Variable, Integer> kernels = new TreeMap<>(kernelOrders());
     kernels.computeIfPresent(x, (_, k) -> k + 1);
-    return new Operator(symbol.derivative(t), changed, kernels);
+    return new Operator(symbol().derivative(t), changed, kernels);
   }
 
   /// The function applied to the operator through its symbol: for shift-invariant operators whose
@@ -366,24 +387,24 @@ public final class Operator {
   /// @throws Refusal with [Reason#NOT_SHIFT_INVARIANT] or [Reason#NO_SERIES]
   public Operator lift(UnaryOperator<Form> function) {
     if (isMultiplication()) {
-      return multiplication(function.apply(symbol));
+      return multiplication(function.apply(symbol()));
     }
     if (!isPlain() || !isShiftInvariant()) {
-      throw new Refusal(Reason.NOT_SHIFT_INVARIANT, symbol);
+      throw new Refusal(Reason.NOT_SHIFT_INVARIANT, symbol());
     }
-    Form image = function.apply(symbol);
-    for (Dual t : symbol.duals()) {
+    Form image = function.apply(symbol());
+    for (Dual t : symbol().duals()) {
       if (Expansion.tryOf(image, t, 0).filter(series -> series.valuation() >= 0).isEmpty()) {
         throw new Refusal(Reason.NO_SERIES, image);
       }
-      Inversion.requireSameBranch(function, symbol, image, t);
+      Inversion.requireSameBranch(function, symbol(), image, t);
     }
     return ofSymbol(image);
   }
 
   /// Whether the symbol has a pole at t = 0 in one of its duals.
   boolean isSingular() {
-    return symbol.duals().stream().anyMatch(t -> !Expansion.singularPart(symbol, t).isEmpty());
+    return symbol().duals().stream().anyMatch(t -> !Expansion.singularPart(symbol(), t).isEmpty());
   }
 
   // ---------------------------------------------------------------- application
@@ -393,6 +414,9 @@ public final class Operator {
   ///
   /// @throws Refusal with [Reason#INFINITE_SERIES] when the image would be an infinite series
   public Form applyTo(Form f, Summation engine) {
+    if (iterate.isPresent()) {
+      return iterate.get().applyTo(f, engine);
+    }
     return Application.apply(this, f, engine);
   }
 
@@ -409,18 +433,22 @@ public final class Operator {
   @Override
   public boolean equals(Object other) {
     return other instanceof Operator that
-        && symbol.equals(that.symbol)
-        && boundaries.equals(that.boundaries)
-        && kernelOrders.equals(that.kernelOrders);
+        && (iterate.isPresent() && iterate.equals(that.iterate) || isSame(that));
+  }
+
+  private boolean isSame(Operator that) {
+    return symbol().equals(that.symbol())
+        && boundaries().equals(that.boundaries())
+        && kernelOrders().equals(that.kernelOrders());
   }
 
   @Override
   public int hashCode() {
-    return Objects.hash(symbol, boundaries, kernelOrders);
+    return Objects.hash(symbol(), boundaries(), kernelOrders());
   }
 
   @Override
   public String toString() {
-    return "operator(" + List.of(symbol, boundaries, kernelOrders) + ")";
+    return "operator(" + List.of(symbol(), boundaries(), kernelOrders()) + ")";
   }
 }

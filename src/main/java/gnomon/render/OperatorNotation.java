@@ -6,6 +6,7 @@ import gnomon.form.Exponential;
 import gnomon.form.Form;
 import gnomon.form.Structure;
 import gnomon.form.Variable;
+import gnomon.operator.Iterate;
 import gnomon.operator.Operator;
 import java.util.ArrayList;
 import java.util.Comparator;
@@ -21,6 +22,7 @@ import java.util.TreeSet;
 /// off at 0.
 final class OperatorNotation {
   private static final int SHORT = 16;
+  private static final int WRITTEN_OUT = 8;
 
   private final Variable main;
   private final ShiftInvariantNotation shiftInvariant;
@@ -40,6 +42,10 @@ final class OperatorNotation {
     if (!operator.kernelOrders().isEmpty()) {
       return modulo(operator, operator.kernelOrders().firstKey());
     }
+    Optional<Notation> iterate = operator.iterate().flatMap(this::iterate);
+    if (iterate.isPresent()) {
+      return iterate.get();
+    }
     Notation plain = plain(operator);
     if (operator.boundaries().isEmpty() && ShiftInvariantNotation.length(plain) < SHORT) {
       return plain;
@@ -49,6 +55,15 @@ final class OperatorNotation {
       candidates.addAll(new PoleNotation(this, shiftInvariant).of(operator, variable));
     }
     return ShiftInvariantNotation.shortest(candidates);
+  }
+
+  /// The power of a letter, and any power too high to be written out.
+  private Optional<Notation> iterate(Iterate power) {
+    Notation base = of(power.base());
+    boolean letter = base instanceof Notation.Name || base instanceof Notation.Subscript;
+    return letter || power.exponent() > WRITTEN_OUT
+        ? Optional.of(ShiftInvariantNotation.power(base, power.exponent()))
+        : Optional.empty();
   }
 
   private Notation plain(Operator operator) {
