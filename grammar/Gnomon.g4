@@ -1,28 +1,29 @@
 // The language of gnomon. LANGUAGE.md beside this file gives the meaning.
 //
 // Every decision needs one token of lookahead, save the comma inside a parenthesis after `at` or
-// `with`.
+// `with`, and the name after the `for` of a claim.
 // Whitespace matters in three places; the token stream marks them before the parser sees them:
 //   STEP    is a "[" written directly against a name, with one entry (`Delta[h]`);
 //   BINDER  is Σ, ∫ or ∏ before "(name:";
-//   "!="    is split into "!" and "=" outside `given`.
+//   "!="    is split into "!" and "=" outside `given` and the conditions of a claim.
 grammar Gnomon;
 
 tokens { STEP, BINDER }
 
 statement
-    : ( let | claim | given | drop | vary | arbitrary | why | names | file | help | leave | value )?
+    : ( let | claim | given | drop | vary | arbitrary | umbra | why | names | file | help | leave | value )?
       EOF
     ;
 
 let       : LET identifier ( OPEN identifier ( COMMA identifier )* CLOSE )? EQUALS value ;
-claim     : CLAIM sum EQUALS sum ( FOR range )? ;
+claim     : CLAIM sum EQUALS sum ( FOR ( range | condition ( COMMA condition )* ) )? ;
 given     : GIVEN condition ( COMMA condition )* ;
 condition : sum ( INTEGER | ( relation sum )+ ) ;
 relation  : EQUALS | UNEQUAL | LESS | AT_MOST | GREATER | AT_LEAST ;
 drop      : DROP ( GIVEN | identifier ( COMMA identifier )* ) ;
 vary      : VARY identifier ;
 arbitrary : ARBITRARY identifier ( COMMA identifier )* ;
+umbra     : UMBRA identifier ( COMMA identifier )* WITH sum ;
 why       : WHY HANDLE? ;
 names     : NAMES ;
 file      : ( KEEP | REPLAY | RECHECK | RERECORD ) STRING ;
@@ -64,6 +65,7 @@ GIVEN : 'given' ;
 DROP : 'drop' ;
 VARY : 'vary' ;
 ARBITRARY : 'arbitrary' ;
+UMBRA : 'umbra' ;
 WHY : 'why' ;
 NAMES : 'names' ;
 KEEP : 'keep' ;

@@ -71,6 +71,9 @@ public enum Reason {
   NO_ANTIDIFFERENCE,
   /// Something has no closed form in this room. Data: the form.
   NO_CLOSED_FORM,
+  /// An expression in umbrae that is no combination of powers and exponentials. Data: the
+  /// expression.
+  NO_MOMENT,
   /// No linear differential equation with polynomial coefficients was found. Data: the function.
   NO_DIFFERENTIAL_EQUATION,
   /// A constant without a numerical method. Data: the form.
@@ -99,6 +102,8 @@ public enum Reason {
   SOLUTION_NOT_FOUND,
   /// A symbol with a pole at the rate of an exponential. Data: the symbol, the rate.
   SYMBOL_POLE,
+  /// An umbra put in for a variable inside eval, where it is bound. Data: the umbra.
+  UMBRA_CAPTURED,
   /// Text is not a number. Data: the text.
   UNREADABLE_NUMBER,
   /// Maps or operators that act on different variables where one is needed. Data: both variables.

@@ -15,6 +15,7 @@ import gnomon.form.Generator;
 import gnomon.form.Harmonic;
 import gnomon.form.InverseSeries;
 import gnomon.form.Logarithm;
+import gnomon.form.Moment;
 import gnomon.form.Unknown;
 import gnomon.form.Variable;
 import java.util.ArrayList;
@@ -51,6 +52,7 @@ final class Kernels {
       case Accumulation sum -> List.of(sum.lower(), sum.upper(), sum.body());
       case CoefficientSeries series -> List.of(series.coefficient(), series.argument());
       case InverseSeries series -> List.of(series.argument());
+      case Moment moment -> List.of(moment.body());
       case Variable _, Dual _, Constant _, AngleConstant _ -> List.of();
     };
   }

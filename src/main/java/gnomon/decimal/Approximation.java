@@ -17,6 +17,7 @@ import gnomon.form.Generator;
 import gnomon.form.Harmonic;
 import gnomon.form.InverseSeries;
 import gnomon.form.Logarithm;
+import gnomon.form.Moment;
 import gnomon.form.Unknown;
 import gnomon.form.Variable;
 import gnomon.number.Rational;
@@ -97,7 +98,7 @@ final class Approximation {
           SpecialValues.harmonic(real(argument), order, precision);
       case Variable _, Dual _, Unknown _ ->
           throw new Refusal(Reason.NOT_CONSTANT, Form.of(generator));
-      case Accumulation _, CoefficientSeries _, InverseSeries _ ->
+      case Accumulation _, CoefficientSeries _, InverseSeries _, Moment _ ->
           throw new Refusal(Reason.NO_DIGITS, Form.of(generator));
     };
   }

@@ -17,6 +17,7 @@ import gnomon.form.Generator;
 import gnomon.form.Harmonic;
 import gnomon.form.InverseSeries;
 import gnomon.form.Logarithm;
+import gnomon.form.Moment;
 import gnomon.form.Unknown;
 import gnomon.form.Variable;
 import gnomon.number.Rational;
@@ -85,7 +86,8 @@ final class Conjugate {
               Unknown _,
               Accumulation _,
               CoefficientSeries _,
-              InverseSeries _ ->
+              InverseSeries _,
+              Moment _ ->
               false;
         };
     return real ? Optional.of(Form.of(generator, exponent)) : Optional.empty();

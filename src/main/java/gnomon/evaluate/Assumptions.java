@@ -5,6 +5,7 @@ import gnomon.form.Form;
 import gnomon.form.Generator;
 import gnomon.form.Variable;
 import gnomon.number.Rational;
+import gnomon.summation.Condition;
 import gnomon.syntax.Condition.Relation;
 import java.util.ArrayList;
 import java.util.HashMap;
@@ -70,6 +71,29 @@ public record Assumptions(Set<Variable> integers, List<Comparison> comparisons) 
     var images = new HashMap<Generator, Form>();
     point.forEach((variable, value) -> images.put(variable, Form.of(value)));
     return comparisons.stream().allMatch(comparison -> holds(comparison, images));
+  }
+
+  /// Whether the condition that a subject is a natural number follows from one of the comparisons;
+  /// that it is an integer is taken for granted.
+  boolean imply(Condition condition) {
+    return condition.relation() == Condition.Relation.NATURAL
+        && comparisons.stream()
+            .filter(c -> c.relation() == Relation.AT_LEAST || c.relation() == Relation.GREATER)
+            .map(c -> condition.subject().minus(c.left().minus(c.right())).asRational())
+            .anyMatch(excess -> excess.filter(e -> e.sign() >= 0).isPresent());
+  }
+
+  /// Whether a value of one variable is not excluded by what is assumed of that variable alone.
+  boolean mayAllow(Variable variable, Rational value) {
+    List<Comparison> alone =
+        comparisons.stream().filter(comparison -> isAbout(comparison, variable)).toList();
+    return new Assumptions(integers, alone).allow(Map.of(variable, value));
+  }
+
+  private static boolean isAbout(Comparison comparison, Variable variable) {
+    Set<Variable> variables = new TreeSet<>(comparison.left().variables());
+    variables.addAll(comparison.right().variables());
+    return variables.equals(Set.of(variable));
   }
 
   private static boolean holds(Comparison comparison, Map<Generator, Form> images) {

@@ -1,5 +1,6 @@
 package gnomon.evaluate;
 
+import gnomon.form.Moment;
 import gnomon.form.Variable;
 import gnomon.summation.Condition;
 import gnomon.syntax.Expression;
@@ -32,6 +33,9 @@ public sealed interface Binding {
 
   /// The variable of a sum, an integral or a product.
   record Bound(Variable variable) implements Binding {}
+
+  /// An umbra.
+  record Umbra(Moment.Letter letter) implements Binding {}
 
   /// A function of which nothing is known.
   record Arbitrary(String name) implements Binding {}

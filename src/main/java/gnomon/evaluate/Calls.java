@@ -69,7 +69,7 @@ final class Calls {
     if (binding.isPresent()) {
       return switch (binding.get()) {
         case Binding.Rule _, Binding.Arbitrary _ -> true;
-        case Binding.Named _, Binding.Held _, Binding.Bound _ -> false;
+        case Binding.Named _, Binding.Held _, Binding.Bound _, Binding.Umbra _ -> false;
       };
     }
     return isFunctionWord(name.text()) || MAKERS.contains(name.text());
@@ -97,7 +97,7 @@ final class Calls {
         case Binding.Rule rule -> defined(rule, arguments, span, scope);
         case Binding.Arbitrary(String unknown) ->
             arbitrary(unknown, primes, arguments, span, scope);
-        case Binding.Named _, Binding.Held _, Binding.Bound _ ->
+        case Binding.Named _, Binding.Held _, Binding.Bound _, Binding.Umbra _ ->
             throw new IllegalArgumentException(name.text());
       };
     }
@@ -201,6 +201,10 @@ final class Calls {
                 dual(arguments.getFirst(), span, scope)));
       }
       case "H" -> harmonic(arguments, span, scope);
+      case "eval" -> {
+        expect(name, 1, arguments.size(), span);
+        yield new Umbrae(evaluation).value(arguments.getFirst(), span, scope);
+      }
       case "coefficient" -> {
         expect(name, 2, arguments.size(), span);
         yield new Laws(evaluator, evaluation)

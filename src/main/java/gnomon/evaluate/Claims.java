@@ -5,9 +5,12 @@ import gnomon.basis.MappedOperator;
 import gnomon.diagnostic.Span;
 import gnomon.form.Form;
 import gnomon.form.Variable;
+import gnomon.summation.Condition;
 import gnomon.syntax.Expression;
 import gnomon.syntax.Range;
+import gnomon.syntax.Spelling;
 import gnomon.syntax.Statement;
+import gnomon.syntax.StatementText;
 import gnomon.value.DecimalValue;
 import gnomon.value.FormValue;
 import gnomon.value.FunctionalValue;
@@ -47,10 +50,31 @@ final class Claims {
     if (claim.range().isPresent()) {
       return overRange(claim, claim.range().get(), scope);
     }
+    if (!claim.conditions().isEmpty()) {
+      return under(claim, scope);
+    }
     Value left = evaluator.value(claim.left(), scope);
     Value right = evaluator.value(claim.right(), scope);
     return Places.at(
         claim.span(), () -> conditioned(decided(left, right, claim.span(), scope), scope));
+  }
+
+  /// The claim `for` conditions, which are assumed in it alone.
+  private VerdictValue under(Statement.Claim claim, Scope scope) {
+    Statement.Claim bare =
+        new Statement.Claim(claim.left(), claim.right(), Optional.empty(), List.of(), claim.span());
+    Scope inside = Interpreter.assuming(claim.conditions(), evaluator, scope);
+    VerdictValue verdict = verdict(bare, inside);
+    if (verdict instanceof Proved(Ground ground, String _)) {
+      List<Condition> beyond =
+          evaluation.conditions().stream()
+              .filter(condition -> !inside.assumptions().imply(condition))
+              .toList();
+      String more = new Conditions(evaluation.writing(), scope.running()).words(beyond);
+      String said = "for " + StatementText.of(claim.conditions(), Spelling.ASCII);
+      return new Proved(ground, more.isEmpty() ? said : said + more.replaceFirst("for", ","));
+    }
+    return verdict;
   }
 
   /// A proof holds where the closed forms in it do.
@@ -163,6 +187,10 @@ final class Claims {
       return new Open(
           "the sides differ by constants left open",
           "an inverse modulo a kernel is determined only up to C1, C2, ...");
+    }
+    Optional<VerdictValue> umbral = new UmbralClaims(evaluation, assumptions, scope).verdict(a, b);
+    if (umbral.isPresent()) {
+      return umbral.get();
     }
     Optional<Witness> choice = UnknownFunctions.witness(a, b, assumptions, scope);
     if (choice.isPresent()) {

@@ -31,7 +31,7 @@ final class Conditions {
       switch (condition.relation()) {
         case NOT_ZERO, INTEGER, POSITIVE, INSIDE_UNIT -> said.add(words(condition));
         case NATURAL -> {
-          if (!isImplied(condition, conditions)) {
+          if (!isImplied(condition, conditions) && isStrongest(condition, conditions)) {
             said.add(words(condition));
           }
         }
@@ -51,6 +51,14 @@ final class Conditions {
         .filter(other -> other.relation() == Condition.Relation.RANGE_LENGTH)
         .map(length -> condition.subject().minus(length.subject()).asRational())
         .anyMatch(excess -> excess.filter(e -> e.sign() >= 0).isPresent());
+  }
+
+  /// Whether no other subject, also to be a natural number, is smaller by a constant.
+  private static boolean isStrongest(Condition condition, List<Condition> conditions) {
+    return conditions.stream()
+        .filter(other -> other.relation() == Condition.Relation.NATURAL)
+        .map(other -> condition.subject().minus(other.subject()).asRational())
+        .noneMatch(excess -> excess.filter(e -> e.sign() > 0).isPresent());
   }
 
   /// The conditions with complex subjects that must not be zero put together into one, which is

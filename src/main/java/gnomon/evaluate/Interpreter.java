@@ -137,9 +137,12 @@ public final class Interpreter {
 
   /// The scope under more assumptions.
   public Scope given(Statement.Given given, Scope scope) {
+    return assuming(given.conditions(), new Evaluator(evaluation()), scope);
+  }
+
+  static Scope assuming(List<Condition> conditions, Evaluator evaluator, Scope scope) {
     Assumptions assumptions = scope.assumptions();
-    Evaluator evaluator = new Evaluator(evaluation());
-    for (Condition condition : given.conditions()) {
+    for (Condition condition : conditions) {
       assumptions =
           switch (condition) {
             case Condition.IsInteger(Expression subject, Span span) ->
@@ -222,6 +225,12 @@ public final class Interpreter {
       more = more.with(name.text(), new Binding.Arbitrary(name.text()));
     }
     return more;
+  }
+
+  /// The scope with umbrae.
+  public Scope umbra(Statement.Umbra umbra, Scope scope) {
+    umbra.letters().forEach(Interpreter::refuseWord);
+    return new Umbrae(evaluation()).declared(umbra, scope);
   }
 
   private static void refuseWord(Identifier name) {

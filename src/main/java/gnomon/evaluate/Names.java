@@ -4,6 +4,7 @@ import gnomon.diagnostic.DiagnosedException;
 import gnomon.diagnostic.Diagnostic;
 import gnomon.diagnostic.Span;
 import gnomon.form.Form;
+import gnomon.form.Moment;
 import gnomon.form.Unknown;
 import gnomon.form.Variable;
 import gnomon.operator.Operator;
@@ -73,6 +74,7 @@ final class Names {
           case Binding.Named named -> here(named, name.span(), acting);
           case Binding.Held(Value held) -> held;
           case Binding.Bound(Variable variable) -> Sorts.of(Form.of(variable), scope);
+          case Binding.Umbra(Moment.Letter letter) -> Sorts.of(Form.of(letter.variable()), scope);
           case Binding.Arbitrary(String unknown) ->
               Sorts.of(Form.of(new Unknown(unknown, 0, Form.of(scope.running()))), scope);
           case Binding.Rule rule ->

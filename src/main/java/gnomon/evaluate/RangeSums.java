@@ -163,6 +163,12 @@ final class RangeSums {
   private Value ofForm(Limits limits, Form body, boolean adding, Scope scope) {
     Variable k = limits.variable();
     SummationEngine engine = evaluation.sums();
+    Optional<Form> umbral =
+        adding ? new UmbralSums(evaluation).sum(body, limits) : Optional.empty();
+    if (umbral.isPresent()) {
+      notEmpty(limits).ifPresent(taken -> evaluation.require(List.of(taken)));
+      return Sorts.of(umbral.get(), scope);
+    }
     DefiniteSums sums = new DefiniteSums(engine);
     DefiniteSum sum;
     if (!adding) {

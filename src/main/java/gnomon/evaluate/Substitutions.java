@@ -6,7 +6,9 @@ import gnomon.diagnostic.Span;
 import gnomon.form.Accumulation;
 import gnomon.form.Form;
 import gnomon.form.Generator;
+import gnomon.form.Moment;
 import gnomon.form.Variable;
+import gnomon.operator.Moments;
 import gnomon.operator.Operator;
 import gnomon.syntax.Clause;
 import gnomon.value.Family;
@@ -143,11 +145,15 @@ final class Substitutions {
 
   /// The form with its sums and products between numbers worked out.
   static Form addedUp(Form form) {
-    boolean standing = form.generators().stream().anyMatch(Accumulation.class::isInstance);
+    boolean standing =
+        form.generators().stream().anyMatch(g -> g instanceof Accumulation || g instanceof Moment);
     return standing ? form.mapGenerators(Substitutions::addedUp) : form;
   }
 
   private static Form addedUp(Generator generator) {
+    if (generator instanceof Moment moment) {
+      return Moments.value(moment.body(), moment.letters());
+    }
     if (generator instanceof Accumulation standing
         && standing.kind() != Accumulation.Kind.INTEGRAL
         && standing.lower().asInteger().isPresent()

@@ -173,7 +173,8 @@ final class CompositionalInverse {
           Harmonic _,
           Unknown _,
           Accumulation _,
-          CoefficientSeries _ ->
+          CoefficientSeries _,
+          Moment _ ->
           throw new Refusal(Reason.NO_CLOSED_FORM, Form.of(kernel));
     };
   }

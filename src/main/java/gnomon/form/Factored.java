@@ -20,7 +20,8 @@ public record Factored(Rational unit, List<Factor> factors) {
     factors = List.copyOf(factors);
   }
 
-  static Factored of(Form form) {
+  /// The form in factors irreducible over the rational numbers.
+  public static Factored of(Form form) {
     Factorization top = form.numerator().factor();
     Factorization bottom = form.denominator().factor();
     List<Factor> factors = new ArrayList<>();

@@ -21,7 +21,8 @@ public sealed interface Generator extends Indeterminate
         Unknown,
         Accumulation,
         CoefficientSeries,
-        InverseSeries {
+        InverseSeries,
+        Moment {
 
   /// A spelling that tells this generator from every other one.
   String key();

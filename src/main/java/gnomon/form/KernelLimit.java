@@ -43,7 +43,8 @@ final class KernelLimit {
               Unknown _,
               Accumulation _,
               CoefficientSeries _,
-              InverseSeries _ ->
+              InverseSeries _,
+              Moment _ ->
               null;
         };
     return argument == null

@@ -86,7 +86,8 @@ final class FactorNotation {
           gnomon.form.Unknown _,
           gnomon.form.Accumulation _,
           gnomon.form.CoefficientSeries _,
-          gnomon.form.InverseSeries _ ->
+          gnomon.form.InverseSeries _,
+          gnomon.form.Moment _ ->
           functions;
     };
   }

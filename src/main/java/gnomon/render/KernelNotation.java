@@ -13,6 +13,7 @@ import gnomon.form.Generator;
 import gnomon.form.Harmonic;
 import gnomon.form.InverseSeries;
 import gnomon.form.Logarithm;
+import gnomon.form.Moment;
 import gnomon.form.Structure;
 import gnomon.form.Unknown;
 import gnomon.form.Variable;
@@ -61,6 +62,7 @@ final class KernelNotation {
       case Accumulation accumulation -> accumulation(accumulation);
       case CoefficientSeries series -> coefficientSeries(series);
       case InverseSeries inverse -> inverse(inverse);
+      case Moment moment -> call("eval", inner(moment.body()));
     };
   }
 

@@ -123,6 +123,18 @@ final class RefusalWords {
           Map.entry(
               "NO_INVERSE", domain("this operator has no inverse", "It is {1}.", "(1 - D)^-1")),
           Map.entry(
+              "NO_MOMENT",
+              domain(
+                  "eval takes powers and exponentials in umbrae",
+                  "This is neither: {1}.",
+                  "eval((B + 1)^3)")),
+          Map.entry(
+              "UMBRA_CAPTURED",
+              domain(
+                  "an umbra is bound inside eval and cannot be put in there",
+                  "It is {1}.",
+                  "eval((B + x)^n) at x = 1")),
+          Map.entry(
               "NO_SERIES",
               domain("there is no power series at 0", "It is asked of {1}.", "exp(x) to 6")),
           Map.entry(

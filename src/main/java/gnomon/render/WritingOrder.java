@@ -181,7 +181,8 @@ final class WritingOrder {
           Unknown _,
           gnomon.form.Accumulation _,
           gnomon.form.CoefficientSeries _,
-          gnomon.form.InverseSeries _ ->
+          gnomon.form.InverseSeries _,
+          gnomon.form.Moment _ ->
           Form.of(generator).isConstant() ? 3 : 1;
     };
   }

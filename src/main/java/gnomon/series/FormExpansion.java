@@ -18,6 +18,7 @@ import gnomon.form.Generator;
 import gnomon.form.Harmonic;
 import gnomon.form.InverseSeries;
 import gnomon.form.Logarithm;
+import gnomon.form.Moment;
 import gnomon.form.Unknown;
 import gnomon.form.Variable;
 import gnomon.number.Rational;
@@ -225,7 +226,7 @@ final class FormExpansion {
       case CoefficientSeries series -> coefficientSeries(series);
       case Variable _, Dual _, Constant _, AngleConstant _, Exponential _ ->
           throw new IllegalStateException("expanded elsewhere: " + g.key());
-      case Factorial _, Harmonic _, Unknown _, Accumulation _ ->
+      case Factorial _, Harmonic _, Unknown _, Accumulation _, Moment _ ->
           throw new Refusal(Reason.NO_SERIES, Form.of(g));
     };
   }

@@ -142,6 +142,7 @@ final class Conversation {
               Statement.DropGiven _,
               Statement.Vary _,
               Statement.Arbitrary _,
+              Statement.Umbra _,
               Statement.Why _ ->
               outcome.reply().isAccepted();
           case Statement.Names _,
@@ -189,6 +190,8 @@ final class Conversation {
       case Statement.Vary vary -> noted(state.withScope(interpreter.vary(vary, scope)), List.of());
       case Statement.Arbitrary arbitrary ->
           noted(state.withScope(interpreter.arbitrary(arbitrary, scope)), List.of());
+      case Statement.Umbra umbra ->
+          noted(state.withScope(interpreter.umbra(umbra, scope)), List.of());
       case Statement.Why why -> new Outcome(state, why(state, why));
       case Statement.Names _ -> noted(state, Listing.names(scope, settings.spelling()));
       case Statement.Keep keep -> noted(state, files.keep(keep, state));

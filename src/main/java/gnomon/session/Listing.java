@@ -3,6 +3,9 @@ package gnomon.session;
 import gnomon.evaluate.Assumptions;
 import gnomon.evaluate.Binding;
 import gnomon.evaluate.Scope;
+import gnomon.form.Dual;
+import gnomon.form.Form;
+import gnomon.form.Moment;
 import gnomon.form.Variable;
 import gnomon.render.Rendering;
 import gnomon.syntax.StatementText;
@@ -62,6 +65,13 @@ final class Listing {
                           ? gnomon.syntax.Spelling.UNICODE
                           : gnomon.syntax.Spelling.ASCII));
       case Binding.Arbitrary _ -> name + ": arbitrary function";
+      case Binding.Umbra(Moment.Letter letter) ->
+          name
+              + ": umbra with "
+              + rendering.form(
+                  letter
+                      .indicator()
+                      .substitute(new Dual(letter.variable()), Form.of(new Variable("t"))));
       case Binding.Held _, Binding.Bound _ -> name;
     };
   }

@@ -149,6 +149,7 @@ public final class Session {
           case Binding.Named named -> named.value().sort().word() + " named by let";
           case Binding.Rule rule -> "function of " + String.join(", ", rule.parameters());
           case Binding.Arbitrary _ -> "arbitrary function";
+          case Binding.Umbra _ -> "umbra";
           case Binding.Held _, Binding.Bound _ -> "bound variable";
         };
     return new Word(name, name, Word.Kind.NAME, description);

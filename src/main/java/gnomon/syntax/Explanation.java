@@ -49,7 +49,10 @@ final class Explanation {
           GnomonParser.AT_MOST,
           GnomonParser.GREATER,
           GnomonParser.AT_LEAST ->
-          Diagnostic.of("syntax-comparison", shown + " stands only after given", span)
+          Diagnostic.of(
+                  "syntax-comparison",
+                  shown + " stands only after given, or after the for of a claim",
+                  span)
               .withEvidence("Comparisons are assumed; equations are claimed.");
       case GnomonParser.LET,
           GnomonParser.CLAIM,
@@ -57,6 +60,7 @@ final class Explanation {
           GnomonParser.DROP,
           GnomonParser.VARY,
           GnomonParser.ARBITRARY,
+          GnomonParser.UMBRA,
           GnomonParser.WHY,
           GnomonParser.NAMES,
           GnomonParser.KEEP,

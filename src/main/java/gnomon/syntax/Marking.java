@@ -28,9 +28,14 @@ final class Marking {
     if (tokens.isEmpty() || tokens.getFirst().getType() == GnomonParser.GIVEN) {
       return tokens;
     }
+    boolean claim = tokens.getFirst().getType() == GnomonParser.CLAIM;
+    boolean conditions = false;
+    int depth = 0;
     List<CommonToken> split = new ArrayList<>(tokens.size());
     for (CommonToken token : tokens) {
-      if (token.getType() == GnomonParser.UNEQUAL && token.getText().length() == 2) {
+      depth += nesting(token);
+      conditions |= claim && depth == 0 && token.getType() == GnomonParser.FOR;
+      if (!conditions && token.getType() == GnomonParser.UNEQUAL && token.getText().length() == 2) {
         CommonToken equals = new CommonToken(token);
         equals.setType(GnomonParser.EQUALS);
         equals.setStartIndex(token.getStopIndex());
@@ -46,6 +51,14 @@ final class Marking {
       }
     }
     return split;
+  }
+
+  private static int nesting(CommonToken token) {
+    return switch (token.getType()) {
+      case GnomonParser.OPEN, GnomonParser.OPEN_BRACKET -> 1;
+      case GnomonParser.CLOSE, GnomonParser.CLOSE_BRACKET -> -1;
+      default -> 0;
+    };
   }
 
   private static void markBinders(List<CommonToken> tokens) {

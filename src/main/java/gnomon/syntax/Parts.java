@@ -57,13 +57,15 @@ public final class Parts {
     return switch (statement) {
       case Statement.ExpressionStatement(var expression, _) -> List.of(expression);
       case Statement.Let(_, _, var body, _) -> List.of(body);
-      case Statement.Claim(var left, var right, var range, _) -> {
+      case Statement.Claim(var left, var right, var range, var conditions, _) -> {
         List<Expression> parts = new ArrayList<>(List.of(left, right));
         range.ifPresent(r -> parts.addAll(List.of(r.lower(), r.upper())));
+        conditions.stream().flatMap(Parts::ofCondition).forEach(parts::add);
         yield parts;
       }
       case Statement.Given(var conditions, _) ->
           conditions.stream().flatMap(Parts::ofCondition).toList();
+      case Statement.Umbra(_, var series, _) -> List.of(series);
       case Statement.Why(var handle, _) -> handle.<Expression>map(h -> h).stream().toList();
       case Statement.Drop _,
           Statement.DropGiven _,

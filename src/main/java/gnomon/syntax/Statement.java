@@ -21,9 +21,20 @@ public sealed interface Statement {
     }
   }
 
-  /// `claim left = right`, with `for n: a..b` a check of that range.
-  record Claim(Expression left, Expression right, Optional<Range> range, Span span)
-      implements Statement {}
+  /// `claim left = right`, with `for n: a..b` a check of that range, with `for n >= 2` under
+  /// conditions.
+  record Claim(
+      Expression left,
+      Expression right,
+      Optional<Range> range,
+      List<Condition> conditions,
+      Span span)
+      implements Statement {
+    /// Copies the conditions.
+    public Claim {
+      conditions = List.copyOf(conditions);
+    }
+  }
 
   /// `given n >= 0, n integer`.
   record Given(List<Condition> conditions, Span span) implements Statement {
@@ -52,6 +63,14 @@ public sealed interface Statement {
     /// Copies the names.
     public Arbitrary {
       names = List.copyOf(names);
+    }
+  }
+
+  /// `umbra B, C with t/(exp(t) - 1)`.
+  record Umbra(List<Identifier> letters, Expression series, Span span) implements Statement {
+    /// Copies the letters.
+    public Umbra {
+      letters = List.copyOf(letters);
     }
   }
 

@@ -67,6 +67,11 @@ final class StatementBuilder {
       names.forEach(this::free);
       return new Statement.Arbitrary(names, span);
     }
+    if (context.umbra() != null) {
+      List<Identifier> letters = distinct(identifiers(context.umbra().identifier()));
+      letters.forEach(this::free);
+      return new Statement.Umbra(letters, expressions.sum(context.umbra().sum()), span);
+    }
     if (context.names() != null) {
       return new Statement.Names(span);
     }
@@ -93,12 +98,17 @@ final class StatementBuilder {
         expressions.sum(context.sum(0)),
         expressions.sum(context.sum(1)),
         Optional.ofNullable(context.range()).map(expressions::range),
+        conditions(context.condition()),
         span);
   }
 
   private Statement given(GnomonParser.GivenContext context, Span span) {
+    return new Statement.Given(conditions(context.condition()), span);
+  }
+
+  private List<Condition> conditions(List<GnomonParser.ConditionContext> contexts) {
     List<Condition> conditions = new ArrayList<>();
-    for (GnomonParser.ConditionContext condition : context.condition()) {
+    for (GnomonParser.ConditionContext condition : contexts) {
       List<Expression> sides = new ArrayList<>();
       condition.sum().forEach(sum -> sides.add(expressions.sum(sum)));
       if (condition.INTEGER() != null) {
@@ -113,7 +123,7 @@ final class StatementBuilder {
             new Condition.Comparison(left, relation, right, left.span().to(right.span())));
       }
     }
-    return new Statement.Given(conditions, span);
+    return conditions;
   }
 
   private static Condition.Relation relation(GnomonParser.RelationContext context) {

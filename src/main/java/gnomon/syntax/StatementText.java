@@ -24,15 +24,20 @@ public final class StatementText {
         }
         text.add(" = ").add(body);
       }
-      case Statement.Claim(var left, var right, var range, _) -> {
+      case Statement.Claim(var left, var right, var range, var conditions, _) -> {
         text.add("claim ").add(left).add(" = ").add(right);
         range.ifPresent(r -> text.add(" for ").range(r));
+        if (!conditions.isEmpty()) {
+          conditions(text.add(" for "), conditions);
+        }
       }
       case Statement.Given(var conditions, _) -> conditions(text.add("given "), conditions);
       case Statement.Drop(var names, _) -> names(text.add("drop "), names);
       case Statement.DropGiven _ -> text.add("drop given");
       case Statement.Vary(var variable, _) -> text.add("vary ").word(variable.text());
       case Statement.Arbitrary(var names, _) -> names(text.add("arbitrary "), names);
+      case Statement.Umbra(var letters, var series, _) ->
+          names(text.add("umbra "), letters).add(" with ").add(series);
       case Statement.Why(var handle, _) -> {
         text.add("why");
         handle.ifPresent(h -> text.add(" ").add(h));
@@ -49,6 +54,13 @@ public final class StatementText {
       case Statement.Leave _ -> text.add("leave");
       case Statement.Empty _ -> text.add("");
     }
+    return text.toString();
+  }
+
+  /// Conditions, separated by commas.
+  public static String of(List<Condition> conditions, Spelling spelling) {
+    TreeText text = new TreeText(spelling);
+    conditions(text, conditions);
     return text.toString();
   }
 

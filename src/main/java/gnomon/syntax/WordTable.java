@@ -49,6 +49,7 @@ final class WordTable {
           word("binom", FUNCTION, "binom(n, k) is the binomial coefficient"),
           word("H", FUNCTION, "H(n) is the harmonic number, H(n, r) that of order r"),
           word("coefficient", FUNCTION, "coefficient(f, n) is the coefficient of x^n in f"),
+          word("eval", FUNCTION, "eval(p) puts the moments in for the powers of umbrae in p"),
           word("O", FUNCTION, "O(x^n) is what a series leaves out"));
 
   static final List<Word> CONSTANTS =
@@ -67,6 +68,7 @@ final class WordTable {
           word("drop", STATEMENT, "forgets a definition, or the assumptions"),
           word("vary", STATEMENT, "changes the running variable"),
           word("arbitrary", STATEMENT, "declares functions of which nothing is known"),
+          word("umbra", STATEMENT, "declares umbrae by the generating function of their moments"),
           word("why", STATEMENT, "shows the checked steps to a result"),
           word("names", STATEMENT, "lists what is defined"),
           word("keep", STATEMENT, "writes what was done so far to a session file"),

@@ -13,14 +13,22 @@ final class Outline {
       case Statement.ExpressionStatement(var expression, _) -> of(expression);
       case Statement.Let(var name, var parameters, var body, _) ->
           "let " + name.text() + names(parameters) + " := " + of(body);
-      case Statement.Claim(var left, var right, var range, _) ->
-          "claim " + of(left) + " == " + of(right) + range.map(r -> " over " + of(r)).orElse("");
+      case Statement.Claim(var left, var right, var range, var conditions, _) ->
+          "claim "
+              + of(left)
+              + " == "
+              + of(right)
+              + range.map(r -> " over " + of(r)).orElse("")
+              + (conditions.isEmpty() ? "" : " under ")
+              + conditions.stream().map(Outline::of).collect(Collectors.joining(" and "));
       case Statement.Given(var conditions, _) ->
           "given " + conditions.stream().map(Outline::of).collect(Collectors.joining(" and "));
       case Statement.Drop(var names, _) -> "drop " + names(names);
       case Statement.DropGiven _ -> "drop the assumptions";
       case Statement.Vary(var variable, _) -> "vary " + variable.text();
       case Statement.Arbitrary(var names, _) -> "arbitrary " + names(names);
+      case Statement.Umbra(var letters, var series, _) ->
+          "umbra " + names(letters) + " with " + of(series);
       case Statement.Why(var handle, _) -> "why " + handle.map(Outline::of).orElse("the latest");
       case Statement.Names _ -> "names";
       case Statement.Keep(var file, _) -> "keep <" + file + ">";

@@ -26,16 +26,20 @@ final class RandomTrees {
   }
 
   Statement statement() {
-    return switch (random.nextInt(12)) {
+    return switch (random.nextInt(14)) {
       case 0 ->
           new Statement.Let(
               free(), random.nextBoolean() ? List.of() : distinct(), value(4), Span.NONE);
-      case 1 -> new Statement.Claim(sum(4), sum(4), optional(() -> range(2)), Span.NONE);
+      case 1 -> new Statement.Claim(sum(4), sum(4), optional(() -> range(2)), List.of(), Span.NONE);
       case 2 -> new Statement.Given(some(3, this::condition), Span.NONE);
       case 3 -> new Statement.Drop(distinct(), Span.NONE);
       case 4 -> new Statement.Why(optional(this::handle), Span.NONE);
       case 5 -> new Statement.Arbitrary(distinct(), Span.NONE);
       case 6 -> new Statement.Keep("terraces of 1842.gnomon", Span.NONE);
+      case 7 ->
+          new Statement.Claim(
+              sum(4), sum(4), Optional.empty(), some(2, this::condition), Span.NONE);
+      case 8 -> new Statement.Umbra(distinct(), sum(4), Span.NONE);
       default -> new Statement.ExpressionStatement(value(5), Span.NONE);
     };
   }
