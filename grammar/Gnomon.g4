@@ -30,10 +30,11 @@ file      : ( KEEP | REPLAY | RECHECK | RERECORD ) STRING ;
 help      : HELP ( ~EOF )* ;
 leave     : LEAVE ;
 
-value        : ( matrix | solve | recurrence | family | sum ) clause* ;
+value        : ( matrix | solve | carry | recurrence | family | sum ) clause* ;
 matrix       : MATRIX sum TO sum ;
 solve        : SOLVE equation ( WITH equation ( COMMA equation )* )? ;
 equation     : sum EQUALS sum ;
+carry        : CARRY equation ( WITH equation ( COMMA equation )* )? BY sum ;
 recurrence   : RECURRENCE EXPONENTIAL? sum ;
 family       : FAMILY sum ;
 clause
@@ -76,6 +77,8 @@ HELP : 'help' ;
 LEAVE : 'leave' ;
 MATRIX : 'matrix' ;
 SOLVE : 'solve' ;
+CARRY : 'carry' ;
+BY : 'by' ;
 FAMILY : 'family' ;
 WITH : 'with' ;
 RECURRENCE : 'recurrence' ;

@@ -65,6 +65,7 @@ final class Evaluator {
       case Expression.Matrix matrix ->
           matrices.matrix(
               value(matrix.operator(), scope), whole(matrix.order(), scope), matrix.span(), scope);
+      case Expression.Carry carry -> new Carrying(this, evaluation).value(carry, scope);
       case Expression.Solve solve -> new Solving(this, evaluation).value(solve, scope);
       case Expression.Recurrence law -> new Laws(this, evaluation).value(law, scope);
       case Expression.Family(Expression subject, Span span) -> {

@@ -98,7 +98,12 @@ public final class Interpreter {
   private static Status status(Value value, Status met) {
     Status own = value.status();
     if (!(value instanceof FormValue)) {
-      boolean law = met.kind() == Status.Kind.GUESSED || met.kind() == Status.Kind.RECURRENCE;
+      boolean law =
+          switch (met.kind()) {
+            case GUESSED, RECURRENCE, CARRIED -> true;
+            case NONE, CLOSED_FORM, NO_CLOSED_FORM, PROVED, REFUTED, OPEN -> false;
+            case LEFT_AS_SUM, LEFT_AS_PRODUCT, LEFT_AS_INTEGRAL -> false;
+          };
       return law && value instanceof OperatorValue ? met : own;
     }
     boolean standing = own.isLeft();
@@ -107,6 +112,7 @@ public final class Interpreter {
       case LEFT_AS_SUM, LEFT_AS_PRODUCT, LEFT_AS_INTEGRAL -> standing ? own : Status.NONE;
       case NO_CLOSED_FORM, RECURRENCE -> standing ? met : Status.NONE;
       case NONE -> met.detail().isEmpty() ? own : met;
+      case CARRIED -> met;
       case GUESSED, PROVED, REFUTED, OPEN -> own;
     };
   }

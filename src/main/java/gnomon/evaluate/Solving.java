@@ -10,6 +10,7 @@ import gnomon.form.Generator;
 import gnomon.form.Structure;
 import gnomon.form.Unknown;
 import gnomon.form.Variable;
+import gnomon.number.Rational;
 import gnomon.recurrence.ConstantsFromConditions;
 import gnomon.recurrence.DifferentialSolver;
 import gnomon.recurrence.LinearEquation;
@@ -104,8 +105,23 @@ final class Solving {
     return new Problem(unknown, equation, conditions, scope.running());
   }
 
+  /// A linear equation whose variable v was moved so that the least argument is v, and by how much.
+  record Law(LinearEquation equation, Rational lowest) {}
+
+  /// The equation, read as a linear one in the unknown function.
+  Law law(Expression.Solve solve, Scope scope) {
+    return Places.at(solve.equation().span(), () -> problem(solve, scope).law());
+  }
+
+  /// Its solution in closed form.
+  ///
+  /// @throws LocatedRefusal where none was found
+  Form solution(Expression.Solve solve, Scope scope) {
+    return Places.at(solve.equation().span(), () -> problem(solve, scope).solution());
+  }
+
   private Value solved(Expression.Solve solve, Scope scope) {
-    Form solution = Places.at(solve.equation().span(), () -> problem(solve, scope).solution());
+    Form solution = solution(solve, scope);
     evaluation.status(Status.of(Status.Kind.CLOSED_FORM));
     return Sorts.of(solution, scope);
   }
@@ -134,8 +150,16 @@ final class Solving {
       this.variable = unknown.variable(equation);
     }
 
+    LinearEquation linear() {
+      return unknown.equation(equation, variable);
+    }
+
+    Law law() {
+      return new Law(linear(), unknown.lowestShift(equation, variable));
+    }
+
     Form solution() {
-      LinearEquation linear = unknown.equation(equation, variable);
+      LinearEquation linear = linear();
       SolutionSpace space =
           switch (linear.action()) {
             case SHIFT ->

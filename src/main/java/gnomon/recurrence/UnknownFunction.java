@@ -78,6 +78,15 @@ public record UnknownFunction(String name) {
     return all.first();
   }
 
+  /// The least of the numbers added to v in the arguments of the unknown function, by which
+  /// [#equation] moves the equation.
+  public Rational lowestShift(Form form, Variable v) {
+    return occurrences(form).stream()
+        .flatMap(unknown -> unknown.argument().minus(Form.of(v)).asRational().stream())
+        .min(Rational::compareTo)
+        .orElse(Rational.ZERO);
+  }
+
   /// The equation form = 0 for the function of v, its lowest argument moved to v.
   ///
   /// @throws Refusal with [Reason#EQUATION_NOT_LINEAR], [Reason#EQUATION_ARGUMENTS] or

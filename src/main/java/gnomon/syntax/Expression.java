@@ -6,10 +6,10 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalInt;
 
-/// An expression as it was written. From the outside in: [Clauses], [Matrix], [Solve], [Recurrence]
-/// and [Family] hold any expression below them, then [Sum], then [Sign], then [Term] and [Binder],
-/// then [Suffixed], then the atoms. Anything else stands inside a [Parenthesis] or [Bracket], which
-/// the tree keeps.
+/// An expression as it was written. From the outside in: [Clauses], [Matrix], [Solve], [Carry],
+/// [Recurrence] and [Family] hold any expression below them, then [Sum], then [Sign], then [Term]
+/// and [Binder], then [Suffixed], then the atoms. Anything else stands inside a [Parenthesis] or
+/// [Bracket], which the tree keeps.
 public sealed interface Expression {
   /// Where it was written.
   Span span();
@@ -155,6 +155,9 @@ public sealed interface Expression {
       conditions = List.copyOf(conditions);
     }
   }
+
+  /// `carry L f = g with f(0) = 1 by U`: an equation, its conditions, and the map that carries it.
+  record Carry(Solve law, Expression map, Span span) implements Expression {}
 
   /// `recurrence a`, the law of a list, or of the coefficients of a function; with `exponential` of
   /// n! times the coefficients.

@@ -2,6 +2,7 @@ package gnomon.syntax;
 
 import gnomon.diagnostic.Span;
 import gnomon.syntax.Expression.Bracket;
+import gnomon.syntax.Expression.Carry;
 import gnomon.syntax.Expression.Clauses;
 import gnomon.syntax.Expression.Equation;
 import gnomon.syntax.Expression.Family;
@@ -65,15 +66,23 @@ final class ExpressionBuilder {
     if (context.family() != null) {
       return new Family(sum(context.family().sum()), span(context.family()));
     }
-    return context.matrix() != null ? matrix(context.matrix()) : solve(context.solve());
+    if (context.carry() != null) {
+      GnomonParser.CarryContext carry = context.carry();
+      Expression map = sum(carry.sum());
+      Solve law = solve(carry.equation(), span(carry));
+      return new Carry(law, map, span(carry));
+    }
+    return context.matrix() != null
+        ? matrix(context.matrix())
+        : solve(context.solve().equation(), span(context.solve()));
   }
 
-  private Solve solve(GnomonParser.SolveContext context) {
+  private Solve solve(List<GnomonParser.EquationContext> contexts, Span span) {
     List<Equation> equations = new ArrayList<>();
-    for (GnomonParser.EquationContext equation : context.equation()) {
+    for (GnomonParser.EquationContext equation : contexts) {
       equations.add(new Equation(sum(equation.sum(0)), sum(equation.sum(1))));
     }
-    return new Solve(equations.getFirst(), equations.subList(1, equations.size()), span(context));
+    return new Solve(equations.getFirst(), equations.subList(1, equations.size()), span);
   }
 
   private Matrix matrix(GnomonParser.MatrixContext context) {

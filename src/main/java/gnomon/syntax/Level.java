@@ -25,6 +25,7 @@ enum Level {
       case Expression.Sum _ -> SUM;
       case Expression.Matrix _,
           Expression.Solve _,
+          Expression.Carry _,
           Expression.Recurrence _,
           Expression.Family _,
           Expression.Clauses _ ->

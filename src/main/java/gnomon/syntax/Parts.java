@@ -2,6 +2,7 @@ package gnomon.syntax;
 
 import gnomon.syntax.Expression.Binder;
 import gnomon.syntax.Expression.Bracket;
+import gnomon.syntax.Expression.Carry;
 import gnomon.syntax.Expression.Clauses;
 import gnomon.syntax.Expression.Family;
 import gnomon.syntax.Expression.Handle;
@@ -42,6 +43,11 @@ public final class Parts {
       case Binder(_, var range, var body, _) -> List.of(range.lower(), range.upper(), body);
       case Matrix(var operator, var order, _) -> List.of(operator, order);
       case Family(var subject, _) -> List.of(subject);
+      case Carry(var law, var map, _) -> {
+        List<Expression> parts = new ArrayList<>(of(law));
+        parts.add(map);
+        yield parts;
+      }
       case Solve(var equation, var conditions, _) ->
           Stream.concat(Stream.of(equation), conditions.stream())
               .flatMap(each -> Stream.of(each.left(), each.right()))

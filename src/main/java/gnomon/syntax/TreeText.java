@@ -3,6 +3,7 @@ package gnomon.syntax;
 import gnomon.syntax.Expression.Binder;
 import gnomon.syntax.Expression.Binding;
 import gnomon.syntax.Expression.Bracket;
+import gnomon.syntax.Expression.Carry;
 import gnomon.syntax.Expression.Clauses;
 import gnomon.syntax.Expression.Equation;
 import gnomon.syntax.Expression.Family;
@@ -69,20 +70,24 @@ final class TreeText {
       case Matrix(var operator, var order, _) ->
           add("matrix ").add(operator).add(" to ").add(order);
       case Family(var subject, _) -> add("family ").add(subject);
-      case Solve(var equation, var conditions, _) -> {
-        add("solve ").equation(equation);
-        String before = " with ";
-        for (Equation condition : conditions) {
-          add(before).equation(condition);
-          before = ", ";
-        }
-      }
+      case Solve solve -> add("solve ").law(solve);
+      case Carry(var law, var map, _) -> add("carry ").law(law).add(" by ").add(map);
       case Recurrence(var subject, var exponential, _) ->
           add(exponential ? "recurrence exponential " : "recurrence ").add(subject);
       case Clauses(var subject, var clauses, _) -> {
         add(subject);
         clauses.forEach(this::clause);
       }
+    }
+    return this;
+  }
+
+  private TreeText law(Solve law) {
+    equation(law.equation());
+    String before = " with ";
+    for (Equation condition : law.conditions()) {
+      add(before).equation(condition);
+      before = ", ";
     }
     return this;
   }

@@ -79,6 +79,7 @@ final class WordTable {
           word("leave", STATEMENT, "ends the session"),
           word("matrix", STATEMENT, "matrix A to N is the matrix of A on x^0 to x^N"),
           word("solve", STATEMENT, "solves a linear difference or differential equation"),
+          word("carry", STATEMENT, "carries an equation and its solutions over by a basis map"),
           word("recurrence", STATEMENT, "the law of a list, or of the coefficients of a function"),
           word("family", STATEMENT, "says to which family of sequences a map or operator belongs"));
 
@@ -97,6 +98,7 @@ final class WordTable {
           word("tex", CLAUSE, "in tex, as a formula to set in print"),
           word("exponential", CLAUSE, "recurrence exponential f is the law of n! times [x^n] f"),
           word("with", CLAUSE, "the values that the solution of an equation takes"),
+          word("by", CLAUSE, "the basis map that carries an equation"),
           word("integer", CLAUSE, "given n integer assumes that n is one"));
 
   static final List<Word> SIGNS =

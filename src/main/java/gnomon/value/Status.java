@@ -14,6 +14,7 @@ public record Status(Kind kind, String detail) {
     LEFT_AS_PRODUCT("left as a product"),
     LEFT_AS_INTEGRAL("left as an integral"),
     GUESSED("guessed"),
+    CARRIED("carried"),
     PROVED("proved"),
     REFUTED("refuted"),
     OPEN("open");
@@ -47,7 +48,8 @@ public record Status(Kind kind, String detail) {
   public boolean isLeft() {
     return switch (kind) {
       case LEFT_AS_SUM, LEFT_AS_PRODUCT, LEFT_AS_INTEGRAL -> true;
-      case NONE, CLOSED_FORM, RECURRENCE, NO_CLOSED_FORM, GUESSED, PROVED, REFUTED, OPEN -> false;
+      case NONE, CLOSED_FORM, RECURRENCE, NO_CLOSED_FORM, GUESSED, CARRIED, PROVED, REFUTED, OPEN ->
+          false;
     };
   }
 

@@ -80,6 +80,7 @@ final class Outline {
               + of(equation)
               + conditions.stream().map(c -> "; " + of(c)).collect(Collectors.joining())
               + "}";
+      case Expression.Carry(var law, var map, _) -> "{carry " + of(law) + " by " + of(map) + "}";
       case Expression.Recurrence(var subject, var exponential, _) ->
           "{recurrence " + (exponential ? "exponential " : "") + of(subject) + "}";
       case Expression.Clauses(var subject, var clauses, _) ->

@@ -46,7 +46,13 @@ final class RandomTrees {
 
   private Expression value(int depth) {
     Expression subject =
-        switch (random.nextInt(12)) {
+        switch (random.nextInt(14)) {
+          case 4 ->
+              new Expression.Carry(
+                  new Expression.Solve(
+                      equation(depth - 1), maybe(() -> equation(depth - 2)), Span.NONE),
+                  sum(depth - 1),
+                  Span.NONE);
           case 0 -> new Expression.Matrix(sum(depth - 1), sum(0), Span.NONE);
           case 1 ->
               new Expression.Solve(
