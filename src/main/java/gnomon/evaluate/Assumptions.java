@@ -61,7 +61,8 @@ public record Assumptions(Set<Variable> integers, List<Comparison> comparisons) 
     return integers.isEmpty() ? form : form.takingIntegers(integers);
   }
 
-  /// Whether the point is known to satisfy everything that is assumed.
+  /// Whether the point is known to satisfy everything that is assumed of the variables it has
+  /// values for.
   boolean allow(Map<Variable, Rational> point) {
     for (Map.Entry<Variable, Rational> entry : point.entrySet()) {
       if (integers.contains(entry.getKey()) && !entry.getValue().isInteger()) {
@@ -70,7 +71,9 @@ public record Assumptions(Set<Variable> integers, List<Comparison> comparisons) 
     }
     var images = new HashMap<Generator, Form>();
     point.forEach((variable, value) -> images.put(variable, Form.of(value)));
-    return comparisons.stream().allMatch(comparison -> holds(comparison, images));
+    return comparisons.stream()
+        .filter(comparison -> images.keySet().containsAll(variables(comparison)))
+        .allMatch(comparison -> holds(comparison, images));
   }
 
   /// Whether the condition that a subject is a natural number follows from one of the comparisons;
@@ -91,9 +94,13 @@ public record Assumptions(Set<Variable> integers, List<Comparison> comparisons) 
   }
 
   private static boolean isAbout(Comparison comparison, Variable variable) {
+    return variables(comparison).equals(Set.of(variable));
+  }
+
+  private static Set<Variable> variables(Comparison comparison) {
     Set<Variable> variables = new TreeSet<>(comparison.left().variables());
     variables.addAll(comparison.right().variables());
-    return variables.equals(Set.of(variable));
+    return variables;
   }
 
   private static boolean holds(Comparison comparison, Map<Generator, Form> images) {

@@ -192,6 +192,10 @@ final class Claims {
     if (umbral.isPresent()) {
       return umbral.get();
     }
+    Optional<VerdictValue> sums = new SumClaims(evaluation, assumptions).verdict(a, b);
+    if (sums.isPresent()) {
+      return sums.get();
+    }
     Optional<Witness> choice = UnknownFunctions.witness(a, b, assumptions, scope);
     if (choice.isPresent()) {
       return new Refuted(choice.get());

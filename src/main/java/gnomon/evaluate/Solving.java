@@ -54,7 +54,7 @@ final class Solving {
     return held.isPresent() ? at(held.get(), solve, scope) : solved(solve, scope);
   }
 
-  /// The solution at the number that the variable of the equation stands for here.
+  /// The solution at the number or form that the variable of the equation stands for here.
   private Value at(String name, Expression.Solve solve, Scope scope) {
     Value number = evaluator.value(new Expression.Name(name, solve.equation().span()), scope);
     Map<Generator, Form> image =
@@ -70,11 +70,15 @@ final class Solving {
     }
     List<Condition> met = evaluation.conditions();
     evaluation.conditions(earlier);
-    if (Validity.fails(met, image)) {
-      throw Problems.of(
-          "domain-validity", "the solution does not hold here", solve.equation().span());
+    for (Condition condition : met) {
+      Form subject = condition.subject().substitute(image);
+      if (!subject.isConstant()) {
+        evaluation.require(List.of(new Condition(subject, condition.relation())));
+      } else if (Validity.fails(List.of(condition), image)) {
+        throw Problems.of(
+            "domain-validity", "the solution does not hold here", solve.equation().span());
+      }
     }
-    evaluation.require(met.stream().filter(c -> !Validity.concerns(c, image)).toList());
     Form form = Sorts.form(solution, solve.span(), "the solution");
     return Places.at(
         solve.span(), () -> Sorts.of(Substitutions.addedUp(form.substitute(image)), scope));

@@ -1,6 +1,7 @@
 package gnomon.evaluate;
 
 import gnomon.form.Form;
+import gnomon.form.Variable;
 import gnomon.syntax.Expression;
 import gnomon.syntax.Factor;
 import gnomon.syntax.Parts;
@@ -60,15 +61,15 @@ final class UnknownName {
         "solve E f = 2 f + 1 with f(0) = 1");
   }
 
-  /// A name that stands for a number here, and in the equation inside a parenthesis that is written
-  /// against the unknown function: the variable of the equation, put in before it is solved.
+  /// A name that stands for a number or another form here, and in the equation inside a parenthesis
+  /// that is written against the unknown function: the variable of the equation.
   Optional<String> heldArgument(Expression.Solve solve) {
     for (Expression part : all(sides(solve.equation()))) {
       if (part instanceof Expression.Term term) {
         for (Factor factor : term.factors()) {
           if (factor.isArgument()) {
             Optional<String> held =
-                names(List.of(factor.value())).stream().filter(this::isHeldNumber).findFirst();
+                names(List.of(factor.value())).stream().filter(this::isHeld).findFirst();
             if (held.isPresent()) {
               return held;
             }
@@ -76,12 +77,12 @@ final class UnknownName {
         }
       }
     }
-    return Optional.of(scope.running().name()).filter(this::isHeldNumber);
+    return Optional.of(scope.running().name()).filter(this::isHeld);
   }
 
-  private boolean isHeldNumber(String name) {
+  private boolean isHeld(String name) {
     return scope.binding(name).orElse(null) instanceof Binding.Held(FormValue(Form form, _, _))
-        && form.isConstant();
+        && !form.equals(Form.of(new Variable(name)));
   }
 
   /// The names that a parenthesis is written against, but not those that stand in one such, as n in

@@ -1,6 +1,7 @@
 package gnomon.evaluate;
 
 import gnomon.algebra.Refusal;
+import gnomon.form.Accumulation;
 import gnomon.form.Form;
 import gnomon.form.Generator;
 import gnomon.form.Unknown;
@@ -11,9 +12,11 @@ import gnomon.value.VerdictValue.Assignment;
 import gnomon.value.VerdictValue.Witness;
 import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import java.util.TreeSet;
 
 /// The search for a point at which two forms have different values, both exact. A difference of
@@ -62,11 +65,22 @@ final class Witnesses {
     return Sorts.of(form, scope);
   }
 
+  /// The value at the point. Standing sums are added up before the variables that are not in their
+  /// limits get values, so that x (x + k)^(k − 1) is 1 at k = 0 also where x is 0.
   private static Optional<Form> valueAt(Form form, Map<Variable, Rational> point) {
-    Map<Generator, Form> images = new HashMap<>();
-    point.forEach((variable, value) -> images.put(variable, Form.of(value)));
+    Set<Variable> ends = new HashSet<>();
+    for (Generator g : form.generators()) {
+      if (g instanceof Accumulation sum) {
+        ends.addAll(sum.lower().variables());
+        ends.addAll(sum.upper().variables());
+      }
+    }
+    Map<Generator, Form> first = new HashMap<>();
+    Map<Generator, Form> rest = new HashMap<>();
+    point.forEach((v, value) -> (ends.contains(v) ? first : rest).put(v, Form.of(value)));
     try {
-      return Optional.of(Substitutions.addedUp(form.substitute(images)));
+      Form summed = first.isEmpty() ? form : Substitutions.addedUp(form.substitute(first));
+      return Optional.of(Substitutions.addedUp(summed.substitute(rest)));
     } catch (Refusal undefined) {
       return Optional.empty();
     }

@@ -76,7 +76,7 @@ public final class DefiniteSums {
     if (span.variables().stream().anyMatch(summand::dependsOn)) {
       Form reversed = summand.substitute(k, a.plus(b).minus(Form.of(k)));
       boolean free = span.variables().stream().noneMatch(reversed::dependsOn);
-      return free ? found(reversed, k, a, b) : new EntangledSums(engine).sum(summand, k, a, b);
+      return free ? found(reversed, k, a, b) : entangled(summand, k, a, b);
     }
     if (a.asRational().isPresent()) {
       Form fromZero = summand.substitute(k, Form.of(k).plus(a));
@@ -87,6 +87,32 @@ public final class DefiniteSums {
       return symbolic(fromZero, k, span, summand, a, b);
     }
     return bothSymbolic(summand, k, a, b);
+  }
+
+  /// A sum whose ends occur in the summand; where nothing is found, once more counted from 0 and
+  /// with one variable for the number of terms.
+  private DefiniteSum entangled(Form f, Variable k, Form a, Form b) {
+    DefiniteSum sum = new EntangledSums(engine).sum(f, k, a, b);
+    if (sum.status() == DefiniteSum.Status.CLOSED_FORM || a.isZero()) {
+      return sum;
+    }
+    Form counted = f.substitute(k, Form.of(k).plus(a));
+    Form span = b.minus(a);
+    Optional<DefiniteSum> closed =
+        span.variables().size() == 1
+            ? Optional.of(new EntangledSums(engine).sum(counted, k, Form.ZERO, span))
+            : span.variables().stream()
+                .filter(n -> !span.minus(Form.of(n)).dependsOn(n))
+                .findFirst()
+                .map(
+                    n -> {
+                      Form rest = span.minus(Form.of(n));
+                      Form merged = counted.substitute(n, Form.of(n).minus(rest));
+                      return new EntangledSums(engine)
+                          .sum(merged, k, Form.ZERO, Form.of(n))
+                          .substituted(n, span);
+                    });
+    return closed.filter(found -> found.status() == DefiniteSum.Status.CLOSED_FORM).orElse(sum);
   }
 
   /// Σ(k: m..n) f for symbols m and n where m occurs in f, with n counted from m.

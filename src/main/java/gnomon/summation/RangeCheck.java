@@ -103,6 +103,9 @@ final class RangeCheck {
       // a root with a parameter is generic, and no integer
       return root.variables().stream().anyMatch(v -> !v.equals(n));
     }
+    if (line.get().slope().isInteger() && !line.get().start().isInteger()) {
+      return true;
+    }
     if (isPositive(lowerLine.minus(line.get())) || isPositive(line.get().minus(upperLine))) {
       return true;
     }
@@ -116,9 +119,10 @@ final class RangeCheck {
   }
 
   /// Whether the argument of a factorial is at least 0 at both ends of the range, and so between
-  /// them; an argument with a parameter is generic.
+  /// them, or never an integer; an argument with a parameter is generic.
   private boolean isNatural(Form argument) {
-    if (argument.variables().stream().anyMatch(v -> !v.equals(n) && !v.equals(k))) {
+    if (argument.variables().stream().anyMatch(v -> !v.equals(n) && !v.equals(k))
+        || isFractional(argument)) {
       return true;
     }
     for (Form end : List.of(lower, upper)) {
@@ -129,6 +133,18 @@ final class RangeCheck {
       }
     }
     return true;
+  }
+
+  /// Whether the argument is a fraction more than an integer combination of k and n.
+  private boolean isFractional(Form argument) {
+    Optional<Line> start = Line.of(argument.substitute(k, Form.ZERO), n);
+    Optional<Rational> slope =
+        argument.substitute(k, Form.of(k).plus(Form.ONE)).minus(argument).asRational();
+    return start.isPresent()
+        && slope.isPresent()
+        && slope.get().isInteger()
+        && start.get().slope().isInteger()
+        && !start.get().start().isInteger();
   }
 
   /// Whether the function is positive for all large n; raises `from` to where that begins.
