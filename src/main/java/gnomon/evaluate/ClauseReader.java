@@ -73,7 +73,7 @@ final class ClauseReader {
           && (Validity.fails(evaluation.conditions(), substitutions.images(values, scope))
               || Validity.isSingular(value, substitutions.images(values, scope)))) {
         evaluation.conditions(earlier);
-        value = evaluator.value(upTo(clausal, at), substitutions.holding(values, scope));
+        value = anew(upTo(clausal, at), values, scope);
         at++;
         continue;
       }
@@ -101,6 +101,26 @@ final class ClauseReader {
         settle(earlier, values, scope);
       }
       at += joined ? 2 : 1;
+    }
+    return value;
+  }
+
+  /// The expression with the variables held at their values. A name in it may have kept one of
+  /// them, and then there is no value.
+  private Value anew(Expression subject, Clause.At clause, Scope scope) {
+    Value value = evaluator.value(subject, substitutions.holding(clause, scope));
+    Map<Generator, Form> images = substitutions.images(clause, scope);
+    boolean kept =
+        value instanceof FormValue form
+            && form.form().variables().stream()
+                .filter(images::containsKey)
+                .anyMatch(v -> images.values().stream().noneMatch(image -> image.dependsOn(v)));
+    if (kept) {
+      throw Problems.of(
+          "kind-at",
+          "the value of a name here has no limit at these values",
+          clause.span(),
+          "the expression itself in place of its name");
     }
     return value;
   }
@@ -137,7 +157,7 @@ final class ClauseReader {
         throw refused;
       }
       try {
-        return evaluator.value(subject, substitutions.holding(clause, scope));
+        return anew(subject, clause, scope);
       } catch (LocatedRefusal _) {
         throw refused;
       }

@@ -8,13 +8,15 @@ import gnomon.form.Moment;
 import gnomon.form.Unknown;
 import gnomon.form.Variable;
 import gnomon.operator.Operator;
-import gnomon.summation.Condition;
 import gnomon.syntax.Expression;
 import gnomon.syntax.Suffix;
 import gnomon.syntax.Vocabulary;
 import gnomon.value.Value;
+import java.util.HashSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 
 /// What a name without arguments means: a binding of the scope, a word of the language, or a free
 /// parameter.
@@ -95,32 +97,36 @@ final class Names {
 
   private Value here(Binding.Named named, Span span, Scope scope) {
     boolean moved = !named.scope().running().equals(scope.running());
-    if (!named.conditions().isEmpty()) {
-      Optional<Scope> held = held(named, scope);
-      if (held.isPresent()) {
-        return Places.calledFrom(span, () -> evaluator.value(named.expression(), held.get()));
-      }
-      evaluator.evaluation().require(named.conditions());
+    Optional<Scope> held = held(named, scope);
+    if (held.isPresent()) {
+      return Places.calledFrom(span, () -> evaluator.value(named.expression(), held.get()));
     }
+    evaluator.evaluation().require(named.conditions());
     return moved && Sorts.acts(named.value())
         ? Places.calledFrom(
             span, () -> evaluator.value(named.expression(), named.scope().running(scope.running())))
         : Expansions.settled(named.value());
   }
 
-  /// The scope of a named value with the numbers that variables of its conditions have here.
+  /// The scope of a named value with what is put in here for its letters, where one of them stands
+  /// in its conditions.
   private static Optional<Scope> held(Binding.Named named, Scope scope) {
+    Set<Variable> letters = new HashSet<>();
+    named.conditions().forEach(condition -> letters.addAll(condition.subject().variables()));
+    boolean none =
+        letters.stream()
+            .noneMatch(v -> scope.binding(v.name()).orElse(null) instanceof Binding.Held);
+    if (none) {
+      return Optional.empty();
+    }
     Scope inside = named.scope();
-    boolean any = false;
-    for (Condition condition : named.conditions()) {
-      for (Variable variable : condition.subject().variables()) {
-        if (scope.binding(variable.name()).orElse(null) instanceof Binding.Held number) {
-          inside = inside.with(variable.name(), number);
-          any = true;
-        }
+    for (Map.Entry<String, Binding> entry : scope.names().entrySet()) {
+      boolean free = named.scope().binding(entry.getKey()).isEmpty();
+      if (entry.getValue() instanceof Binding.Held held && free) {
+        inside = inside.with(entry.getKey(), held);
       }
     }
-    return any ? Optional.of(inside) : Optional.empty();
+    return Optional.of(inside);
   }
 
   private Value unbound(Expression.Name name, Scope scope) {

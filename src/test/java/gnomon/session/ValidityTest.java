@@ -39,6 +39,22 @@ class ValidityTest {
     assertTrue(lines.get(4).startsWith("1 @"), lines.get(4));
   }
 
+  /// By hand: 1 − 2 + 3, −1 − 1, and no value of (n − 2)!/((−2)! n!).
+  @Test
+  void allValuesPutIntoANamedSumReachIt() {
+    List<String> lines =
+        answers(
+            "let s = Sigma(k: 0..n) binom(a, k)",
+            "s at n = 2, a = -2",
+            "let t = Sigma(k: 0..n) (a - k - 1) (-1)^k binom(n, k)",
+            "t at n = 0, a = -1",
+            "let f = (m + n + 1)!/((m + 1)! n!)",
+            "f at m = -3");
+    assertTrue(lines.get(1).startsWith("2 @"), lines.get(1));
+    assertTrue(lines.get(3).startsWith("-2 @"), lines.get(3));
+    assertTrue(lines.get(5).startsWith("error kind-at"), lines.get(5));
+  }
+
   @Test
   void aProofNamesTheRangeOfItsClosedForms() {
     List<String> lines =
