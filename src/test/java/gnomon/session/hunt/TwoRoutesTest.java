@@ -31,7 +31,7 @@ final class TwoRoutesTest {
   @Test
   void sumsHaveTheValuesOfTheirTerms() {
     Hunt hunt = new Hunt(1);
-    int count = Hunt.statements(90);
+    int count = Hunt.statements(10);
     for (int i = 0; i < count; i++) {
       hunt.begin();
       Term summand = hunt.terms.summand();
@@ -69,7 +69,7 @@ final class TwoRoutesTest {
   @Test
   void operatorsDoToPolynomialsWhatTheirLettersDo() {
     Hunt hunt = new Hunt(2);
-    int count = Hunt.statements(250);
+    int count = Hunt.statements(100);
     for (int i = 0; i < count; i++) {
       Word word = Word.random(hunt.terms, Word.LETTERS, hunt.terms.between(1, 3));
       Polynomial p = Polynomial.random(hunt.random, hunt.terms.between(0, 4));
@@ -83,7 +83,7 @@ final class TwoRoutesTest {
   @Test
   void productsOfOperatorsActOneAfterTheOther() {
     Hunt hunt = new Hunt(3);
-    int count = Hunt.statements(120);
+    int count = Hunt.statements(30);
     for (int i = 0; i < count; i++) {
       String a = Word.random(hunt.terms, Word.LETTERS, 1).text();
       String b = Word.random(hunt.terms, Word.LETTERS, 1).text();
@@ -118,7 +118,7 @@ final class TwoRoutesTest {
   @Test
   void mapsOfDeltaOperatorsCarryPowersToTheBasicSequence() {
     Hunt hunt = new Hunt(4);
-    int count = Hunt.statements(80);
+    int count = Hunt.statements(30);
     for (int i = 0; i < count; i++) {
       Word delta = hunt.terms.pick(Word.INVARIANT.subList(0, 2));
       Word other = Word.random(hunt.terms, Word.INVARIANT, 1);
@@ -149,7 +149,7 @@ final class TwoRoutesTest {
   @Test
   void expansionsKeepTheValue() {
     Hunt hunt = new Hunt(5);
-    int count = Hunt.statements(120);
+    int count = Hunt.statements(30);
     List<String> forms =
         List.of(
             "falling",
@@ -187,7 +187,7 @@ final class TwoRoutesTest {
   @Test
   void numbersMayBePutInBeforeOrAfter() {
     Hunt hunt = new Hunt(6);
-    int count = Hunt.statements(200);
+    int count = Hunt.statements(30);
     for (int i = 0; i < count; i++) {
       Term f = hunt.terms.summand();
       Map<String, Fraction> numbers =
@@ -229,7 +229,7 @@ final class TwoRoutesTest {
   @Test
   void trueIdentitiesAreNotRefutedNorFalseOnesProved() {
     Hunt hunt = new Hunt(7);
-    int count = Hunt.statements(120);
+    int count = Hunt.statements(30);
     for (int i = 0; i < count; i++) {
       Word a = Word.random(hunt.terms, Word.LETTERS, 2);
       Polynomial p = Polynomial.random(hunt.random, hunt.terms.between(0, 3));
@@ -253,7 +253,7 @@ final class TwoRoutesTest {
   @Test
   void trueSumsAreNotRefutedNorFalseOnesProved() {
     Hunt hunt = new Hunt(8);
-    int count = Hunt.statements(60);
+    int count = Hunt.statements(8);
     for (int i = 0; i < count; i++) {
       String f = hunt.terms.summand().text();
       String back = f.replaceAll("(?<![a-zA-Z])k(?![a-zA-Z])", "(n - k)");
