@@ -94,6 +94,9 @@ public enum Reason {
   /// A pole of a summand or factor at one of the points of the range. Data: the distance of the
   /// pole from the numeric end, or the pole; that end.
   POLE_IN_RANGE,
+  /// A standing sum or product whose upper end is less than the lower end less one. Data: both
+  /// ends.
+  RANGE_REVERSED,
   /// A root outside the exact constants, i and real radicals. Data: the base, the exponent.
   ROOT_OUT_OF_FIELD,
   /// A shift whose length depends on the variable shifted. Data: the length, the variable.

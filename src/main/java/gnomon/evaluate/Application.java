@@ -4,10 +4,14 @@ import gnomon.algebra.Reason;
 import gnomon.algebra.Refusal;
 import gnomon.basis.MappedOperator;
 import gnomon.diagnostic.Span;
+import gnomon.form.Accumulation;
 import gnomon.form.Form;
 import gnomon.form.Structure;
 import gnomon.form.Variable;
+import gnomon.operator.Functional;
 import gnomon.operator.Operator;
+import gnomon.recurrence.Lowered;
+import gnomon.summation.Condition;
 import gnomon.summation.DefiniteSum;
 import gnomon.summation.DefiniteSums;
 import gnomon.value.FormValue;
@@ -18,6 +22,7 @@ import gnomon.value.OperatorValue;
 import gnomon.value.SeriesValue;
 import gnomon.value.Status;
 import gnomon.value.Value;
+import java.util.List;
 import java.util.Optional;
 
 /// An operator, basis map or functional in front of what it acts on: applied to functions, composed
@@ -57,6 +62,7 @@ final class Application {
 
   private Value toForm(Value a, Form f, Span span, Scope scope) {
     Variable x = scope.running();
+    refuseHeld(a, span, scope);
     if (a instanceof FunctionalValue value) {
       Form image = value.functional().applyTo(f, evaluation.sums());
       evaluation.grounds().applied(Sorts.of(value.functional().toOperator()), f, image, x);
@@ -70,12 +76,36 @@ final class Application {
     if (evaluation.truncation().isPresent() && plain.isPresent()) {
       return Sorts.of(truncated(plain.get(), f), scope);
     }
-    Form image = operator.applyTo(f, evaluation.sums());
+    Form image = Lowered.of(operator.applyTo(f, evaluation.sums()), x);
     if (plain.filter(Application::sums).isPresent()) {
       evaluation.status(Status.of(Status.Kind.CLOSED_FORM));
     }
     evaluation.grounds().applied(a, f, image, x);
     return Sorts.of(image, scope);
+  }
+
+  /// An operator that acts on the running variable has nothing to act on where that has a value.
+  private static void refuseHeld(Value a, Span span, Scope scope) {
+    Variable x = scope.running();
+    boolean held =
+        scope.binding(x.name()).orElse(null) instanceof Binding.Held(FormValue(Form form, _, _))
+            && !form.equals(Form.of(x));
+    if (held && actsOn(a, x)) {
+      throw Problems.of(
+          "domain-held", "an operator acts on " + x.name() + ", which has a value here", span);
+    }
+  }
+
+  private static boolean actsOn(Value a, Variable x) {
+    if (a instanceof FunctionalValue(Functional functional)) {
+      return functional.variable().equals(x);
+    }
+    return Sorts.asOperator(a).stream()
+        .flatMap(operator -> operator.terms().stream())
+        .anyMatch(
+            term ->
+                !term.map().isIdentity() && term.map().variable().equals(x)
+                    || term.operator().variables().contains(x));
   }
 
   /// The image, cut off where it would be an infinite series.
@@ -109,6 +139,10 @@ final class Application {
               .sum(summand, k, Form.ZERO, Form.of(x).minus(Form.ONE));
       evaluation.met(RangeSums.status(sum, evaluation.writing(), x));
       evaluation.require(sum.conditions());
+      if (sum.value().generators().stream().anyMatch(Accumulation.class::isInstance)) {
+        // written with the upper end x - 1 it is the inverse of the difference from 0 on
+        evaluation.require(List.of(new Condition(Form.of(x), Condition.Relation.NATURAL)));
+      }
       return Sorts.of(sum.value(), scope);
     }
   }

@@ -23,6 +23,7 @@ import gnomon.value.SeriesValue;
 import gnomon.value.Shape;
 import gnomon.value.Status;
 import gnomon.value.Value;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -105,9 +106,38 @@ final class ClauseReader {
     return value;
   }
 
+  /// The value where all but the running variable, on which operators act, are held first, and it
+  /// gets its own value where the conditions that are left allow that.
+  private Optional<Value> runningLast(Expression subject, Clause.At clause, Scope scope) {
+    String running = scope.running().name();
+    List<Clause.Substitution> last =
+        clause.substitutions().stream().filter(s -> s.variable().text().equals(running)).toList();
+    if (last.isEmpty() || last.size() == clause.substitutions().size()) {
+      return Optional.empty();
+    }
+    List<Clause.Substitution> first = new ArrayList<>(clause.substitutions());
+    first.removeAll(last);
+    Clause.At then = new Clause.At(last, clause.span());
+    List<Condition> earlier = evaluation.conditions();
+    Scope inside = substitutions.holding(new Clause.At(first, clause.span()), scope);
+    Value value = evaluator.value(subject, inside);
+    Map<Generator, Form> images = substitutions.images(then, scope);
+    if (Validity.fails(evaluation.conditions(), images) || Validity.isSingular(value, images)) {
+      evaluation.conditions(earlier);
+      return Optional.empty();
+    }
+    Value put = Places.at(clause.span(), () -> applied(value, then, scope));
+    settle(earlier, then, scope);
+    return Optional.of(put);
+  }
+
   /// The expression with the variables held at their values. A name in it may have kept one of
   /// them, and then there is no value.
   private Value anew(Expression subject, Clause.At clause, Scope scope) {
+    Optional<Value> running = runningLast(subject, clause, scope);
+    if (running.isPresent()) {
+      return running.get();
+    }
     Value value = evaluator.value(subject, substitutions.holding(clause, scope));
     Map<Generator, Form> images = substitutions.images(clause, scope);
     boolean kept =

@@ -1,5 +1,7 @@
 package gnomon.evaluate;
 
+import gnomon.algebra.Reason;
+import gnomon.algebra.Refusal;
 import gnomon.basis.MappedOperator;
 import gnomon.basis.ShefferMap;
 import gnomon.diagnostic.Span;
@@ -160,6 +162,9 @@ final class Substitutions {
         && standing.upper().asInteger().isPresent()) {
       BigInteger first = standing.lower().asInteger().get();
       BigInteger last = standing.upper().asInteger().get();
+      if (last.compareTo(first.subtract(BigInteger.ONE)) < 0) {
+        throw new Refusal(Reason.RANGE_REVERSED, Form.of(first), Form.of(last));
+      }
       if (last.subtract(first).compareTo(BigInteger.valueOf(ADDED_UP)) <= 0) {
         return addedUp(standing, first, last);
       }

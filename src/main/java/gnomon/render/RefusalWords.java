@@ -123,6 +123,12 @@ final class RefusalWords {
           Map.entry(
               "NO_INVERSE", domain("this operator has no inverse", "It is {1}.", "(1 - D)^-1")),
           Map.entry(
+              "RANGE_REVERSED",
+              domain(
+                  "a range ends before it begins here",
+                  "It would go from {1} to {2}.",
+                  "Sigma(k: 0..5) k!")),
+          Map.entry(
               "NO_MOMENT",
               domain(
                   "eval takes powers and exponentials in umbrae",
