@@ -183,6 +183,10 @@ final class Claims {
     if (a.equals(b)) {
       return normalForm(Sorts.of(a, scope), Sorts.of(b, scope), Sorts.of(a, scope), scope);
     }
+    Form united = assumptions.simplified(a.unitingConjugates());
+    if (united.equals(assumptions.simplified(b.unitingConjugates()))) {
+      return normalForm(Sorts.of(a, scope), Sorts.of(b, scope), Sorts.of(united, scope), scope);
+    }
     if (OpenConstants.mayAgree(a, b, scope.running())) {
       return new Open(
           "the sides differ by constants left open",

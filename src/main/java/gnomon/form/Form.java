@@ -360,6 +360,12 @@ public final class Form implements Comparable<Form> {
     return IntegerPowers.reduce(this, integers);
   }
 
+  /// The form with powers of conjugate quadratic numbers written by one of the two: ((1 − √5)/2)^n
+  /// by ((1 + √5)/2)^n, where that is exact in principal values.
+  public Form unitingConjugates() {
+    return ConjugateBases.united(this);
+  }
+
   /// A spelling that tells this form from every other one.
   public String key() {
     if (key == null) {
