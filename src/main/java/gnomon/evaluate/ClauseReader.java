@@ -170,9 +170,8 @@ final class ClauseReader {
 
   /// The value of an equation without a formula for its solution, where its variable is a number.
   private Optional<Value> atPoint(LocatedRefusal refused, Expression.Clauses clausal, Scope scope) {
-    Reason reason = refused.refusal().reason();
-    boolean none = reason == Reason.NO_SOLUTION || reason == Reason.SOLUTION_NOT_FOUND;
-    return none && clausal.clauses().getFirst() instanceof Clause.At values
+    return Solving.isWithoutFormula(refused)
+            && clausal.clauses().getFirst() instanceof Clause.At values
         ? Optional.of(evaluator.value(clausal.subject(), substitutions.holding(values, scope)))
         : Optional.empty();
   }

@@ -87,14 +87,19 @@ final class Solving {
   /// The value at an integer where there is no formula, from the given ones.
   private Value stepByStep(
       LocatedRefusal refused, Form point, Expression.Solve solve, Scope scope) {
-    Reason reason = refused.refusal().reason();
-    boolean none = reason == Reason.NO_SOLUTION || reason == Reason.SOLUTION_NOT_FOUND;
-    if (!none || point.asInteger().isEmpty()) {
+    if (!isWithoutFormula(refused) || point.asInteger().isEmpty()) {
       throw refused;
     }
     return Places.at(
         solve.span(),
         () -> Sorts.of(problem(solve, scope).valueAt(point.asInteger().orElseThrow()), scope));
+  }
+
+  /// Whether an equation was refused because there is no formula for its solution, or none was
+  /// found.
+  static boolean isWithoutFormula(LocatedRefusal refused) {
+    Reason reason = refused.refusal().reason();
+    return reason == Reason.NO_SOLUTION || reason == Reason.SOLUTION_NOT_FOUND;
   }
 
   private Problem problem(Expression.Solve solve, Scope scope) {

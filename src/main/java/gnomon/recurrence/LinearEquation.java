@@ -4,8 +4,11 @@ import gnomon.form.Form;
 import gnomon.form.Structure;
 import gnomon.form.Variable;
 import gnomon.polynomial.Polynomial;
+import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
+import java.util.SortedMap;
 
 /// The equation Σ_i coefficients_i(v) A^i y = rightSide(v), where A is the shift E of v by 1 or the
 /// derivative by v.
@@ -65,6 +68,21 @@ public record LinearEquation(
   /// Whether every coefficient is a rational function of the variable.
   public boolean hasRationalCoefficients() {
     return coefficients.stream().allMatch(c -> Structure.isRationalIn(c, variable));
+  }
+
+  /// g(n) − Σ_(i<J) c_i(n) y(n + i) of a recurrence at an integer n, where the values are known.
+  Optional<Form> known(SortedMap<BigInteger, Form> values, BigInteger n) {
+    Form at = Form.of(n);
+    Form rest = rightSide.substitute(variable, at);
+    for (int i = 0; i < order(); i++) {
+      Form c = coefficients.get(i).substitute(variable, at);
+      Form value = values.get(n.add(BigInteger.valueOf(i)));
+      if (!c.isZero() && value == null) {
+        return Optional.empty();
+      }
+      rest = c.isZero() ? rest : rest.minus(c.times(value));
+    }
+    return Optional.of(rest);
   }
 
   /// A^i y.

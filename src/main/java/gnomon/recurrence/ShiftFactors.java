@@ -12,9 +12,10 @@ import java.util.Optional;
 
 /// The irreducible factors of a polynomial in v, each as often as it occurs, and the integer shifts
 /// between factors.
-record ShiftFactors(List<Form> factors) {
+public record ShiftFactors(List<Form> factors) {
 
-  ShiftFactors {
+  /// Copies the factors.
+  public ShiftFactors {
     factors = List.copyOf(factors);
   }
 
@@ -30,7 +31,7 @@ record ShiftFactors(List<Form> factors) {
   }
 
   /// The j with lower(v + j) = const · upper(v), if there is one.
-  static Optional<Integer> shift(Form upper, Form lower, Variable v) {
+  public static Optional<Integer> shift(Form upper, Form lower, Variable v) {
     List<Form> p = Structure.asPolynomial(upper, v).orElseThrow();
     List<Form> q = Structure.asPolynomial(lower, v).orElseThrow();
     int degree = p.size() - 1;
@@ -48,7 +49,8 @@ record ShiftFactors(List<Form> factors) {
     return ratio.dependsOn(v) ? Optional.empty() : Optional.of(j);
   }
 
-  static Form moved(Form form, Variable v, int steps) {
+  /// The form at v + steps.
+  public static Form moved(Form form, Variable v, int steps) {
     return steps == 0 ? form : form.substitute(v, Form.of(v).plus(Form.of(steps)));
   }
 

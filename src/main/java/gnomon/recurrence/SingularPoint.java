@@ -29,7 +29,7 @@ public final class SingularPoint {
     }
     SortedMap<BigInteger, Form> values = new TreeMap<>(given);
     for (BigInteger n = first; n.compareTo(zeros.last()) <= 0; n = n.add(BigInteger.ONE)) {
-      Optional<Form> rest = known(cleared, values, n);
+      Optional<Form> rest = cleared.known(values, n);
       if (rest.isEmpty()) {
         return Optional.empty();
       }
@@ -44,21 +44,5 @@ public final class SingularPoint {
       }
     }
     return Optional.empty();
-  }
-
-  /// g(n) − Σ_{i<J} c_i(n) y(n+i), where the values are known.
-  private static Optional<Form> known(
-      LinearEquation equation, SortedMap<BigInteger, Form> values, BigInteger n) {
-    Form at = Form.of(n);
-    Form rest = equation.rightSide().substitute(equation.variable(), at);
-    for (int i = 0; i < equation.order(); i++) {
-      Form c = equation.coefficients().get(i).substitute(equation.variable(), at);
-      Form value = values.get(n.add(BigInteger.valueOf(i)));
-      if (!c.isZero() && value == null) {
-        return Optional.empty();
-      }
-      rest = c.isZero() ? rest : rest.minus(c.times(value));
-    }
-    return Optional.of(rest);
   }
 }

@@ -5,6 +5,7 @@ import gnomon.algebra.Reason;
 import gnomon.algebra.Refusal;
 import gnomon.form.Form;
 import java.math.BigInteger;
+import java.util.Optional;
 import java.util.SortedMap;
 import java.util.TreeMap;
 
@@ -49,15 +50,11 @@ public final class StepByStep {
   private static void step(
       LinearEquation equation, SortedMap<BigInteger, Form> values, BigInteger n) {
     Form at = Form.of(n);
-    Form rest = equation.rightSide().substitute(equation.variable(), at);
-    for (int i = 0; i < equation.order(); i++) {
-      Form c = equation.coefficients().get(i).substitute(equation.variable(), at);
-      Form value = values.get(n.add(BigInteger.valueOf(i)));
-      if (!c.isZero() && value == null) {
-        return;
-      }
-      rest = c.isZero() ? rest : rest.minus(c.times(value));
+    Optional<Form> found = equation.known(values, n);
+    if (found.isEmpty()) {
+      return;
     }
+    Form rest = found.get();
     Form leading = equation.leading().substitute(equation.variable(), at);
     BigInteger next = n.add(BigInteger.valueOf(equation.order()));
     Form known = values.get(next);

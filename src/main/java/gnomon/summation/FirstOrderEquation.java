@@ -5,6 +5,7 @@ import gnomon.form.Structure;
 import gnomon.form.Univariate;
 import gnomon.form.Variable;
 import gnomon.polynomial.Polynomial;
+import gnomon.recurrence.ShiftFactors;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -33,7 +34,7 @@ record FirstOrderEquation(Form ratio, List<Form> sides) {
     for (Form side : sides) {
       denominator = Form.of(Polynomial.lcm(denominator.numerator(), side.denominator()));
     }
-    Form quotient = denominator.dividedBy(GosperForm.moved(denominator, x, 1));
+    Form quotient = denominator.dividedBy(ShiftFactors.moved(denominator, x, 1));
     Optional<GosperForm> gosper = GosperForm.of(ratio.times(quotient), x);
     if (gosper.isEmpty()) {
       return Optional.empty();

@@ -7,7 +7,7 @@ import gnomon.form.Univariate;
 import gnomon.form.Variable;
 import gnomon.polynomial.Factor;
 import gnomon.polynomial.Factorization;
-import java.math.BigInteger;
+import gnomon.recurrence.ShiftFactors;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
@@ -43,9 +43,11 @@ record GosperForm(Univariate a, Univariate b, Univariate c) {
       }
       Budget.checkpoint();
       Form upper = up.get(i);
-      unit = unit.times(upper.dividedBy(moved(down.get(nearest.index()), k, nearest.shift())));
+      unit =
+          unit.times(
+              upper.dividedBy(ShiftFactors.moved(down.get(nearest.index()), k, nearest.shift())));
       for (int j = 1; j <= nearest.shift(); j++) {
-        common.add(moved(upper, k, -j));
+        common.add(ShiftFactors.moved(upper, k, -j));
       }
       up.set(i, Form.ONE);
       down.set(nearest.index(), Form.ONE);
@@ -60,31 +62,12 @@ record GosperForm(Univariate a, Univariate b, Univariate c) {
   private static Nearest nearest(Form upper, List<Form> down, Variable k) {
     Nearest best = null;
     for (int i = 0; i < down.size(); i++) {
-      Optional<Integer> shift = shift(upper, down.get(i), k);
+      Optional<Integer> shift = ShiftFactors.shift(upper, down.get(i), k);
       if (shift.isPresent() && shift.get() >= 0 && (best == null || shift.get() < best.shift())) {
         best = new Nearest(i, shift.get());
       }
     }
     return best;
-  }
-
-  /// The j with lower(k + j) = const · upper(k), if there is one.
-  static Optional<Integer> shift(Form upper, Form lower, Variable k) {
-    List<Form> p = Structure.asPolynomial(upper, k).orElseThrow();
-    List<Form> q = Structure.asPolynomial(lower, k).orElseThrow();
-    int degree = p.size() - 1;
-    if (degree < 1 || q.size() != p.size()) {
-      return Optional.empty();
-    }
-    Form second = p.get(degree - 1).dividedBy(p.get(degree));
-    Form other = q.get(degree - 1).dividedBy(q.get(degree));
-    Optional<BigInteger> steps = second.minus(other).dividedBy(Form.of(degree)).asInteger();
-    if (steps.isEmpty() || steps.get().bitLength() > 30) {
-      return Optional.empty();
-    }
-    int j = steps.get().intValueExact();
-    Form ratio = moved(lower, k, j).dividedBy(upper);
-    return ratio.dependsOn(k) ? Optional.empty() : Optional.of(j);
   }
 
   /// The factors that depend on k go to the list, once for each multiplicity; the product of the
@@ -102,10 +85,6 @@ record GosperForm(Univariate a, Univariate b, Univariate c) {
     return rest;
   }
 
-  static Form moved(Form form, Variable k, int steps) {
-    return steps == 0 ? form : form.substitute(k, Form.of(k).plus(Form.of(steps)));
-  }
-
   private static Univariate product(List<Form> factors, Variable k) {
     Form product = Form.product(factors);
     return new Univariate(Structure.asPolynomial(product, k).orElseThrow());
@@ -113,7 +92,7 @@ record GosperForm(Univariate a, Univariate b, Univariate c) {
 
   /// b(k − 1).
   Univariate lowered(Variable k) {
-    Form moved = moved(Structure.polynomial(b.coefficients(), k), k, -1);
+    Form moved = ShiftFactors.moved(Structure.polynomial(b.coefficients(), k), k, -1);
     return new Univariate(Structure.asPolynomial(moved, k).orElseThrow());
   }
 }

@@ -9,6 +9,7 @@ import gnomon.polynomial.Factor;
 import gnomon.polynomial.Indeterminate;
 import gnomon.polynomial.Monomial;
 import gnomon.polynomial.Term;
+import gnomon.recurrence.ShiftFactors;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -37,7 +38,7 @@ final class HarmonicDenominators {
         continue;
       }
       if (g instanceof Harmonic) {
-        Form step = GosperForm.moved(Form.of(g), x, 1).minus(Form.of(g));
+        Form step = ShiftFactors.moved(Form.of(g), x, 1).minus(Form.of(g));
         if (!Structure.isRationalIn(step, x)) {
           return false;
         }
@@ -50,7 +51,7 @@ final class HarmonicDenominators {
         return false;
       }
     }
-    Form ratio = GosperForm.moved(term, x, 1).dividedBy(term);
+    Form ratio = ShiftFactors.moved(term, x, 1).dividedBy(term);
     return Structure.isRationalIn(ratio, x)
         && ratio.generators().stream().noneMatch(Generator::isAlgebraic)
         && factorsWithHarmonicNumbers(f, x) == 1

@@ -5,6 +5,7 @@ import gnomon.form.Factored;
 import gnomon.form.Form;
 import gnomon.form.Structure;
 import gnomon.form.Variable;
+import gnomon.recurrence.ShiftFactors;
 import java.util.ArrayList;
 import java.util.Collection;
 import java.util.List;
@@ -40,7 +41,7 @@ record HarmonicSteps(Variable x, Collection<Form> known) {
   private void add(Form c, int highest, List<Step> steps) {
     for (int power = 1; power <= highest; power++) {
       Form sum = Combinatorial.harmonic(Form.of(x).plus(c), power);
-      Form difference = GosperForm.moved(sum, x, 1).minus(sum);
+      Form difference = ShiftFactors.moved(sum, x, 1).minus(sum);
       List<Form> all = new ArrayList<>(known);
       steps.forEach(step -> all.add(step.difference()));
       all.add(difference);

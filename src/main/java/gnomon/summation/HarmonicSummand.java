@@ -12,6 +12,7 @@ import gnomon.number.Rational;
 import gnomon.polynomial.Monomial;
 import gnomon.polynomial.Polynomial;
 import gnomon.polynomial.Term;
+import gnomon.recurrence.ShiftFactors;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -38,7 +39,7 @@ record HarmonicSummand(Map<Generator, Form> steps, List<Part> parts) {
         continue;
       }
       if (g instanceof Harmonic) {
-        Form step = GosperForm.moved(Form.of(g), x, 1).minus(Form.of(g));
+        Form step = ShiftFactors.moved(Form.of(g), x, 1).minus(Form.of(g));
         if (!Structure.isRationalIn(step, x) || f.denominator().contains(g)) {
           return Optional.empty();
         }
@@ -80,7 +81,7 @@ record HarmonicSummand(Map<Generator, Form> steps, List<Part> parts) {
     List<Part> parts = new ArrayList<>();
     for (var group : groups.entrySet()) {
       Form term = Form.of(Polynomial.of(group.getKey(), Rational.ONE));
-      Form ratio = GosperForm.moved(term, x, 1).dividedBy(term);
+      Form ratio = ShiftFactors.moved(term, x, 1).dividedBy(term);
       if (!Structure.isRationalIn(ratio, x)) {
         return Optional.empty();
       }

@@ -4,6 +4,7 @@ import gnomon.algebra.Budget;
 import gnomon.form.Form;
 import gnomon.form.Generator;
 import gnomon.form.Variable;
+import gnomon.recurrence.ShiftFactors;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.LinkedHashMap;
@@ -88,8 +89,8 @@ final class HarmonicTelescoper {
       left = left.plus(telescoper.coefficients().get(i).times(moved.get(i)));
     }
     Form certificate = telescoper.certificate();
-    Form ratio = GosperForm.moved(summand, k, 1).dividedBy(summand);
-    Form next = GosperForm.moved(certificate, k, 1).times(ratio);
+    Form ratio = ShiftFactors.moved(summand, k, 1).dividedBy(summand);
+    Form next = ShiftFactors.moved(certificate, k, 1).times(ratio);
     return left.dividedBy(summand).equals(next.minus(certificate))
         && !telescoper.coefficients().getLast().isZero();
   }

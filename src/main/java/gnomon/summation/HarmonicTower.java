@@ -6,6 +6,7 @@ import gnomon.form.Generator;
 import gnomon.form.Variable;
 import gnomon.number.Rational;
 import gnomon.polynomial.Monomial;
+import gnomon.recurrence.ShiftFactors;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.Comparator;
@@ -159,7 +160,7 @@ final class HarmonicTower {
     HarmonicPolynomial own = HarmonicPolynomial.of(monomial, c);
     HarmonicPolynomial moved =
         HarmonicPolynomial.moved(monomial, steps)
-            .times(level.ratio().times(GosperForm.moved(c, x, 1)));
+            .times(level.ratio().times(ShiftFactors.moved(c, x, 1)));
     HarmonicPolynomial rest = own.minus(moved);
     Form value = own.form().times(level.term());
     List<Form> constants = new ArrayList<>();

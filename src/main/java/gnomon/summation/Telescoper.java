@@ -6,6 +6,7 @@ import gnomon.form.Structure;
 import gnomon.form.Univariate;
 import gnomon.form.Variable;
 import gnomon.polynomial.Polynomial;
+import gnomon.recurrence.ShiftFactors;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -54,7 +55,7 @@ public record Telescoper(List<Form> coefficients, Form certificate) {
   private static Optional<Telescoper> ofOrder(
       HypergeometricTerm term, List<Form> ratios, Variable k) {
     Form denominator = ratios.stream().reduce(Form.ONE, Telescoper::commonMultiple);
-    Form quotient = denominator.dividedBy(GosperForm.moved(denominator, k, 1));
+    Form quotient = denominator.dividedBy(ShiftFactors.moved(denominator, k, 1));
     Optional<GosperForm> gosper = GosperForm.of(term.ratio().times(quotient), k);
     if (gosper.isEmpty()) {
       return Optional.empty();
@@ -105,7 +106,7 @@ public record Telescoper(List<Form> coefficients, Form certificate) {
     for (int i = 0; i < coefficients.size(); i++) {
       left = left.plus(coefficients.get(i).times(ratios.get(i)));
     }
-    Form next = GosperForm.moved(certificate, k, 1).times(ratio);
+    Form next = ShiftFactors.moved(certificate, k, 1).times(ratio);
     return left.equals(next.minus(certificate));
   }
 }
