@@ -42,6 +42,14 @@ public record Kinship(
     return prototype -> signature.flatMap(known -> Recognition.of(known, prototype));
   }
 
+  /// How a sequence may belong to a family of which no more is known than the first members;
+  /// nothing is proved then.
+  public static Function<Prototype, Optional<Kinship>> of(FirstMembers members, Variable x) {
+    Optional<Signature> signature =
+        Signature.of(members.map(x)).map(known -> known.knownTo(members.order()));
+    return prototype -> signature.flatMap(known -> Recognition.of(known, prototype));
+  }
+
   /// Whether both pairs are proved to be equal.
   public boolean isProved() {
     return agreedTo.isEmpty();

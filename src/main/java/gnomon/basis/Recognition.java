@@ -169,16 +169,20 @@ final class Recognition {
         return Optional.empty();
       }
       ShefferMap map = target.map();
-      boolean proved =
-          SeriesIdentity.same(map.f(), deltaSymbol, t)
-                  && SeriesIdentity.same(map.g(), invertible, t)
-              || provedByInverse(map);
+      int order = target.known().orElse(COMPARED);
+      boolean proved = target.known().isEmpty() && isProved(deltaSymbol, invertible, map);
       if (proved) {
         return Optional.of(result(OptionalInt.empty()));
       }
-      return agree(deltaSymbol, invertible, COMPARED)
-          ? Optional.of(result(OptionalInt.of(COMPARED)))
+      return agree(deltaSymbol, invertible, order)
+          ? Optional.of(result(OptionalInt.of(order)))
           : Optional.empty();
+    }
+
+    private boolean isProved(Form deltaSymbol, Form invertible, ShefferMap map) {
+      return SeriesIdentity.same(map.f(), deltaSymbol, t)
+              && SeriesIdentity.same(map.g(), invertible, t)
+          || provedByInverse(map);
     }
 
     private boolean provedByInverse(ShefferMap map) {

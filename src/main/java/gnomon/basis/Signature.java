@@ -10,6 +10,7 @@ import gnomon.series.PowerSeries;
 import java.util.HashMap;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalInt;
 
 /// What the first coefficients of a Sheffer map's pair (g, f) are: f1, f2, … are the derivatives of
 /// f at 0, and l1, l2, … those of ln g.
@@ -17,7 +18,8 @@ import java.util.Optional;
 /// @param map the map
 /// @param values the derivatives by their names
 /// @param start g(0)
-record Signature(ShefferMap map, Map<Generator, Form> values, Form start) {
+/// @param known the order to which f and g are known, where that is not to all orders
+record Signature(ShefferMap map, Map<Generator, Form> values, Form start, OptionalInt known) {
 
   /// The number of derivatives.
   static final int LENGTH = 6;
@@ -40,10 +42,15 @@ record Signature(ShefferMap map, Map<Generator, Form> values, Form start) {
         values.put(new Variable("f" + k), f.coefficient(k).times(factorial));
         values.put(new Variable("l" + k), logarithm.coefficient(k).times(factorial));
       }
-      return Optional.of(new Signature(map, values, start));
+      return Optional.of(new Signature(map, values, start, OptionalInt.empty()));
     } catch (Refusal _) {
       return Optional.empty();
     }
+  }
+
+  /// The same, of a map known to an order only.
+  Signature knownTo(int order) {
+    return new Signature(map, values, start, OptionalInt.of(order));
   }
 
   /// The derivative of f of the order at 0.

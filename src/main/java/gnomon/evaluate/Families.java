@@ -2,6 +2,7 @@ package gnomon.evaluate;
 
 import gnomon.algebra.Budget;
 import gnomon.algebra.Refusal;
+import gnomon.basis.FirstMembers;
 import gnomon.basis.Kinship;
 import gnomon.basis.Prototype;
 import gnomon.basis.ShefferMap;
@@ -10,10 +11,16 @@ import gnomon.form.Dual;
 import gnomon.form.Form;
 import gnomon.form.Variable;
 import gnomon.operator.Operator;
+import gnomon.series.PowerSeries;
+import gnomon.value.Family;
 import gnomon.value.FamilyValue;
 import gnomon.value.FormValue;
+import gnomon.value.ListValue;
 import gnomon.value.MapValue;
+import gnomon.value.SeriesValue;
 import gnomon.value.Value;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Optional;
 import java.util.function.Function;
 
@@ -28,10 +35,15 @@ final class Families {
     this.catalogue = catalogue;
   }
 
+  private static final int LEAST_MEMBERS = 8;
+
   /// A family with the way a sequence belongs to it.
   private record Found(CatalogueEntry entry, Kinship kinship, boolean inverse) {}
 
   Value value(Value subject, Span span, Scope scope) {
+    if (subject instanceof ListValue list) {
+      return ofMembers(list, span, scope);
+    }
     ShefferMap map = map(subject, span, scope);
     Letters letters = new Letters(map);
     Optional<Found> found = find(map);
@@ -46,6 +58,39 @@ final class Families {
         .filter(one -> one.kinship().isProved())
         .ifPresent(one -> portrait.source(one.entry().source()));
     return new FamilyValue(kin, portrait.lines());
+  }
+
+  /// The family with which the members listed agree.
+  private Value ofMembers(ListValue list, Span span, Scope scope) {
+    Variable x = scope.running();
+    List<Form> members =
+        list.items().stream().map(item -> Sorts.form(item, span, "a member")).toList();
+    if (members.size() < LEAST_MEMBERS) {
+      throw Problems.of(
+          "domain-too-few",
+          "a family is recognised by " + LEAST_MEMBERS + " members or more",
+          span);
+    }
+    FirstMembers first =
+        FirstMembers.of(members, x)
+            .orElseThrow(
+                () ->
+                    Problems.of(
+                        "domain-no-sequence",
+                        "these are not the first members of a Sheffer sequence",
+                        span));
+    ShefferMap map = first.map(x);
+    Optional<Found> found = best(Kinship.of(first, x), false);
+    List<FamilyValue.Line> lines = new ArrayList<>();
+    lines.add(line("delta operator", first.f(), x));
+    lines.add(line("invertible operator", first.g(), x));
+    return new FamilyValue(found.map(one -> kin(one, map, new Letters(map))), lines);
+  }
+
+  private static FamilyValue.Line line(String label, PowerSeries series, Variable x) {
+    Family family = new Family.OperatorPowers(Operator.derivative(x));
+    return new FamilyValue.Line(
+        label, new SeriesValue(family, 0, series.coefficients(), series.order() + 1));
   }
 
   // ---------------------------------------------------------------- what is asked
@@ -93,8 +138,11 @@ final class Families {
   }
 
   private Optional<Found> best(ShefferMap map, boolean inverse) {
+    return best(Kinship.of(map), inverse);
+  }
+
+  private Optional<Found> best(Function<Prototype, Optional<Kinship>> kinshipTo, boolean inverse) {
     Optional<Found> best = Optional.empty();
-    Function<Prototype, Optional<Kinship>> kinshipTo = Kinship.of(map);
     for (CatalogueEntry entry : catalogue.entries()) {
       Budget.checkpoint();
       Optional<Kinship> kinship = kinshipTo.apply(entry.prototype(evaluator));

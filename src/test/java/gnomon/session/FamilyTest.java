@@ -25,6 +25,48 @@ final class FamilyTest {
     return lines.getFirst() + " | " + lines.getLast().replaceFirst("@\\d+ ?", "");
   }
 
+  /// The first ten members as the language gives them, then the family asked of the list.
+  @Test
+  void familiesAreRecognisedByTheirFirstMembers() {
+    for (String map :
+        List.of(
+            "umbral(Delta)",
+            "umbral(Nabla)",
+            "umbral(D exp(3 D))",
+            "umbral(ln(1 + D))",
+            "umbral(D/(D - 1))",
+            "sheffer(D, (exp(D) - 1)/D)",
+            "sheffer(D, (exp(D) + 1)/2)",
+            "sheffer(D, exp(D^2/2))")) {
+      lines("drop s");
+      lines("let s = [" + members(map) + "]");
+      String named = lines("family " + map).getFirst().replaceFirst(",? .*", "");
+      List<String> listed = lines("family s");
+      String found = listed.getFirst().replaceFirst("so far like the ", "");
+      assertEquals(named, found.replaceFirst(",? .*", ""), map + ": " + listed);
+    }
+  }
+
+  private String members(String map) {
+    StringBuilder list = new StringBuilder("1");
+    for (int n = 1; n <= 9; n++) {
+      list.append(", (").append(map).append(" x^").append(n).append(")");
+    }
+    return map.startsWith("sheffer")
+        ? list.replace(0, 1, "(" + map + " 1)").toString()
+        : list.toString();
+  }
+
+  @Test
+  void listsThatAreNoSequencesAreRefused() {
+    assertEquals(
+        "error domain-no-sequence: these are not the first members of a Sheffer sequence",
+        lines("family [1, x, x^2, x^3 + 1, x^4, x^5, x^6, x^7]").getFirst());
+    assertEquals(
+        "error domain-too-few: a family is recognised by 8 members or more",
+        lines("family [1, x, x^2]").getFirst());
+  }
+
   @Test
   void everyRowOfTheTableIsKnownByName() {
     int rows = 0;
