@@ -8,6 +8,7 @@ import gnomon.form.Form;
 import gnomon.form.Generator;
 import gnomon.form.Moment;
 import gnomon.form.Variable;
+import gnomon.number.Rational;
 import gnomon.operator.Functional;
 import gnomon.operator.Moments;
 import gnomon.operator.Operator;
@@ -140,11 +141,29 @@ final class Umbrae {
     for (Generator kernel : value.generators()) {
       if (kernel instanceof Moment standing) {
         for (Form exponent : Moments.exponents(standing)) {
-          evaluation.require(List.of(new Condition(exponent, Condition.Relation.NATURAL)));
+          evaluation.require(List.of(new Condition(least(exponent), Condition.Relation.NATURAL)));
+          for (Variable n : exponent.variables()) {
+            evaluation.implies(Assumptions.NONE.withInteger(n));
+          }
         }
       }
     }
     return value;
+  }
+
+  /// What is a natural number when the exponent is, for integers: n for 2 n + 1 and for 2 n.
+  private static Form least(Form exponent) {
+    if (exponent.variables().size() != 1) {
+      return exponent;
+    }
+    Variable n = exponent.variables().first();
+    Form slope = exponent.derivative(n);
+    Form start = exponent.substitute(n, Form.ZERO);
+    Optional<Rational> ratio = start.dividedBy(slope).asRational();
+    boolean rising = slope.asInteger().filter(a -> a.signum() > 0).isPresent();
+    return rising && ratio.isPresent()
+        ? Form.of(n).plus(Form.of(Rational.of(ratio.get().floor())))
+        : exponent;
   }
 
   /// A symbol in which the duals hold still while the functionals act.

@@ -48,10 +48,8 @@ final class UmbralClaims {
     }
     standing.forEach(exponent -> exponents.addAll(exponent.variables()));
     for (Variable n : exponents) {
-      Optional<ExponentialTransform> transform =
-          ExponentialTransform.of(difference, n, evaluation.sums());
-      if (transform.isPresent()) {
-        Optional<VerdictValue> verdict = verdict(left, right, n, standing, transform.get());
+      for (int step = 1; step <= 2; step++) {
+        Optional<VerdictValue> verdict = verdict(new Sides(left, right), n, standing, step);
         if (verdict.isPresent()) {
           return verdict;
         }
@@ -60,15 +58,30 @@ final class UmbralClaims {
     return Optional.empty();
   }
 
+  /// Both sides of the claim.
+  private record Sides(Form left, Form right) {}
+
+  /// With a step of 2 the exponent is n/2 for an even number n: what is left of a generating
+  /// function then is its even or odd part.
+  private Optional<VerdictValue> verdict(Sides sides, Variable n, List<Form> exponents, int step) {
+    Form stepped = Form.of(n).times(Rational.of(1, step));
+    Form difference = sides.left().minus(sides.right()).substitute(n, stepped);
+    List<Form> moved = exponents.stream().map(e -> e.substitute(n, stepped)).toList();
+    return ExponentialTransform.of(difference, n, evaluation.sums())
+        .map(transform -> step == 1 ? transform : transform.half())
+        .flatMap(transform -> verdict(sides, n, moved, transform, step));
+  }
+
   private Optional<VerdictValue> verdict(
-      Form left, Form right, Variable n, List<Form> exponents, ExponentialTransform transform) {
+      Sides sides, Variable n, List<Form> exponents, ExponentialTransform transform, int step) {
     Optional<SortedSet<Integer>> single = single(n, exponents, transform);
     if (single.isEmpty()) {
       return Optional.empty();
     }
-    for (int value : single.get()) {
-      if (assumptions.mayAllow(n, Rational.of(value))) {
-        Optional<VerdictValue> failed = at(left, right, n, value);
+    for (int stepped : single.get()) {
+      int value = Math.floorDiv(stepped, step);
+      if (stepped % step == 0 && assumptions.mayAllow(n, Rational.of(value))) {
+        Optional<VerdictValue> failed = at(sides, n, value);
         if (failed.isPresent()) {
           return failed;
         }
@@ -136,12 +149,12 @@ final class UmbralClaims {
   }
 
   /// What speaks against the claim at one exponent.
-  private Optional<VerdictValue> at(Form left, Form right, Variable n, int value) {
+  private Optional<VerdictValue> at(Sides sides, Variable n, int value) {
     Form a;
     Form b;
     try {
-      a = Substitutions.addedUp(left.substitute(n, Form.of(value)));
-      b = Substitutions.addedUp(right.substitute(n, Form.of(value)));
+      a = Substitutions.addedUp(sides.left().substitute(n, Form.of(value)));
+      b = Substitutions.addedUp(sides.right().substitute(n, Form.of(value)));
     } catch (Refusal undefined) {
       return Optional.empty();
     }

@@ -55,8 +55,34 @@ public record Moment(List<Letter> letters, Form body) implements Generator {
       inside.add(factor.base().power(-factor.multiplicity()));
     }
     inside.removeIf(f -> letters.stream().noneMatch(letter -> f.dependsOn(letter.variable())));
-    Form body = inside.stream().reduce(Form.ONE, Form::times);
-    return body.isOne() ? term : term.dividedBy(body).times(Form.of(new Moment(letters, body)));
+    Form value = term;
+    while (!inside.isEmpty()) {
+      Form body = together(inside, letters);
+      value = value.dividedBy(body).times(Form.of(new Moment(letters, body)));
+    }
+    return value;
+  }
+
+  /// The product of the first factor and of all that have umbrae in common with it or with one
+  /// another, taken out of the list: the values of the others are factors of their own.
+  private static Form together(List<Form> factors, List<Letter> letters) {
+    Form body = factors.removeFirst();
+    boolean grown = true;
+    while (grown) {
+      grown = false;
+      for (int i = 0; i < factors.size() && !grown; i++) {
+        Form factor = factors.get(i);
+        Form known = body;
+        grown =
+            letters.stream()
+                .map(Letter::variable)
+                .anyMatch(v -> known.dependsOn(v) && factor.dependsOn(v));
+        if (grown) {
+          body = body.times(factors.remove(i));
+        }
+      }
+    }
+    return body;
   }
 
   @Override

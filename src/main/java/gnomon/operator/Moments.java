@@ -121,6 +121,12 @@ public final class Moments {
               .orElseThrow(() -> new Refusal(Reason.NO_MOMENT, body));
       exponents.merge(base, Form.of(-divisor.multiplicity()), Form::plus);
     }
+    for (Form exponent : exponents.values()) {
+      boolean natural = exponent.asInteger().filter(e -> e.signum() >= 0).isPresent();
+      if (exponent.isConstant() && !natural) {
+        throw new Refusal(Reason.NO_MOMENT, body);
+      }
+    }
     return List.copyOf(exponents.values());
   }
 

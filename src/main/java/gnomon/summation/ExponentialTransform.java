@@ -10,6 +10,7 @@ import gnomon.form.Generator;
 import gnomon.form.Moment;
 import gnomon.form.Structure;
 import gnomon.form.Variable;
+import gnomon.number.Rational;
 import gnomon.operator.Moments;
 import gnomon.polynomial.Monomial;
 import java.util.ArrayList;
@@ -57,6 +58,13 @@ public record ExponentialTransform(
     return Optional.empty();
   }
 
+  /// The transform of the same sequence with 0 in place of its members with odd number.
+  public ExponentialTransform half() {
+    Form mirrored = series.substitute(z, Form.of(z).negated());
+    Form part = shift % 2 == 0 ? series.plus(mirrored) : series.minus(mirrored);
+    return new ExponentialTransform(part.times(Rational.HALF), z, shift, divisor, conditions);
+  }
+
   private static Variable free(Form sequence) {
     for (int at = 0; at < NAMES.length(); at++) {
       Variable name = new Variable(NAMES.substring(at, at + 1));
@@ -85,10 +93,7 @@ public record ExponentialTransform(
     Optional<ExponentialTransform> transform(Form sequence, int shift) {
       Form divisor = Form.ONE;
       for (Factored.Factor f : Factored.of(Form.of(sequence.denominator())).factors()) {
-        if (f.base().dependsOn(n)) {
-          if (Structure.asPolynomial(f.base(), n).isEmpty()) {
-            return Optional.empty();
-          }
+        if (f.base().dependsOn(n) && Structure.asPolynomial(f.base(), n).isPresent()) {
           divisor = divisor.times(f.base().power(f.multiplicity()));
         }
       }
@@ -106,9 +111,16 @@ public record ExponentialTransform(
     }
 
     private Optional<Form> ofTerm(Form term) {
-      Form constant = Form.of(term.denominator()).inverse();
-      constant = constant.times(term.numerator().leadingTerm().coefficient());
+      Form constant = Form.of(term.numerator().leadingTerm().coefficient());
       Form base = Form.ONE;
+      for (Factored.Factor factor : Factored.of(Form.of(term.denominator())).factors()) {
+        Optional<Power> read = Power.of(factor.base().power(-factor.multiplicity()), n);
+        if (read.isEmpty()) {
+          return Optional.empty();
+        }
+        constant = constant.times(read.get().factor());
+        base = base.times(read.get().base());
+      }
       int degree = 0;
       boolean factorial = false;
       Optional<Generator> inside = Optional.empty();

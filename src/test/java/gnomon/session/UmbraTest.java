@@ -60,6 +60,13 @@ final class UmbraTest {
           eval((T + 1)^n + T^n) = 0; 1
           eval((T + 1 - x)^n) = (-1)^n eval((T + x)^n); 0
           eval((S + 1)^n + (S - 1)^n) = 0; 1
+          eval(B^(2 n + 1)) = 0; 1
+          eval(S^(2 n + 1)) = 0; 0
+          eval(T^(2 n)) = 0; 1
+          eval((B + 1/2)^n) = (2^(1 - n) - 1) eval(B^n); 0
+          eval((B + 1/2)^(2 n)) = (2^(1 - 2 n) - 1) eval(B^(2 n)); 0
+          eval(G^(2 n + 2)) = (2 n + 1) eval(G^(2 n)); 0
+          eval((B + 1)^n A^n) = eval((B + 1)^n) eval(A^n); 0
           2^n eval((T + 1/2)^n) = eval(S^n); 0
           eval(U^(n + 1)) = eval((U + 1)^n); 0
           eval(A^n) = n!; 0
@@ -93,6 +100,10 @@ final class UmbraTest {
           eval((B + 1 - x)^n) = eval((B + x)^n); n = 1
           eval((T + 1)^n + T^n) = 0; n = 0
           eval((S + 1)^n + (S - 1)^n) = 0; n = 0
+          eval(B^(2 n + 1)) = 0; n = 0
+          eval(S^(2 n)) = 0 for n >= 1; n = 1
+          eval(T^(2 n)) = 0; n = 0
+          eval(G^(2 n + 2)) = (2 n + 2) eval(G^(2 n)); n = 0
           eval(U^(n + 1)) = eval((U + 2)^n); n = 1
           eval(U^n) = eval((U + 1)^n); n = 1
           eval(A^n) = (n + 1)!; n = 1
@@ -164,6 +175,7 @@ final class UmbraTest {
     assertTrue(lines("eval(1/B)").contains("domain-no-moment"));
     assertTrue(lines("eval(sin(B)/B)").contains("domain-no-moment"));
     assertTrue(lines("eval((B + x)^n) at x = B").contains("domain-umbra-captured"));
+    assertTrue(lines("eval(B^n) at n = 1/2").contains("domain-no-moment"));
     assertTrue(lines("umbra Z with t").contains("domain-umbra"));
     assertTrue(lines("umbra Z with 1/t").contains("domain-umbra"));
     assertTrue(lines("umbra x with exp(t)").contains("name-taken"));
