@@ -13,11 +13,7 @@ import org.junit.jupiter.params.provider.CsvSource;
 /// Sources: the images of functions under the map of the falling powers as in Roman, The Umbral
 /// Calculus (1984), section 4.1; the pairs of equations are conjugate by its definition.
 final class CarryTest {
-  private final Session session = Session.of(Settings.batch());
-
-  private List<String> lines(String statement) {
-    return ReplyText.lines(session.submit(statement), Spelling.ASCII);
-  }
+  private final Dialogue dialogue = new Dialogue();
 
   /// The carried operator is written down by hand, and the carried function is claimed to solve it.
   @ParameterizedTest
@@ -41,30 +37,31 @@ final class CarryTest {
           carry D^2 f = f by sheffer(D, exp(D)); D^2 - 1; 0
           """)
   void theCarriedFunctionSolvesTheCarriedLaw(String statement, String operator, String right) {
-    List<String> carried = lines(statement);
+    List<String> carried = dialogue.lines(statement);
     assertTrue(carried.getLast().contains("carried to a solution of"), carried.toString());
     String handle = carried.getLast().split(" ")[0];
-    String verdict = lines("claim (" + operator + ") " + handle + " = " + right).getFirst();
+    String verdict =
+        dialogue.lines("claim (" + operator + ") " + handle + " = " + right).getFirst();
     assertTrue(verdict.startsWith("proved"), statement + ": " + carried + " " + verdict);
   }
 
   @Test
   void whereNoSolutionIsCarriedTheLawIs() {
-    List<String> carried = lines("carry D^2 f - x D f + n f = 0 by umbral(Delta)");
+    List<String> carried = dialogue.lines("carry D^2 f - x D f + n f = 0 by umbral(Delta)");
     assertTrue(carried.getLast().contains("without a solution"), carried.toString());
-    assertTrue(lines("claim @1 = Delta^2 - X Nabla + n").getFirst().startsWith("proved"));
-    lines("carry D^2 f + f = 0 by umbral(D E)");
-    assertTrue(lines("claim @3 = D^2 E^2 + 1").getFirst().startsWith("proved"));
+    assertTrue(dialogue.lines("claim @1 = Delta^2 - X Nabla + n").getFirst().startsWith("proved"));
+    dialogue.lines("carry D^2 f + f = 0 by umbral(D E)");
+    assertTrue(dialogue.lines("claim @3 = D^2 E^2 + 1").getFirst().startsWith("proved"));
   }
 
   @Test
   void whatIsNoMapCarriesNothing() {
     for (String map : List.of("3", "D", "Delta", "x", "eps(0)")) {
-      String answer = lines("carry D f = f by " + map).getFirst();
+      String answer = dialogue.lines("carry D f = f by " + map).getFirst();
       assertTrue(answer.startsWith("error"), map + ": " + answer);
     }
     assertEquals(
         "error kind-carry: the map does not act on n, as the equation does",
-        lines("carry g(n + 1) = 2 g(n) by umbral(Delta)^-1").getFirst());
+        dialogue.lines("carry g(n + 1) = 2 g(n) by umbral(Delta)^-1").getFirst());
   }
 }

@@ -10,15 +10,7 @@ import org.junit.jupiter.params.provider.ValueSource;
 ///
 /// Source: common practice of the calculus.
 final class ClaimsTest {
-  private final Session session = Session.of(Settings.batch());
-
-  private String verdict(String claim) {
-    session.submit("arbitrary f, g");
-    Reply reply = session.submit("claim " + claim);
-    return reply instanceof Reply.Answer answer
-        ? answer.status()
-        : ReplyText.lines(reply, Spelling.ASCII).toString();
-  }
+  private final Dialogue dialogue = new Dialogue().say("arbitrary f, g");
 
   @ParameterizedTest
   @ValueSource(
@@ -51,7 +43,7 @@ final class ClaimsTest {
         "eps(3) Sigma = eps(2) + eps(1) + eps(0)"
       })
   void trueIdentitiesAreProved(String claim) {
-    assertEquals("proved", verdict(claim), claim);
+    assertEquals("proved", dialogue.verdict(claim), claim);
   }
 
   @ParameterizedTest
@@ -79,14 +71,14 @@ final class ClaimsTest {
         "(matrix Delta to 2) = [[0, 1, 1], [0, 0, 3], [0, 0, 0]]"
       })
   void falseOnesAreRefutedWithAWitness(String claim) {
-    assertEquals("refuted", verdict(claim), claim);
+    assertEquals("refuted", dialogue.verdict(claim), claim);
   }
 
   @ParameterizedTest
   @ValueSource(strings = {"Delta^-1 Delta = 1", "sqrt(x^2) = x"})
   void whatIsNotDecidedIsNotShownAsProved(String claim) {
-    session.submit("given x > 0");
-    assertEquals("open", verdict(claim), claim);
+    dialogue.say("given x > 0");
+    assertEquals("open", dialogue.verdict(claim), claim);
   }
 
   @ParameterizedTest
@@ -98,8 +90,7 @@ final class ClaimsTest {
         "ln(Delta) = D | error domain-no-series: there is no power series at 0"
       })
   void claimsWithoutMeaningAreErrors(String claim, String error) {
-    Reply reply = session.submit("claim " + claim);
-    assertEquals(error, ReplyText.lines(reply, Spelling.ASCII).getFirst());
+    assertEquals(error, dialogue.first("claim " + claim));
   }
 
   @ParameterizedTest
@@ -109,10 +100,9 @@ final class ClaimsTest {
         "claim umbral(Delta) x^n = x|_n for n: 0..6"
       })
   void claimsOverARangeSayWhatWasChecked(String claim) {
-    Reply.Answer answer = (Reply.Answer) session.submit(claim);
-    assertEquals("proved", answer.status());
-    assertEquals(
-        true, answer.shown().lines(Spelling.ASCII).getFirst().contains("by checking each point"));
+    String answer = dialogue.first(claim);
+    assertEquals(true, answer.startsWith("proved"), answer);
+    assertEquals(true, answer.contains("by checking each point"), answer);
   }
 
   /// Both sides are equal, but ln(1 + √2) + ln(√2 − 1) is not seen to be 0 by the normal form.
@@ -124,7 +114,7 @@ final class ClaimsTest {
         "(ln(1+sqrt(2)) + ln(sqrt(2)-1)) x + O(x^3) = O(x^3)",
       })
   void aTrueClaimIsNotRefutedBecauseItsSidesLookDifferent(String claim) {
-    assertEquals("open", verdict(claim));
+    assertEquals("open", dialogue.verdict(claim));
   }
 
   @ParameterizedTest
@@ -137,6 +127,6 @@ final class ClaimsTest {
         "E^a = E",
       })
   void operatorsAndSeriesThatCertainlyDifferAreRefuted(String claim) {
-    assertEquals("refuted", verdict(claim));
+    assertEquals("refuted", dialogue.verdict(claim));
   }
 }

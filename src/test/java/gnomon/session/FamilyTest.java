@@ -14,14 +14,10 @@ import org.junit.jupiter.params.provider.CsvSource;
 /// Source: references/sheffer.tsv (Roman 1984; DLMF ch. 18, 24) for the rows by name; the scaled
 /// ones are common practice.
 final class FamilyTest {
-  private final Session session = Session.of(Settings.batch());
-
-  private List<String> lines(String statement) {
-    return ReplyText.lines(session.submit(statement), Spelling.ASCII);
-  }
+  private final Dialogue dialogue = new Dialogue();
 
   private String title(String subject) {
-    List<String> lines = lines("family " + subject);
+    List<String> lines = dialogue.lines("family " + subject);
     return lines.getFirst() + " | " + lines.getLast().replaceFirst("@\\d+ ?", "");
   }
 
@@ -38,10 +34,10 @@ final class FamilyTest {
             "sheffer(D, (exp(D) - 1)/D)",
             "sheffer(D, (exp(D) + 1)/2)",
             "sheffer(D, exp(D^2/2))")) {
-      lines("drop s");
-      lines("let s = [" + members(map) + "]");
-      String named = lines("family " + map).getFirst().replaceFirst(",? .*", "");
-      List<String> listed = lines("family s");
+      dialogue.lines("drop s");
+      dialogue.lines("let s = [" + members(map) + "]");
+      String named = dialogue.lines("family " + map).getFirst().replaceFirst(",? .*", "");
+      List<String> listed = dialogue.lines("family s");
       String found = listed.getFirst().replaceFirst("so far like the ", "");
       assertEquals(named, found.replaceFirst(",? .*", ""), map + ": " + listed);
     }
@@ -61,10 +57,10 @@ final class FamilyTest {
   void listsThatAreNoSequencesAreRefused() {
     assertEquals(
         "error domain-no-sequence: these are not the first members of a Sheffer sequence",
-        lines("family [1, x, x^2, x^3 + 1, x^4, x^5, x^6, x^7]").getFirst());
+        dialogue.lines("family [1, x, x^2, x^3 + 1, x^4, x^5, x^6, x^7]").getFirst());
     assertEquals(
         "error domain-too-few: a family is recognised by 8 members or more",
-        lines("family [1, x, x^2]").getFirst());
+        dialogue.lines("family [1, x, x^2]").getFirst());
   }
 
   @Test
@@ -143,7 +139,7 @@ final class FamilyTest {
         "0 D& error domain-not-a-delta-operator",
       })
   void whatHasNoSequenceIsRefused(String subject, String code) {
-    String first = lines("family " + subject).getFirst();
+    String first = dialogue.lines("family " + subject).getFirst();
     assertEquals(code, first.substring(0, Math.max(0, first.indexOf(':'))), first);
   }
 
@@ -160,6 +156,6 @@ final class FamilyTest {
             "  inverse map: Laguerre polynomials, n! L_n^(2)(x)",
             "  source: DLMF (18.12.13), (18.5.12); Roman 1984, section 4.3",
             "@1 proved"),
-        lines("family sheffer(D/(D - 1), (1 - D)^(-3))"));
+        dialogue.lines("family sheffer(D/(D - 1), (1 - D)^(-3))"));
   }
 }

@@ -9,19 +9,12 @@ import org.junit.jupiter.params.provider.ValueSource;
 /// them (Graham, Knuth and Patashnik, Concrete Mathematics, 6.6; Vajda 1989; from memory), and the
 /// same with a sign or an index wrong.
 final class FibonacciTest {
-  private final Session session = Session.of(Settings.batch());
+  private final Dialogue dialogue = new Dialogue();
 
   FibonacciTest() {
-    session.submit("let F(n) = solve f(n+2) = f(n+1) + f(n) with f(0) = 0, f(1) = 1");
-    session.submit("let L(n) = solve f(n+2) = f(n+1) + f(n) with f(0) = 2, f(1) = 1");
-    session.submit("given n integer, m integer");
-  }
-
-  private String verdict(String claim) {
-    Reply reply = session.submit("claim " + claim);
-    return reply instanceof Reply.Answer answer
-        ? answer.status()
-        : ReplyText.lines(reply, Spelling.ASCII).toString();
+    dialogue.say("let F(n) = solve f(n+2) = f(n+1) + f(n) with f(0) = 0, f(1) = 1");
+    dialogue.say("let L(n) = solve f(n+2) = f(n+1) + f(n) with f(0) = 2, f(1) = 1");
+    dialogue.say("given n integer, m integer");
   }
 
   @ParameterizedTest
@@ -39,7 +32,7 @@ final class FibonacciTest {
         "(1 - sqrt(2))^x (1 + sqrt(2))^x = (-1)^x"
       })
   void identitiesAreProved(String claim) {
-    assertEquals("proved", verdict(claim), claim);
+    assertEquals("proved", dialogue.verdict(claim), claim);
   }
 
   @ParameterizedTest
@@ -54,6 +47,6 @@ final class FibonacciTest {
         "(-3 - sqrt(2))^x (-3 + sqrt(2))^x = 7^x"
       })
   void wrongVariantsAreRefuted(String claim) {
-    assertEquals("refuted", verdict(claim), claim);
+    assertEquals("refuted", dialogue.verdict(claim), claim);
   }
 }

@@ -11,11 +11,7 @@ import org.junit.jupiter.params.provider.ValueSource;
 /// Infinite sums: their values against long partial sums and against published values, and refusals
 /// where they diverge or are not known.
 final class InfiniteSumsTest {
-  private final Session session = Session.of(Settings.batch());
-
-  private String text(String statement) {
-    return String.join("\n", ReplyText.lines(session.submit(statement), Spelling.ASCII));
-  }
+  private final Dialogue dialogue = new Dialogue();
 
   /// The sum to 15 digits, and its first 240 terms to 15 digits, which do not use the theorem.
   @ParameterizedTest
@@ -41,8 +37,10 @@ final class InfiniteSumsTest {
         "binom(7,k) 2^k",
       })
   void valuesAgreeWithLongPartialSums(String term) {
-    String whole = text("Sigma(k: 0..inf) " + term + " to 15 digits").lines().findFirst().get();
-    String partial = text("Sigma(k: 0..240) " + term + " to 15 digits").lines().findFirst().get();
+    String whole =
+        dialogue.text("Sigma(k: 0..inf) " + term + " to 15 digits").lines().findFirst().get();
+    String partial =
+        dialogue.text("Sigma(k: 0..240) " + term + " to 15 digits").lines().findFirst().get();
     assertTrue(whole.matches("-?[0-9.]+"), whole);
     assertEquals(0, new BigDecimal(partial).compareTo(new BigDecimal(whole)), term);
   }
@@ -71,7 +69,8 @@ final class InfiniteSumsTest {
         "1/((k+a)(k+b)) = (H(a) - H(b))/(a - b)",
       })
   void seriesHaveTheirPublishedValues(String term, String value) {
-    assertTrue(text("claim Sigma(k: 1..inf) " + term + " = " + value).startsWith("proved"), term);
+    assertTrue(
+        dialogue.text("claim Sigma(k: 1..inf) " + term + " = " + value).startsWith("proved"), term);
   }
 
   /// Source: NIST Digital Library of Mathematical Functions 15.4.20, 15.4.26, 16.4.4, from memory.
@@ -88,8 +87,9 @@ final class InfiniteSumsTest {
             + " (1/4)! (-1/5)! (1/4)! (3/10)!/((1/2)! (1/20)! 0! (1/20)!)",
       })
   void hypergeometricSeriesHaveTheirPublishedValues(String term, String value) {
-    String sum = text("Sigma(k: 0..inf) " + term + " to 12 digits").lines().findFirst().get();
-    String published = text("(" + value + ") to 12 digits").lines().findFirst().get();
+    String sum =
+        dialogue.text("Sigma(k: 0..inf) " + term + " to 12 digits").lines().findFirst().get();
+    String published = dialogue.text("(" + value + ") to 12 digits").lines().findFirst().get();
     assertTrue(sum.matches("-?[0-9.]+"), sum);
     assertEquals(published, sum, term);
   }
@@ -105,7 +105,7 @@ final class InfiniteSumsTest {
         "rising(a,k) rising(b,k)/(rising(c,k) k!); -a - b + c > 0",
       })
   void convergenceThatDependsOnParametersIsStated(String term, String condition) {
-    String answer = text("Sigma(k: 0..inf) " + term);
+    String answer = dialogue.text("Sigma(k: 0..inf) " + term);
     assertTrue(answer.contains("closed form for ") && answer.contains(condition), answer);
   }
 
@@ -129,7 +129,7 @@ final class InfiniteSumsTest {
         "binom(n,k) 2^k; domain-infinite-sum-undecided",
       })
   void divergenceAndIgnoranceAreToldApart(String term, String told) {
-    String answer = text("Sigma(k: 1..inf) " + term);
+    String answer = dialogue.text("Sigma(k: 1..inf) " + term);
     assertTrue(answer.contains(told), answer);
   }
 }

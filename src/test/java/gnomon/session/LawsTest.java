@@ -10,16 +10,7 @@ import org.junit.jupiter.params.provider.CsvSource;
 
 /// `recurrence` and `coefficient` as a user meets them.
 final class LawsTest {
-  private final Session session = Session.of(Settings.batch());
-
-  private List<String> said(String statement) {
-    return ReplyText.lines(session.submit(statement), Spelling.ASCII);
-  }
-
-  private void proves(String claim) {
-    List<String> lines = said("claim " + claim);
-    assertTrue(lines.getFirst().startsWith("proved"), () -> claim + " -> " + lines);
-  }
+  private final Dialogue dialogue = new Dialogue();
 
   /// Numbers and laws from memory, the law checked against the definition of each sequence.
   @ParameterizedTest
@@ -34,27 +25,31 @@ final class LawsTest {
           [1, 1/2, 1/3, 1/4, 1/5, 1/6]               | (X + 2) E - (X + 1)
           """)
   void lawsAreGuessedFromNumbers(String numbers, String law) {
-    List<String> lines = said("let r = recurrence " + numbers);
+    List<String> lines = dialogue.lines("let r = recurrence " + numbers);
     assertTrue(lines.getLast().contains("guessed from"), lines.toString());
-    proves("r = " + law);
+    dialogue.proves("r = " + law);
   }
 
   @Test
   void fewNumbersAndNumbersWithoutALawAreRefused() {
-    assertTrue(said("recurrence [1, 2, 4]").getFirst().startsWith("error domain-no-law"));
+    assertTrue(dialogue.lines("recurrence [1, 2, 4]").getFirst().startsWith("error domain-no-law"));
     assertTrue(
-        said("recurrence [1, 1, 2, 5, 14, 43]").getFirst().startsWith("error domain-no-law"));
-    assertTrue(
-        said("recurrence [2, 3, 5, 7, 11, 13, 17, 19, 23, 29]")
+        dialogue
+            .lines("recurrence [1, 1, 2, 5, 14, 43]")
             .getFirst()
             .startsWith("error domain-no-law"));
-    assertTrue(said("recurrence [1, x, x^2]").getFirst().startsWith("error kind-law"));
+    assertTrue(
+        dialogue
+            .lines("recurrence [2, 3, 5, 7, 11, 13, 17, 19, 23, 29]")
+            .getFirst()
+            .startsWith("error domain-no-law"));
+    assertTrue(dialogue.lines("recurrence [1, x, x^2]").getFirst().startsWith("error kind-law"));
   }
 
   @Test
   void tablesBringTheirArguments() {
-    said("let r = recurrence (1/n for n: 1..8)");
-    proves("r = (X + 1) E - X");
+    dialogue.lines("let r = recurrence (1/n for n: 1..8)");
+    dialogue.proves("r = (X + 1) E - X");
   }
 
   @ParameterizedTest
@@ -71,9 +66,9 @@ final class LawsTest {
           1/sqrt(1 - 2x - 3x^2)     | (X + 2) E^2 - (2 X + 3) E - (3 X + 3)
           """)
   void lawsOfCoefficientsAreProved(String function, String law) {
-    List<String> lines = said("let r = recurrence " + function);
+    List<String> lines = dialogue.lines("let r = recurrence " + function);
     assertTrue(lines.getLast().contains("recurrence of"), lines.toString());
-    proves("r = " + law);
+    dialogue.proves("r = " + law);
   }
 
   @ParameterizedTest
@@ -90,23 +85,23 @@ final class LawsTest {
           -ln(1 - x)/(1 - x)         | H(n)
           """)
   void coefficientsHaveClosedForms(String function, String closed) {
-    proves("coefficient(" + function + ", n) = " + closed);
+    dialogue.proves("coefficient(" + function + ", n) = " + closed);
   }
 
   @Test
   void closedFormsOfCoefficientsHaveTheirRange() {
-    List<String> lines = said("let c = coefficient(x/(1 - x)^2 + x^5, n)");
+    List<String> lines = dialogue.lines("let c = coefficient(x/(1 - x)^2 + x^5, n)");
     assertEquals("@1 closed form for n >= 6", lines.getLast());
-    assertEquals("6", said("c at n = 5").getFirst());
-    assertEquals("7", said("c at n = 7").getFirst());
+    assertEquals("6", dialogue.lines("c at n = 5").getFirst());
+    assertEquals("7", dialogue.lines("c at n = 7").getFirst());
   }
 
   @Test
   void functionsWithoutADifferentialEquationAreRefused() {
     for (String function : List.of("exp(exp(x))", "x/(exp(x) - 1)", "1/cos(x)")) {
-      String first = said("recurrence " + function).getFirst();
+      String first = dialogue.lines("recurrence " + function).getFirst();
       assertTrue(first.startsWith("error domain-no-differential-equation"), first);
     }
-    assertTrue(said("recurrence 1/x").getFirst().startsWith("error domain-no-series"));
+    assertTrue(dialogue.lines("recurrence 1/x").getFirst().startsWith("error domain-no-series"));
   }
 }

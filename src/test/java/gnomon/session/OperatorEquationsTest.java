@@ -14,11 +14,7 @@ import org.junit.jupiter.params.provider.ValueSource;
 /// Source: Lagrange's inversion, Comtet, Advanced Combinatorics (1974), section 3.8, from memory;
 /// the Catalan numbers of DLMF Table 26.5.1.
 final class OperatorEquationsTest {
-  private final Session session = Session.of(Settings.batch());
-
-  private String first(String statement) {
-    return ReplyText.lines(session.submit(statement), Spelling.ASCII).getFirst();
-  }
+  private final Dialogue dialogue = new Dialogue();
 
   @ParameterizedTest
   @CsvSource(
@@ -31,8 +27,8 @@ final class OperatorEquationsTest {
         "D + D^2 W & D + D^3 + D^5 + O(D^6)",
       })
   void equationsHaveTheirSeries(String right, String series) {
-    first("let S = solve W = " + right);
-    assertEquals(series.strip(), first("S to 5"));
+    dialogue.first("let S = solve W = " + right);
+    assertEquals(series.strip(), dialogue.first("S to 5"));
   }
 
   @ParameterizedTest
@@ -49,30 +45,31 @@ final class OperatorEquationsTest {
         "D + D^2 W^5 + D exp(W)",
       })
   void theDefiningEquationIsProved(String right) {
-    first("let S = solve W = " + right);
+    dialogue.first("let S = solve W = " + right);
     String claim = "claim S = " + right.replace("W", "S");
-    assertTrue(first(claim).startsWith("proved"), first(claim));
-    String wrong = first(claim + " + D^15");
+    assertTrue(dialogue.first(claim).startsWith("proved"), dialogue.first(claim));
+    String wrong = dialogue.first(claim + " + D^15");
     assertTrue(wrong.startsWith("refuted: on x^15"), wrong);
   }
 
   @Test
   void whatIsDefinedByAnEquationIsUsedLikeAnyOperator() {
-    first("let W = solve W = D exp(W)");
-    assertEquals("3 x^2 + 6 x + 9", first("W(x^3)"));
-    assertEquals("[[1, 0,  0,  0],", first("matrix umbral(W) to 3"));
-    assertTrue(first("claim umbral(W) umbral(D exp(-D)) = 1").startsWith("proved"));
-    assertTrue(first("claim umbral(W) D umbral(W)^-1 = W").startsWith("proved"));
-    assertTrue(first("claim W' = exp(W)/(1 - W)").startsWith("proved"));
-    assertTrue(first("claim ln(W/D) = W").startsWith("proved"));
-    assertTrue(first("family W").startsWith("the inverse of the map of the Abel polynomials"));
+    dialogue.first("let W = solve W = D exp(W)");
+    assertEquals("3 x^2 + 6 x + 9", dialogue.first("W(x^3)"));
+    assertEquals("[[1, 0,  0,  0],", dialogue.first("matrix umbral(W) to 3"));
+    assertTrue(dialogue.first("claim umbral(W) umbral(D exp(-D)) = 1").startsWith("proved"));
+    assertTrue(dialogue.first("claim umbral(W) D umbral(W)^-1 = W").startsWith("proved"));
+    assertTrue(dialogue.first("claim W' = exp(W)/(1 - W)").startsWith("proved"));
+    assertTrue(dialogue.first("claim ln(W/D) = W").startsWith("proved"));
+    assertTrue(
+        dialogue.first("family W").startsWith("the inverse of the map of the Abel polynomials"));
   }
 
   @Test
   void twoWaysToOneOperatorAreProvedEqual() {
-    first("let V = umbral(D exp(-a D))^-1 D umbral(D exp(-a D))");
-    assertTrue(first("claim V = (solve W = D exp(a W))").startsWith("proved"));
-    assertTrue(first("claim V = (solve W = D exp(2 a W))").startsWith("refuted"));
+    dialogue.first("let V = umbral(D exp(-a D))^-1 D umbral(D exp(-a D))");
+    assertTrue(dialogue.first("claim V = (solve W = D exp(a W))").startsWith("proved"));
+    assertTrue(dialogue.first("claim V = (solve W = D exp(2 a W))").startsWith("refuted"));
   }
 
   @ParameterizedTest
@@ -90,14 +87,14 @@ final class OperatorEquationsTest {
         "umbral(Delta) W & kind-not-an-operator",
       })
   void whatDefinesNoDeltaOperatorIsRefused(String right, String code) {
-    String said = first("solve W = " + right);
+    String said = dialogue.first("solve W = " + right);
     assertTrue(said.startsWith("error " + code.strip() + ":"), said);
   }
 
   @Test
   void functionsAreSolvedForAsBefore() {
-    assertEquals("C1 e^x", first("solve f = D f"));
-    session.submit("arbitrary F");
-    assertEquals("C1 e^x", first("solve F = D F"));
+    assertEquals("C1 e^x", dialogue.first("solve f = D f"));
+    dialogue.say("arbitrary F");
+    assertEquals("C1 e^x", dialogue.first("solve F = D F"));
   }
 }

@@ -29,21 +29,10 @@ final class UmbraTest {
           "umbra K with exp(a (exp(t) - 1))", // moments of the Poisson law
           "umbra P with exp(t)"); // the number 1
 
-  private final Session session = Session.of(Settings.batch());
+  private final Dialogue dialogue = new Dialogue();
 
   UmbraTest() {
-    LETTERS.forEach(this::lines);
-  }
-
-  private String lines(String statement) {
-    return String.join("\n", ReplyText.lines(session.submit(statement), Spelling.ASCII));
-  }
-
-  private String verdict(String claim) {
-    Reply reply = session.submit("claim " + claim);
-    return reply instanceof Reply.Answer answer
-        ? answer.status()
-        : ReplyText.lines(reply, Spelling.ASCII).toString();
+    LETTERS.forEach(dialogue::say);
   }
 
   @ParameterizedTest
@@ -84,8 +73,8 @@ final class UmbraTest {
           eval(B (B + x)^n) = eval((B + x)^(n + 1)) - x eval((B + x)^n); 0
           """)
   void identitiesHoldForSymbolicAndForNumericExponents(String claim, int from) {
-    assertEquals("proved", verdict(claim + " for n >= " + from), claim);
-    assertEquals("proved", verdict(claim + " for n: " + from + "..30"), claim);
+    assertEquals("proved", dialogue.verdict(claim + " for n >= " + from), claim);
+    assertEquals("proved", dialogue.verdict(claim + " for n: " + from + "..30"), claim);
   }
 
   /// The first exponent at which the claim fails is the witness.
@@ -113,7 +102,7 @@ final class UmbraTest {
           Sigma(k: 0..m - 1) k^n = eval((B + m)^(n + 1) + B^(n + 1))/(n + 1); n = 0
           """)
   void wrongVariantsAreRefuted(String claim, String witness) {
-    String answer = lines("claim " + claim);
+    String answer = dialogue.text("claim " + claim);
     assertTrue(answer.contains("refuted: at") && answer.contains(witness), claim + "\n" + answer);
   }
 
@@ -135,18 +124,18 @@ final class UmbraTest {
           eval(eps(B + 1) Delta) x^4; 4
           """)
   void valuesAreThoseOfTheLiterature(String expression, String value) {
-    assertEquals(value, lines(expression).lines().findFirst().orElseThrow(), expression);
+    assertEquals(value, dialogue.text(expression).lines().findFirst().orElseThrow(), expression);
   }
 
   @Test
   void generatingFunctionsArePutTogether() {
-    lines("umbra N with eval(exp(t B))^3");
-    assertEquals("2", lines("eval(N^2)").lines().findFirst().orElseThrow());
-    lines("umbra V with eval(exp(K ln(eval(exp(t P)))))");
-    assertEquals("proved", verdict("eval(V^n) = eval(K^n)"));
-    lines("umbra M with eval(exp(t B))^-1");
-    assertEquals("proved", verdict("eval((M + B + x)^n) = x^n"));
-    assertNotEquals("proved", verdict("eval((M + B2 + x)^n) = (x + 1)^n"));
+    dialogue.text("umbra N with eval(exp(t B))^3");
+    assertEquals("2", dialogue.text("eval(N^2)").lines().findFirst().orElseThrow());
+    dialogue.text("umbra V with eval(exp(K ln(eval(exp(t P)))))");
+    assertEquals("proved", dialogue.verdict("eval(V^n) = eval(K^n)"));
+    dialogue.text("umbra M with eval(exp(t B))^-1");
+    assertEquals("proved", dialogue.verdict("eval((M + B + x)^n) = x^n"));
+    assertNotEquals("proved", dialogue.verdict("eval((M + B2 + x)^n) = (x + 1)^n"));
   }
 
   /// Sums of moments with random shifts and factors: the claim that two are equal is decided as the
@@ -157,8 +146,8 @@ final class UmbraTest {
     RandomGenerator random = RandomGeneratorFactory.of("L64X128MixRandom").create(seed);
     for (int i = 0; i < 12; i++) {
       String claim = side(random) + " = " + side(random);
-      String symbolic = verdict(claim + " for n >= 2");
-      String numeric = verdict(claim + " for n: 2..12");
+      String symbolic = dialogue.verdict(claim + " for n >= 2");
+      String numeric = dialogue.verdict(claim + " for n: 2..12");
       assertEquals(numeric, symbolic, "seed " + seed + ": " + claim);
     }
   }
@@ -172,14 +161,14 @@ final class UmbraTest {
 
   @Test
   void whatEvalCannotTakeIsRefused() {
-    assertTrue(lines("eval(1/B)").contains("domain-no-moment"));
-    assertTrue(lines("eval(sin(B)/B)").contains("domain-no-moment"));
-    assertTrue(lines("eval((B + x)^n) at x = B").contains("domain-umbra-captured"));
-    assertTrue(lines("eval(B^n) at n = 1/2").contains("domain-no-moment"));
-    assertTrue(lines("umbra Z with t").contains("domain-umbra"));
-    assertTrue(lines("umbra Z with 1/t").contains("domain-umbra"));
-    assertTrue(lines("umbra x with exp(t)").contains("name-taken"));
-    lines("drop " + String.join(", ", "A", "B", "B2", "G", "K", "P", "S", "T", "U"));
-    assertTrue(lines("eval(B)").contains("name-no-umbra"));
+    assertTrue(dialogue.text("eval(1/B)").contains("domain-no-moment"));
+    assertTrue(dialogue.text("eval(sin(B)/B)").contains("domain-no-moment"));
+    assertTrue(dialogue.text("eval((B + x)^n) at x = B").contains("domain-umbra-captured"));
+    assertTrue(dialogue.text("eval(B^n) at n = 1/2").contains("domain-no-moment"));
+    assertTrue(dialogue.text("umbra Z with t").contains("domain-umbra"));
+    assertTrue(dialogue.text("umbra Z with 1/t").contains("domain-umbra"));
+    assertTrue(dialogue.text("umbra x with exp(t)").contains("name-taken"));
+    dialogue.text("drop " + String.join(", ", "A", "B", "B2", "G", "K", "P", "S", "T", "U"));
+    assertTrue(dialogue.text("eval(B)").contains("name-no-umbra"));
   }
 }
