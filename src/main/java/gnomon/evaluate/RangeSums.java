@@ -5,7 +5,9 @@ import gnomon.diagnostic.DiagnosedException;
 import gnomon.diagnostic.Diagnostic;
 import gnomon.diagnostic.Span;
 import gnomon.evaluate.Binders.Limits;
+import gnomon.form.Factorial;
 import gnomon.form.Form;
+import gnomon.form.Generator;
 import gnomon.form.Structure;
 import gnomon.form.Variable;
 import gnomon.number.Rational;
@@ -189,11 +191,38 @@ final class RangeSums {
     }
     evaluation.met(status(sum, evaluation.writing(), scope.running()));
     evaluation.require(sum.conditions());
+    requireFactorials(body, limits);
     notEmpty(limits).ifPresent(taken -> evaluation.require(List.of(taken)));
     sum.antidifference().ifPresent(found -> record(found, body, sum.value(), limits));
     sum.theorems().forEach(theorem -> Theorems.cite(theorem, evaluation.grounds()));
     sum.recurrence().ifPresent(found -> new RecurrenceSteps(evaluation, k).record(found));
     return Sorts.of(sum.value(), scope);
+  }
+
+  /// Where a range begins below 0, factorials in the terms must not be those of negative integers
+  /// there: binom(n + k, k) is 0 at k = −2, but its form (n + k)!/(n! k!) is 1 there for n = 0. For
+  /// such n the terms are formed anew.
+  private void requireFactorials(Form body, Limits limits) {
+    if (limits.lower().asInteger().filter(a -> a.signum() < 0).isEmpty()) {
+      return;
+    }
+    for (Generator g : body.generators()) {
+      if (g instanceof Factorial factorial
+          && body.numerator().contains(g)
+          && factorial.argument().dependsOn(limits.variable())) {
+        Form least = factorial.argument().substitute(limits.variable(), limits.lower());
+        boolean plain =
+            least.variables().size() == 1
+                && least.minus(Form.of(least.variables().first())).asInteger().isPresent();
+        if (!least.isConstant()) {
+          evaluation.require(
+              List.of(
+                  new Condition(
+                      least,
+                      plain ? Condition.Relation.NATURAL : Condition.Relation.FINITE_FACTORIAL)));
+        }
+      }
+    }
   }
 
   /// What is taken for granted of a symbolic range: that it is at the shortest empty.

@@ -1,6 +1,7 @@
 package gnomon.evaluate;
 
 import gnomon.algebra.Refusal;
+import gnomon.form.Accumulation;
 import gnomon.form.Factorial;
 import gnomon.form.Form;
 import gnomon.form.Generator;
@@ -13,6 +14,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.function.Predicate;
+import java.util.stream.Stream;
 
 /// Whether the side conditions of closed forms hold where values are put in.
 final class Validity {
@@ -33,12 +35,38 @@ final class Validity {
       return false;
     }
     Form form = formValue.form();
-    return form.variables().stream().anyMatch(v -> !images.containsKey(v))
-        && form.generators().stream()
-            .filter(Factorial.class::isInstance)
-            .map(factorial -> ((Factorial) factorial).argument())
-            .filter(argument -> images.keySet().stream().anyMatch(argument::dependsOn))
-            .anyMatch(argument -> isNegativeInteger(argument, images));
+    return form.generators().stream()
+            .anyMatch(g -> g instanceof Accumulation sum && isSingular(sum, images))
+        || form.variables().stream().anyMatch(v -> !images.containsKey(v))
+            && form.generators().stream()
+                .filter(Factorial.class::isInstance)
+                .map(factorial -> ((Factorial) factorial).argument())
+                .filter(argument -> images.keySet().stream().anyMatch(argument::dependsOn))
+                .anyMatch(argument -> isNegativeInteger(argument, images));
+  }
+
+  /// Whether the terms of a standing sum are to be formed anew at the values: a factorial in them
+  /// becomes that of a negative integer, or one above does so at an end of the range, and the limit
+  /// along the bound variable need not be the term.
+  private static boolean isSingular(Accumulation sum, Map<? extends Generator, Form> images) {
+    for (Generator g : sum.body().generators()) {
+      if (!(g instanceof Factorial factorial)
+          || images.keySet().stream().noneMatch(factorial.argument()::dependsOn)) {
+        continue;
+      }
+      Form argument = factorial.argument();
+      boolean free = !argument.dependsOn(sum.bound());
+      boolean above = sum.body().numerator().contains(g);
+      if (free && isNegativeInteger(argument, images)
+          || !free
+              && above
+              && Stream.of(sum.lower(), sum.upper())
+                  .anyMatch(
+                      end -> isNegativeInteger(argument.substitute(sum.bound(), end), images))) {
+        return true;
+      }
+    }
+    return false;
   }
 
   private static boolean isNegativeInteger(Form argument, Map<? extends Generator, Form> images) {
