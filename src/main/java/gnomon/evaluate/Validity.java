@@ -35,14 +35,19 @@ final class Validity {
       return false;
     }
     Form form = formValue.form();
-    return form.generators().stream()
-            .anyMatch(g -> g instanceof Accumulation sum && isSingular(sum, images))
+    return hasSingularSum(form, images)
         || form.variables().stream().anyMatch(v -> !images.containsKey(v))
             && form.generators().stream()
                 .filter(Factorial.class::isInstance)
                 .map(factorial -> ((Factorial) factorial).argument())
                 .filter(argument -> images.keySet().stream().anyMatch(argument::dependsOn))
                 .anyMatch(argument -> isNegativeInteger(argument, images));
+  }
+
+  /// Whether a standing sum in the form has terms that are to be formed anew at the values.
+  static boolean hasSingularSum(Form form, Map<? extends Generator, Form> images) {
+    return form.generators().stream()
+        .anyMatch(g -> g instanceof Accumulation sum && isSingular(sum, images));
   }
 
   /// Whether the terms of a standing sum are to be formed anew at the values: a factorial in them

@@ -78,6 +78,11 @@ final class Witnesses {
     Map<Generator, Form> first = new HashMap<>();
     Map<Generator, Form> rest = new HashMap<>();
     point.forEach((v, value) -> (ends.contains(v) ? first : rest).put(v, Form.of(value)));
+    Map<Generator, Form> all = new HashMap<>(first);
+    all.putAll(rest);
+    if (Validity.hasSingularSum(form, all)) {
+      return Optional.empty();
+    }
     try {
       Form summed = first.isEmpty() ? form : Substitutions.addedUp(form.substitute(first));
       return Optional.of(Substitutions.addedUp(summed.substitute(rest)));

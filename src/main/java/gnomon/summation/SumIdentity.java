@@ -1,8 +1,10 @@
 package gnomon.summation;
 
 import gnomon.algebra.Budget;
+import gnomon.algebra.Reason;
 import gnomon.algebra.Refusal;
 import gnomon.form.Accumulation;
+import gnomon.form.Factorial;
 import gnomon.form.Form;
 import gnomon.form.Generator;
 import gnomon.form.LinearSystem;
@@ -260,7 +262,30 @@ public record SumIdentity(
       return Optional.of(new SumIdentity(n, coefficients, begin, least));
     }
 
+    /// Refuses a point at which the terms have factorials of negative integers, where their limit
+    /// along the index need not be what they mean.
+    private void refuseSingular(Accumulation sum, BigInteger point) {
+      for (Generator g : sum.body().generators()) {
+        if (g instanceof Factorial factorial) {
+          boolean above = sum.body().numerator().contains(g);
+          for (Form end : List.of(sum.lower(), sum.upper())) {
+            Form argument = factorial.argument().substitute(sum.bound(), end);
+            Optional<BigInteger> value = argument.substitute(n, Form.of(point)).asInteger();
+            boolean varies = factorial.argument().dependsOn(sum.bound());
+            if ((above || !varies) && value.filter(v -> v.signum() < 0).isPresent()) {
+              throw new Refusal(Reason.POLE, Form.of(g));
+            }
+          }
+        }
+      }
+    }
+
     private Form valueAt(Form form, BigInteger point) {
+      for (Generator g : form.generators()) {
+        if (g instanceof Accumulation sum && sum.dependsOn(n)) {
+          refuseSingular(sum, point);
+        }
+      }
       return form.mapGenerators(
               g ->
                   g instanceof Accumulation sum && sum.dependsOn(n)
