@@ -70,9 +70,9 @@ final class Claims {
           evaluation.conditions().stream()
               .filter(condition -> !inside.assumptions().imply(condition))
               .toList();
-      String more = new Conditions(evaluation.writing(), scope.running()).words(beyond);
-      String said = "for " + StatementText.of(claim.conditions(), Spelling.ASCII);
-      return new Proved(ground, more.isEmpty() ? said : said + more.replaceFirst("for", ","));
+      String assumed = StatementText.of(claim.conditions(), Spelling.ASCII);
+      Conditions conditions = new Conditions(evaluation.writing(), scope.running());
+      return new Proved(ground, conditions.words(assumed, beyond));
     }
     return verdict;
   }

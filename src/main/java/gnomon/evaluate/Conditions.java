@@ -25,7 +25,15 @@ final class Conditions {
   }
 
   String words(List<Condition> conditions) {
+    return words("", conditions);
+  }
+
+  /// The conditions after those that were assumed, in the words given.
+  String words(String assumed, List<Condition> conditions) {
     List<String> said = new ArrayList<>();
+    if (!assumed.isEmpty()) {
+      said.add(assumed);
+    }
     List<String> outside = new ArrayList<>();
     for (Condition condition : withoutConjugates(conditions)) {
       switch (condition.relation()) {

@@ -84,11 +84,8 @@ final class Umbrae {
   /// The umbrae of the scope.
   static List<Moment.Letter> letters(Scope scope) {
     return scope.names().values().stream()
-        .flatMap(
-            binding ->
-                binding instanceof Binding.Umbra(Moment.Letter letter)
-                    ? java.util.stream.Stream.of(letter)
-                    : java.util.stream.Stream.empty())
+        .filter(Binding.Umbra.class::isInstance)
+        .map(binding -> ((Binding.Umbra) binding).letter())
         .toList();
   }
 

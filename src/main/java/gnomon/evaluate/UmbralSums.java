@@ -50,7 +50,7 @@ final class UmbralSums {
   /// multiplied in a term may be joined when they have no umbra in common.
   private static Optional<Form> inside(Form body, Set<Moment.Letter> letters) {
     List<Form> parts = new ArrayList<>();
-    for (Form term : Moment.terms(body)) {
+    for (Form term : body.terms()) {
       Form opened = term;
       Set<Moment.Letter> met = new HashSet<>();
       for (Monomial.Power power : term.numerator().leadingTerm().monomial().factors()) {

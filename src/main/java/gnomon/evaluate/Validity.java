@@ -7,14 +7,13 @@ import gnomon.form.Form;
 import gnomon.form.Generator;
 import gnomon.number.Rational;
 import gnomon.summation.Condition;
+import gnomon.summation.SingularTerms;
 import gnomon.value.FormValue;
 import gnomon.value.Value;
-import java.math.BigInteger;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.function.Predicate;
-import java.util.stream.Stream;
 
 /// Whether the side conditions of closed forms hold where values are put in.
 final class Validity {
@@ -41,46 +40,13 @@ final class Validity {
                 .filter(Factorial.class::isInstance)
                 .map(factorial -> ((Factorial) factorial).argument())
                 .filter(argument -> images.keySet().stream().anyMatch(argument::dependsOn))
-                .anyMatch(argument -> isNegativeInteger(argument, images));
+                .anyMatch(argument -> SingularTerms.isNegativeInteger(argument, images));
   }
 
   /// Whether a standing sum in the form has terms that are to be formed anew at the values.
   static boolean hasSingularSum(Form form, Map<? extends Generator, Form> images) {
     return form.generators().stream()
-        .anyMatch(g -> g instanceof Accumulation sum && isSingular(sum, images));
-  }
-
-  /// Whether the terms of a standing sum are to be formed anew at the values: a factorial in them
-  /// becomes that of a negative integer, or one above does so at an end of the range, and the limit
-  /// along the bound variable need not be the term.
-  private static boolean isSingular(Accumulation sum, Map<? extends Generator, Form> images) {
-    for (Generator g : sum.body().generators()) {
-      if (!(g instanceof Factorial factorial)
-          || images.keySet().stream().noneMatch(factorial.argument()::dependsOn)) {
-        continue;
-      }
-      Form argument = factorial.argument();
-      boolean free = !argument.dependsOn(sum.bound());
-      boolean above = sum.body().numerator().contains(g);
-      if (free && isNegativeInteger(argument, images)
-          || !free
-              && above
-              && Stream.of(sum.lower(), sum.upper())
-                  .anyMatch(
-                      end -> isNegativeInteger(argument.substitute(sum.bound(), end), images))) {
-        return true;
-      }
-    }
-    return false;
-  }
-
-  private static boolean isNegativeInteger(Form argument, Map<? extends Generator, Form> images) {
-    try {
-      Optional<BigInteger> value = argument.substitute(Map.copyOf(images)).asInteger();
-      return value.filter(n -> n.signum() < 0).isPresent();
-    } catch (Refusal undefined) {
-      return true;
-    }
+        .anyMatch(g -> g instanceof Accumulation sum && SingularTerms.occur(sum, images));
   }
 
   static boolean concerns(Condition condition, Map<? extends Generator, Form> images) {

@@ -350,6 +350,13 @@ public final class Form implements Comparable<Form> {
         this, (generator, exponent) -> Powers.power(image.apply(generator), of(exponent)));
   }
 
+  /// The terms of the numerator, each over the denominator.
+  public List<Form> terms() {
+    return numerator.terms().stream()
+        .map(term -> fraction(Polynomial.of(term.monomial(), term.coefficient()), denominator))
+        .toList();
+  }
+
   /// The partial derivative by a variable or dual; kernels follow their own rules.
   public Form derivative(Generator variableOrDual) {
     return Derivation.derivative(this, variableOrDual);

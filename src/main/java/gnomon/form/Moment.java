@@ -4,7 +4,6 @@ import gnomon.algebra.Reason;
 import gnomon.algebra.Refusal;
 import gnomon.number.Rational;
 import gnomon.polynomial.Monomial;
-import gnomon.polynomial.Polynomial;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.HashMap;
@@ -32,18 +31,10 @@ public record Moment(List<Letter> letters, Form body) implements Generator {
   /// The value of the body, term by term.
   public static Form of(List<Letter> letters, Form body) {
     List<Form> parts = new ArrayList<>();
-    for (Form term : terms(body)) {
+    for (Form term : body.terms()) {
       parts.add(ofTerm(letters, term));
     }
     return Form.sum(parts);
-  }
-
-  /// The terms of the numerator, each over the denominator.
-  public static List<Form> terms(Form form) {
-    return form.numerator().terms().stream()
-        .map(term -> Polynomial.of(term.monomial(), term.coefficient()))
-        .map(numerator -> Form.fraction(numerator, form.denominator()))
-        .toList();
   }
 
   private static Form ofTerm(List<Letter> letters, Form term) {

@@ -95,7 +95,7 @@ public final class Iterate {
     List<Form> parts = new ArrayList<>();
     for (int k = 0; k < exponent; k++) {
       Budget.checkpoint();
-      parts.add(basic(k, x).times(regularPower(exponent - k, t)));
+      parts.add(basic(k, x).times(Composition.regular(base.symbol().power(exponent - k), t)));
     }
     SortedMap<Variable, Form> boundaries = new TreeMap<>();
     boundaries.put(x, Form.sum(parts).negated());
@@ -115,17 +115,6 @@ public final class Iterate {
       terms.add(series.coefficient(i).times(weight).times(Form.of(x).power(k - i)));
     }
     return Form.sum(terms);
-  }
-
-  /// The part of s^j regular in t.
-  private Form regularPower(int j, Dual t) {
-    Form tail = base.symbol().times(Form.of(t));
-    PowerSeries series = Expansion.of(tail, t, j - 1).power(j);
-    Form result = base.symbol().power(j);
-    for (int i = 0; i < j; i++) {
-      result = result.minus(series.coefficient(i).times(Form.of(t).power(i - j)));
-    }
-    return result;
   }
 
   /// L A^n for a shift-invariant L, where L s^n has a pole of an order m below n: since Q A = 1, it

@@ -51,7 +51,7 @@ public final class Moments {
       }
     }
     List<Form> parts = new ArrayList<>();
-    for (Form term : Moment.terms(f)) {
+    for (Form term : f.terms()) {
       parts.add(ofTerm(term, present));
     }
     return Form.sum(parts);

@@ -98,7 +98,7 @@ public record ExponentialTransform(
         }
       }
       List<Form> parts = new ArrayList<>();
-      for (Form term : Moment.terms(sequence.times(divisor))) {
+      for (Form term : sequence.times(divisor).terms()) {
         Optional<Form> part = ofTerm(term);
         if (part.isEmpty()) {
           return Optional.empty();
@@ -178,7 +178,7 @@ public record ExponentialTransform(
       }
       Accumulation sum = (Accumulation) kernel;
       List<Form> terms = new ArrayList<>();
-      for (Form term : Moment.terms(sum.body())) {
+      for (Form term : sum.body().terms()) {
         Optional<Power> power = Power.of(term, n);
         if (power.isEmpty()) {
           return Optional.empty();

@@ -4,7 +4,6 @@ import gnomon.algebra.Budget;
 import gnomon.algebra.Reason;
 import gnomon.algebra.Refusal;
 import gnomon.form.Accumulation;
-import gnomon.form.Factorial;
 import gnomon.form.Form;
 import gnomon.form.Generator;
 import gnomon.form.LinearSystem;
@@ -16,6 +15,7 @@ import gnomon.recurrence.IntegerRoots;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 
 /// Whether a combination of standing sums and hypergeometric terms in n is zero, by recurrences.
@@ -80,10 +80,7 @@ public record SumIdentity(
     Optional<SumIdentity> identity(Form difference, BigInteger least) {
       from = least;
       List<Form> weights = new ArrayList<>();
-      for (var term : difference.numerator().terms()) {
-        Form form =
-            Form.fraction(
-                Polynomial.of(term.monomial(), term.coefficient()), difference.denominator());
+      for (Form form : difference.terms()) {
         if (!read(form, weights)) {
           return Optional.empty();
         }
@@ -262,28 +259,10 @@ public record SumIdentity(
       return Optional.of(new SumIdentity(n, coefficients, begin, least));
     }
 
-    /// Refuses a point at which the terms have factorials of negative integers, where their limit
-    /// along the index need not be what they mean.
-    private void refuseSingular(Accumulation sum, BigInteger point) {
-      for (Generator g : sum.body().generators()) {
-        if (g instanceof Factorial factorial) {
-          boolean above = sum.body().numerator().contains(g);
-          for (Form end : List.of(sum.lower(), sum.upper())) {
-            Form argument = factorial.argument().substitute(sum.bound(), end);
-            Optional<BigInteger> value = argument.substitute(n, Form.of(point)).asInteger();
-            boolean varies = factorial.argument().dependsOn(sum.bound());
-            if ((above || !varies) && value.filter(v -> v.signum() < 0).isPresent()) {
-              throw new Refusal(Reason.POLE, Form.of(g));
-            }
-          }
-        }
-      }
-    }
-
     private Form valueAt(Form form, BigInteger point) {
       for (Generator g : form.generators()) {
-        if (g instanceof Accumulation sum && sum.dependsOn(n)) {
-          refuseSingular(sum, point);
+        if (g instanceof Accumulation sum && SingularTerms.occur(sum, Map.of(n, Form.of(point)))) {
+          throw new Refusal(Reason.POLE, Form.of(g));
         }
       }
       return form.mapGenerators(
